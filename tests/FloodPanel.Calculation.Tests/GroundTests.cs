@@ -1,0 +1,7 @@
+namespace FloodPanel.Calculation.Tests;
+
+public class GroundTests
+{
+    [Fact]
+    public void Runner_Starts() => Assert.Equal(10, Environment.Version.Major);
+}
