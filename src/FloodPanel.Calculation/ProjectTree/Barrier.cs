@@ -1,0 +1,61 @@
+namespace FloodPanel.Calculation.ProjectTree;
+
+/// <summary>The stop-logs, posts and declarations that close an opening.</summary>
+public sealed record Barrier
+{
+    /// <summary>The stack of stop-logs, the same in each bay.</summary>
+    public LogStack Logs { get; init; } = new();
+
+    /// <summary>Clear width of each bay from left to right [m], seen from the flood side; posts stand between them.</summary>
+    public ValueList<double> Bays { get; init; } = [];
+
+    /// <summary>The posts between the bays; null when there is one bay.</summary>
+    public PostSet? Posts { get; init; }
+
+    /// <summary>Checks declared to be made by somebody else.</summary>
+    public ValueList<DesignedByOthers> ByOthers { get; init; } = [];
+}
+
+/// <summary>A stack of equal stop-logs.</summary>
+public sealed record LogStack
+{
+    /// <summary>What the logs are made of.</summary>
+    public MaterialChoice Material { get; init; } = new Material();
+
+    /// <summary>Cross-section of a log; height along the stack, depth in the direction of the water.</summary>
+    public ProfileChoice Profile { get; init; } = new Rectangle();
+
+    /// <summary>Number of logs in the stack [-], 1 to 100.</summary>
+    public int Count { get; init; } = 1;
+
+    /// <summary>Length of log that bears at each end [m], > 0.</summary>
+    public double EndBearing { get; init; } = 0.04;
+
+    /// <summary>n in the deflection limit span / n [-], > 0.</summary>
+    public double DeflectionLimit { get; init; } = 200;
+
+    /// <summary>Total end play taken off the cutting length so that the log slides into its guides [m], ≥ 0.</summary>
+    public double FittingClearance { get; init; } = 0.01;
+}
+
+/// <summary>The posts between bays, all alike.</summary>
+public sealed record PostSet
+{
+    /// <summary>What the posts are made of.</summary>
+    public MaterialChoice Material { get; init; } = new Material();
+
+    /// <summary>Cross-section of a post; height across the opening, depth in the direction of the water.</summary>
+    public ProfileChoice Profile { get; init; } = new RectangularTube();
+
+    /// <summary>Width that a post takes out of the opening [m], > 0.</summary>
+    public double Width { get; init; } = 0.1;
+
+    /// <summary>n in the deflection limit post length / n [-], > 0.</summary>
+    public double DeflectionLimit { get; init; } = 100;
+}
+
+/// <summary>A needed check that somebody else makes.</summary>
+/// <param name="Check">Name of the check, one of <see cref="NeededChecks"/>.</param>
+/// <param name="Name">Who designs it; empty until known.</param>
+/// <param name="Reference">Their drawing or calculation; empty until known.</param>
+public sealed record DesignedByOthers(string Check, string Name, string Reference);

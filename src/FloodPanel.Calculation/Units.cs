@@ -1,0 +1,126 @@
+using System.Collections.Frozen;
+using System.Globalization;
+
+namespace FloodPanel.Calculation;
+
+/// <summary>A unit of display: one of it is <paramref name="InSI"/> base SI units.</summary>
+/// <param name="Symbol">As printed; empty for a pure number.</param>
+/// <param name="InSI">Size in base SI.</param>
+/// <param name="Decimals">Fixed decimals, or null for three significant figures.</param>
+public sealed record Unit(string Symbol, double InSI, int? Decimals = null);
+
+/// <summary>
+/// The one place that converts and prints. Everything else is base SI. The factors are exact by definition:
+/// 1 ft = 0.3048 m, 1 lb = 0.45359237 kg (international yard and pound agreement, 1959), 1 lbf = 1 lb × 9.80665 m/s².
+/// </summary>
+public static class Units
+{
+    private const double Foot = 0.3048;
+    private const double Inch = Foot / 12;
+    private const double Pound = 0.45359237;
+    private const double PoundForce = Pound * Physics.Gravity;
+    private const double KipPerSquareInch = 1000 * PoundForce / (Inch * Inch);
+    private const double Degree = Math.PI / 180;
+
+    private static readonly FrozenDictionary<Dimension, (Unit SI, Unit US)> Table =
+        new Dictionary<Dimension, (Unit, Unit)>
+        {
+            [Dimension.Ratio] = (new("", 1), new("", 1)),
+            [Dimension.Count] = (new("", 1, 0), new("", 1, 0)),
+            [Dimension.Degrees] = (new("°", 1, 1), new("°", 1, 1)),
+            [Dimension.Angle] = (new("°", Degree, 1), new("°", Degree, 1)),
+            [Dimension.Length] = (new("m", 1, 3), new("ft", Foot, 2)),
+            [Dimension.SectionLength] = (new("mm", 1e-3, 1), new("in", Inch, 3)),
+            [Dimension.SectionArea] = (new("cm²", 1e-4), new("in²", Inch * Inch)),
+            [Dimension.SectionModulus] = (new("cm³", 1e-6), new("in³", Inch * Inch * Inch)),
+            [Dimension.SecondMoment] = (new("cm⁴", 1e-8), new("in⁴", Inch * Inch * Inch * Inch)),
+            [Dimension.Velocity] = (new("m/s", 1), new("ft/s", Foot)),
+            [Dimension.Acceleration] = (new("m/s²", 1), new("ft/s²", Foot)),
+            [Dimension.Time] = (new("s", 1), new("s", 1)),
+            [Dimension.Mass] = (new("kg", 1), new("lb", Pound)),
+            [Dimension.LineMass] = (new("kg/m", 1), new("lb/ft", Pound / Foot)),
+            [Dimension.Density] = (new("kg/m³", 1, 0), new("lb/ft³", Pound / (Foot * Foot * Foot), 1)),
+            [Dimension.UnitWeight] = (new("kN/m³", 1e3), new("lbf/ft³", PoundForce / (Foot * Foot * Foot))),
+            [Dimension.Force] = (new("kN", 1e3), new("lbf", PoundForce)),
+            [Dimension.LineForce] = (new("kN/m", 1e3), new("lbf/ft", PoundForce / Foot)),
+            [Dimension.Moment] = (new("kN·m", 1e3), new("lbf·ft", PoundForce * Foot)),
+            [Dimension.Pressure] = (new("kPa", 1e3), new("psf", PoundForce / (Foot * Foot))),
+            [Dimension.Stress] = (new("MPa", 1e6), new("ksi", KipPerSquareInch)),
+            [Dimension.ElasticModulus] = (new("GPa", 1e9), new("ksi", KipPerSquareInch)),
+        }.ToFrozenDictionary();
+
+    /// <summary>The unit in which a dimension is shown and typed.</summary>
+    /// <param name="dimension">What the number measures.</param>
+    /// <param name="system">The system of units.</param>
+    public static Unit Of(Dimension dimension, UnitSystem system) =>
+        system == UnitSystem.SI ? Table[dimension].SI : Table[dimension].US;
+
+    /// <summary>Base SI to the unit shown.</summary>
+    /// <param name="value">The number [base SI].</param>
+    /// <param name="dimension">What it measures.</param>
+    /// <param name="system">The system of units.</param>
+    public static double FromSI(double value, Dimension dimension, UnitSystem system) =>
+        value / Of(dimension, system).InSI;
+
+    /// <summary>The unit shown to base SI.</summary>
+    /// <param name="value">The number in the unit shown.</param>
+    /// <param name="dimension">What it measures.</param>
+    /// <param name="system">The system of units.</param>
+    public static double ToSI(double value, Dimension dimension, UnitSystem system) =>
+        value * Of(dimension, system).InSI;
+
+    /// <summary>Number and unit, "1.78 kN".</summary>
+    /// <param name="value">The number [base SI].</param>
+    /// <param name="dimension">What it measures.</param>
+    /// <param name="system">The system of units.</param>
+    public static string Format(double value, Dimension dimension, UnitSystem system)
+    {
+        var symbol = Of(dimension, system).Symbol;
+        var number = FormatNumber(value, dimension, system);
+        return symbol.Length == 0 ? number : symbol == "°" ? number + symbol : $"{number} {symbol}";
+    }
+
+    /// <summary>Number and unit of a quantity, "1.78 kN".</summary>
+    /// <param name="quantity">The quantity.</param>
+    /// <param name="system">The system of units.</param>
+    public static string Format(Quantity quantity, UnitSystem system) =>
+        Format(quantity.Value, quantity.Dimension, system);
+
+    /// <summary>The number alone, as shown in results: fixed decimals for lengths, else three significant figures.</summary>
+    /// <param name="value">The number [base SI].</param>
+    /// <param name="dimension">What it measures.</param>
+    /// <param name="system">The system of units.</param>
+    public static string FormatNumber(double value, Dimension dimension, UnitSystem system)
+    {
+        var unit = Of(dimension, system);
+        var shown = value / unit.InSI;
+        var text = unit.Decimals is { } decimals
+            ? shown.ToString("F" + decimals.ToString(CultureInfo.InvariantCulture), CultureInfo.InvariantCulture)
+            : SignificantFigures(shown, 3);
+        return text.StartsWith('-') && text.AsSpan(1).IndexOfAnyInRange('1', '9') < 0 ? text[1..] : text;
+    }
+
+    /// <summary>The number as typed back into a form: enough digits to mean the same, no trailing zeros.</summary>
+    /// <param name="value">The number [base SI].</param>
+    /// <param name="dimension">What it measures.</param>
+    /// <param name="system">The system of units.</param>
+    public static string FormatInput(double value, Dimension dimension, UnitSystem system) =>
+        FromSI(value, dimension, system).ToString("G9", CultureInfo.InvariantCulture) is var text && text.Contains('E')
+            ? FromSI(value, dimension, system).ToString("0.#########", CultureInfo.InvariantCulture)
+            : text;
+
+    private static string SignificantFigures(double value, int figures)
+    {
+        if (value == 0 || !double.IsFinite(value))
+        {
+            return value == 0 ? "0" : value > 0 ? "∞" : value < 0 ? "−∞" : "–";
+        }
+
+        var magnitude = (int)Math.Floor(Math.Log10(Math.Abs(value)));
+        var scale = Math.Pow(10, Math.Max(magnitude - figures + 1, 0));
+        var rounded = Math.Round(value / scale) * scale;
+        var decimals = Math.Clamp(figures - 1 - magnitude, 0, 9);
+        return (decimals == 0 ? rounded : value).ToString(
+            "F" + decimals.ToString(CultureInfo.InvariantCulture), CultureInfo.InvariantCulture);
+    }
+}
