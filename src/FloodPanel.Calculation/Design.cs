@@ -1,4 +1,8 @@
+using FloodPanel.Calculation.Actions;
+using FloodPanel.Calculation.Cases;
+using FloodPanel.Calculation.Handling;
 using FloodPanel.Calculation.ProjectTree;
+using FloodPanel.Calculation.Water;
 
 namespace FloodPanel.Calculation;
 
@@ -8,6 +12,7 @@ public static class Design
     /// <summary>Calculates every opening of a project.</summary>
     /// <param name="project">A project without problems, see <see cref="Validation.Validate"/>.</param>
     /// <param name="library">The materials and profiles it may name.</param>
+    /// <exception cref="ArgumentException">The project has problems that <see cref="Validation.Validate"/> would name.</exception>
     public static ProjectResult Run(Project project, Library library) =>
         new(project, [.. project.Openings.Select(o => Evaluate(project, o, library))]);
 
@@ -15,6 +20,66 @@ public static class Design
     /// <param name="project">The project: its site and design basis apply.</param>
     /// <param name="opening">An opening without problems, see <see cref="Validation.Validate"/>.</param>
     /// <param name="library">The materials and profiles it may name.</param>
-    public static OpeningResult Evaluate(Project project, Opening opening, Library library) =>
-        throw new InvalidOperationException($"{project.Name} {opening.Name} {library}");
+    /// <exception cref="ArgumentException">The opening has problems that <see cref="Validation.Validate"/> would name.</exception>
+    public static OpeningResult Evaluate(Project project, Opening opening, Library library)
+    {
+        var site = project.Site;
+        var model = new OpeningModel(site, opening, DesignBases.Of(project.DesignBasis), library);
+        var cases = Cases(model);
+        var freeboard = FloodLevels.Freeboard(model.RetainedDepth, site.Freeboard, model.Height);
+        var schedule = new LogSchedule[model.Bays.Count];
+        for (var bay = 0; bay < schedule.Length; bay++)
+        {
+            schedule[bay] = LogHandling.Schedule(bay + 1, model.Bays[bay], opening.Barrier.Logs, model.Log);
+        }
+
+        var uncomputed = Uncomputed(opening.Actions);
+        return new()
+        {
+            Opening = opening,
+            DesignFloodLevel = site.DesignFloodLevel,
+            RetainedDepth = model.RetainedDepth,
+            ProtectedDepth = model.ProtectedDepth,
+            BarrierHeight = model.Height,
+            Levels = FloodLevels.At(site, opening),
+            Cases = cases,
+            Freeboard = freeboard,
+            Schedule = schedule,
+            Verdict = VerdictRules.Of(opening, model, cases, freeboard, uncomputed),
+            Notes = Cautions.Of(site, opening, model, schedule, uncomputed),
+        };
+    }
+
+    private static CaseResult[] Cases(OpeningModel model)
+    {
+        var numbers = new CaseEvaluation(model.LogCount, model.Bays.Count);
+        var results = new CaseResult[CaseDiagram.All.Count];
+        for (var i = 0; i < results.Length; i++)
+        {
+            numbers.Fill(model, CaseDiagram.All[i]);
+            results[i] = CaseReport.Of(model, CaseDiagram.All[i], numbers);
+        }
+
+        return results;
+    }
+
+    /// <summary>Actions whose load is not, or not wholly, in the figures: by name.</summary>
+    private static List<string> Uncomputed(ActionSet actions)
+    {
+        var names = new List<string>();
+        Add(actions.Flow is { Velocity: > Flow.SurchargeVelocityLimit }, "flow");
+        Add(actions.Wave is not null, "wave");
+        Add(actions.Debris is not null, "debris");
+        Add(actions.Wind is not null, "wind");
+        Add(actions.Line is not null, "line");
+        return names;
+
+        void Add(bool applies, string name)
+        {
+            if (applies)
+            {
+                names.Add(name);
+            }
+        }
+    }
 }

@@ -18,8 +18,11 @@ public enum Dimension
     /// <summary>Level, width, span or height of an opening: m / ft.</summary>
     Length,
 
-    /// <summary>Size of a cross-section, a deflection, a clearance: mm / in.</summary>
+    /// <summary>Size of a cross-section, a clearance: mm / in.</summary>
     SectionLength,
+
+    /// <summary>Deflection: mm / in, to three figures.</summary>
+    Deflection,
 
     /// <summary>Area of a cross-section: cm² / in².</summary>
     SectionArea,
@@ -59,6 +62,9 @@ public enum Dimension
 
     /// <summary>Moment: kN·m / lbf·ft.</summary>
     Moment,
+
+    /// <summary>Bending stiffness: kN·m² / lbf·ft².</summary>
+    Stiffness,
 
     /// <summary>Pressure of water or wind: kPa / psf.</summary>
     Pressure,

@@ -2,12 +2,86 @@ using FloodPanel.Calculation.ProjectTree;
 
 namespace FloodPanel.Calculation;
 
-/// <summary>Finds what the calculation cannot take.</summary>
+/// <summary>Finds what the calculation cannot take. Paths are those of the project file.</summary>
 public static class Validation
 {
+    /// <summary>Greatest retained depth that is taken for a depth and not for a slip in a level [m].</summary>
+    public const double GreatestRetainedDepth = 20;
+
     /// <summary>All problems of a project, in the order of the file; empty when it can be calculated.</summary>
     /// <param name="project">The project.</param>
     /// <param name="library">The materials and profiles it may name.</param>
-    public static IReadOnlyList<InputProblem> Validate(this Project project, Library library) =>
-        project.Openings.Count < 0 || library is null ? [new("", new($""))] : [];
+    public static IReadOnlyList<InputProblem> Validate(this Project project, Library library)
+    {
+        var problems = new ProblemList();
+        if (string.IsNullOrWhiteSpace(project.Name))
+        {
+            problems.Add("name", $"Project name is empty; give the project a name.");
+        }
+
+        ValidateSite(project.Site, problems);
+        var ids = new HashSet<string>(StringComparer.Ordinal);
+        for (var i = 0; i < project.Openings.Count; i++)
+        {
+            var (opening, path) = (project.Openings[i], $"openings[{i}]");
+            if (!IsIdentifier(opening.Id))
+            {
+                problems.Add($"{path}.id", $"Id is \"{opening.Id}\"; allowed are 1 to 60 letters, digits and hyphens.");
+            }
+            else if (!ids.Add(opening.Id))
+            {
+                problems.Add($"{path}.id", $"Id \"{opening.Id}\" is used by an earlier opening; each needs its own.");
+            }
+
+            ValidateOpening(project.Site, opening, path, problems, library);
+        }
+
+        return problems.Problems;
+    }
+
+    /// <summary>True for 1 to 60 letters (a to z), digits and hyphens.</summary>
+    /// <param name="id">The identifier.</param>
+    public static bool IsIdentifier(string id) =>
+        id.Length is >= 1 and <= 60 && id.All(c => char.IsAsciiLetterOrDigit(c) || c == '-');
+
+    private static void ValidateSite(Site site, ProblemList problems)
+    {
+        const string path = "site";
+        problems.Check(Fields.WaterDensity, site.WaterDensity, path);
+        problems.Check(Fields.AnnualProbability, site.AnnualProbability, path);
+        problems.Check(Fields.DesignStillWaterLevel, site.DesignStillWaterLevel, path);
+        problems.Check(Fields.Surge, site.Surge, path);
+        problems.Check(Fields.ClimateAllowance, site.ClimateAllowance, path);
+        problems.Check(Fields.Freeboard, site.Freeboard, path);
+        for (var i = 0; i < site.Levels.Count; i++)
+        {
+            problems.Check(Fields.LevelProbability, site.Levels[i].AnnualProbability, $"{path}.levels[{i}]");
+            problems.Check(Fields.LevelValue, site.Levels[i].Level, $"{path}.levels[{i}]");
+        }
+    }
+
+    private static void ValidateOpening(Site site, Opening opening, string path, ProblemList problems, Library library)
+    {
+        var sill = problems.Check(Fields.SillLevel, opening.SillLevel, path);
+        problems.Check(Fields.GroundLevel, opening.GroundLevel, path);
+        problems.Check(Fields.ClearWidth, opening.ClearWidth, path);
+        problems.Check(Fields.ClearHeight, opening.ClearHeight, path);
+        problems.Check(Fields.Rake, opening.RakeDegrees, path);
+        problems.Check(Fields.ProtectedSideLevel, opening.ProtectedSideLevel, path);
+        var retained = site.DesignFloodLevel - opening.SillLevel;
+        if (sill && retained > GreatestRetainedDepth)
+        {
+            problems.Add($"{path}.sillLevel", $"Sill level is {Length(opening.SillLevel)}, {Length(retained)} below the design flood level, {Length(site.DesignFloodLevel)}; allowed is up to {Length(GreatestRetainedDepth)} below it.");
+        }
+
+        if (opening.ProtectedSideLevel is { } behind && behind > site.DesignFloodLevel)
+        {
+            problems.Add($"{path}.protectedSideLevel", $"Protected-side water level is {Length(behind)}, above the design flood level, {Length(site.DesignFloodLevel)}; allowed is up to that level, because reverse head is not covered.");
+        }
+
+        BarrierValidation.Validate(opening, path, problems, library);
+        ActionValidation.Validate(opening, path, problems, library);
+    }
+
+    private static Quantity Length(double value) => new(value, Dimension.Length);
 }

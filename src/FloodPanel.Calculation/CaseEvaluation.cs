@@ -1,0 +1,85 @@
+using FloodPanel.Calculation.Actions;
+using FloodPanel.Calculation.Cases;
+using FloodPanel.Calculation.Guides;
+using FloodPanel.Calculation.Logs;
+using FloodPanel.Calculation.Posts;
+
+namespace FloodPanel.Calculation;
+
+/// <summary>
+/// One load case of an opening in numbers only, without working. The same object may be filled again and again
+/// for models with the same counts of logs and bays; filling it allocates nothing.
+/// </summary>
+public sealed class CaseEvaluation
+{
+    private readonly FactoredLoad[] logLoads;
+    private readonly LogResponse[] logs;
+    private readonly PostResponse[] posts;
+
+    /// <summary>Makes room for an opening.</summary>
+    /// <param name="logCount">Logs in a stack [-].</param>
+    /// <param name="bayCount">Bays [-].</param>
+    public CaseEvaluation(int logCount, int bayCount)
+    {
+        logLoads = new FactoredLoad[logCount];
+        logs = new LogResponse[logCount * bayCount];
+        posts = new PostResponse[bayCount - 1];
+    }
+
+    /// <summary>The pressure of the case over the height of the barrier.</summary>
+    public PressureDiagram Diagram { get; } = new();
+
+    /// <summary>Line load of each log, the lowest first; the same in each bay [N/m].</summary>
+    public ReadOnlySpan<FactoredLoad> LogLoads => logLoads;
+
+    /// <summary>The logs, bay by bay from left to right, the lowest log first.</summary>
+    public ReadOnlySpan<LogResponse> Logs => logs;
+
+    /// <summary>The posts from left to right.</summary>
+    public ReadOnlySpan<PostResponse> Posts => posts;
+
+    /// <summary>The guide of the first bay.</summary>
+    public GuideResponse LeftGuide { get; private set; }
+
+    /// <summary>The guide of the last bay.</summary>
+    public GuideResponse RightGuide { get; private set; }
+
+    /// <summary>Calculates a load case.</summary>
+    /// <param name="model">An opening with as many logs and bays as this object has room for.</param>
+    /// <param name="kind">The case.</param>
+    public void Fill(OpeningModel model, CaseKind kind)
+    {
+        CaseDiagram.Fill(Diagram, model, kind);
+        FillLogs(model);
+        for (var post = 0; post < posts.Length; post++)
+        {
+            posts[post] = Cantilever.Respond(Diagram, model.Post!, model.PostTributary(post), model.FaceLength, model.CosRake);
+        }
+
+        LeftGuide = GuideReaction.Of(logLoads, model.GuideTributary(0), model.Log.Section.Height);
+        RightGuide = GuideReaction.Of(logLoads, model.GuideTributary(model.Bays.Count - 1), model.Log.Section.Height);
+    }
+
+    private void FillLogs(OpeningModel model)
+    {
+        var perSlope = 1 / model.CosRake;
+        var bottom = 0.0;
+        for (var index = 0; index < logLoads.Length; index++)
+        {
+            var top = model.EdgeHeight(index + 1);
+            var load = Diagram.Within(bottom, top);
+            logLoads[index] = new(load.Characteristic * perSlope, load.Design * perSlope);
+            bottom = top;
+        }
+
+        for (var bay = 0; bay < model.Bays.Count; bay++)
+        {
+            var span = model.Span(bay);
+            var responses = logs.AsSpan(bay * logLoads.Length, logLoads.Length);
+            for (var index = 0; index < responses.Length; index++)
+            {
+                responses[index] = LogResponse.Of(logLoads[index], span, model.Log);
+            }
+        }
+    }
+}

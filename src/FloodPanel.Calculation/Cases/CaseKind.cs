@@ -1,0 +1,28 @@
+namespace FloodPanel.Calculation.Cases;
+
+/// <summary>A named set of actions that act together.</summary>
+public enum CaseKind
+{
+    /// <summary>Still water at the design flood level, and flow.</summary>
+    DesignFlood,
+
+    /// <summary>Still water at the top of the barrier, the protected side dry.</summary>
+    BrimFull,
+}
+
+/// <summary>Names of the cases.</summary>
+public static class CaseNames
+{
+    /// <summary>The name in files, "design-flood".</summary>
+    /// <param name="kind">The case.</param>
+    public static string InFiles(CaseKind kind) => kind switch
+    {
+        CaseKind.DesignFlood => "design-flood",
+        CaseKind.BrimFull => "brim-full",
+        _ => throw new ArgumentOutOfRangeException(nameof(kind), kind, "is not a case"),
+    };
+
+    /// <summary>The name in sentences, "design flood".</summary>
+    /// <param name="name">The name in files.</param>
+    public static string InWords(string name) => name == "brim-full" ? "brim-full" : name.Replace('-', ' ');
+}

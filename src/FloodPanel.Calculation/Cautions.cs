@@ -1,0 +1,135 @@
+using FloodPanel.Calculation.Actions;
+using FloodPanel.Calculation.Handling;
+using FloodPanel.Calculation.ProjectTree;
+
+namespace FloodPanel.Calculation;
+
+/// <summary>Cautions and results not covered, each only where it applies.</summary>
+internal static class Cautions
+{
+    /// <summary>USACE, MP SL-85-5 (1985): unreinforced masonry carries about 3 ft (0.9 m) of water.</summary>
+    private const double MasonryDepth = 0.9;
+
+    /// <summary>CLG/Defra (2007): more than 0.6 m of difference may damage standard masonry (secondary source).</summary>
+    private const double CavityMasonryDepth = 0.6;
+
+    /// <summary>Printed wherever a result is printed.</summary>
+    public static Note CalculationAid { get; } = new("calculation-aid", new(
+        $"This is a calculation aid. It must be checked by a licensed engineer and follow local codes. A barrier can fail or be overtopped: people leave when told to."));
+
+    public static List<Note> Of(
+        Site site, Opening opening, OpeningModel model, IReadOnlyList<LogSchedule> schedule, IReadOnlyList<string> uncomputed)
+    {
+        var notes = new List<Note>();
+        Levels(notes, site, opening, model);
+        Flowing(notes, model);
+        foreach (var action in uncomputed.Where(a => a != "flow"))
+        {
+            notes.Add(new("action-not-computed", new(
+                $"The {action} action in the file is not yet part of the calculation: its load is not in these figures.")));
+        }
+
+        Strengths(notes, NeededChecks.Logs, model.Log);
+        if (model.Post is { } post)
+        {
+            Strengths(notes, NeededChecks.Posts, post);
+        }
+
+        Declarations(notes, opening);
+        Lifting(notes, schedule);
+        Walls(notes, opening, Math.Max(model.RetainedDepth, site.DesignFloodLevel - (opening.GroundLevel ?? opening.SillLevel)));
+        notes.Add(CalculationAid);
+        return notes;
+    }
+
+    private static void Levels(List<Note> notes, Site site, Opening opening, OpeningModel model)
+    {
+        var (depth, height) = (model.RetainedDepth, model.Height);
+        if (depth <= 0)
+        {
+            notes.Add(new("sill-dry", new(
+                $"The design flood level, {Length(site.DesignFloodLevel)}, does not rise above the sill, {Length(opening.SillLevel)}: no water stands against the barrier in the design flood.")));
+        }
+
+        if (depth > height)
+        {
+            notes.Add(new("overtopped", new(
+                $"The design flood stands {Length(depth - height)} above the top of the barrier: water flows over it.")));
+        }
+
+        if (height > opening.ClearHeight)
+        {
+            notes.Add(new("taller-than-opening", new(
+                $"The barrier, {Length(height)} high, is taller than the clear height of the opening, {Length(opening.ClearHeight)}: check that the top logs can be placed.")));
+        }
+    }
+
+    private static void Flowing(List<Note> notes, OpeningModel model)
+    {
+        if (model.Flow is { Velocity: > Flow.SurchargeVelocityLimit } flow)
+        {
+            notes.Add(new("flow-detailed-analysis", new(
+                $"Flow of {new Quantity(flow.Velocity, Dimension.Velocity)} is above {new Quantity(Flow.SurchargeVelocityLimit, Dimension.Velocity)}: the method asks for a detailed analysis. The drag shown is an estimate.")));
+        }
+    }
+
+    private static void Strengths(List<Note> notes, string check, Member member)
+    {
+        if (member.IsComplete)
+        {
+            return;
+        }
+
+        var what = member.Bending is null && member.Shear is null ? "bending and shear" : member.Bending is null ? "bending" : "shear";
+        notes.Add(new("strength-missing", new(
+            $"The {check} have no design {what} stress: enter an allowable stress, or a strength that the design basis covers for {member.Material.Family.ToString().ToLowerInvariant()}.")));
+    }
+
+    private static void Declarations(List<Note> notes, Opening opening)
+    {
+        foreach (var declaration in opening.Barrier.ByOthers.Where(d => !VerdictRules.IsNamed(d)))
+        {
+            notes.Add(new("by-others-unnamed", new(
+                $"The {NeededChecks.Title(declaration.Check)} are declared designed by others without a name and a reference: enter both, or the check stays missing.")));
+        }
+    }
+
+    private static void Lifting(List<Note> notes, IReadOnlyList<LogSchedule> schedule)
+    {
+        var heaviest = schedule.Max(row => row.Mass);
+        if (heaviest > LogHandling.TwoPeople)
+        {
+            notes.Add(new("log-too-heavy", new(
+                $"A log weighs {Mass(heaviest)} without fittings, more than two people should lift ({Mass(LogHandling.TwoPeople)}): use lifting gear, shorter bays or a lighter profile.")));
+        }
+        else if (heaviest > LogHandling.OnePerson)
+        {
+            notes.Add(new("log-two-people", new(
+                $"A log weighs {Mass(heaviest)} without fittings, more than one person should lift ({Mass(LogHandling.OnePerson)}): plan for two.")));
+        }
+    }
+
+    private static void Walls(List<Note> notes, Opening opening, double depth)
+    {
+        switch (opening.Wall)
+        {
+            case WallKind.Masonry when depth > MasonryDepth:
+                notes.Add(WallNote("an unreinforced masonry wall", depth, MasonryDepth));
+                break;
+            case WallKind.CavityMasonry when depth > CavityMasonryDepth:
+                notes.Add(WallNote("a cavity masonry wall", depth, CavityMasonryDepth));
+                break;
+            case WallKind.TimberFrame or WallKind.SteelFrame when depth > 0:
+                notes.Add(new("wall-depth", new(
+                    $"{Length(depth)} of water stands against a framed wall, which carries less than masonry: have the wall checked before water is held against it.")));
+                break;
+        }
+    }
+
+    private static Note WallNote(string wall, double depth, double limit) => new("wall-depth", new(
+        $"{Length(depth)} of water stands against {wall}; about {Length(limit)} is the published limit without damage. Holding water higher can bring the wall down."));
+
+    private static Quantity Length(double value) => new(value, Dimension.Length);
+
+    private static Quantity Mass(double value) => new(value, Dimension.Mass);
+}

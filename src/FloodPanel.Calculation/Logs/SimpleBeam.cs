@@ -1,0 +1,25 @@
+namespace FloodPanel.Calculation.Logs;
+
+/// <summary>A simply supported beam of span L under a uniform line load w.</summary>
+public static class SimpleBeam
+{
+    /// <summary>Source of the formulas, as printed.</summary>
+    public const string Source = "Beam statics, simply supported, uniform load";
+
+    /// <summary>M = w·L²/8, moment at mid-span [N·m].</summary>
+    /// <param name="lineLoad">w [N/m].</param>
+    /// <param name="span">L [m].</param>
+    public static double Moment(double lineLoad, double span) => lineLoad * span * span / 8;
+
+    /// <summary>V = w·L/2, shear force at the support [N].</summary>
+    /// <param name="lineLoad">w [N/m].</param>
+    /// <param name="span">L [m].</param>
+    public static double Shear(double lineLoad, double span) => lineLoad * span / 2;
+
+    /// <summary>δ = 5·w·L⁴/(384·E·I), deflection at mid-span [m]; shear deformation not included.</summary>
+    /// <param name="lineLoad">w [N/m].</param>
+    /// <param name="span">L [m].</param>
+    /// <param name="stiffness">E·I [N·m²], > 0.</param>
+    public static double Deflection(double lineLoad, double span, double stiffness) =>
+        5 * lineLoad * span * span * span * span / (384 * stiffness);
+}

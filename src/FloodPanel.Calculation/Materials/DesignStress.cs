@@ -1,0 +1,36 @@
+using FloodPanel.Calculation.Cases;
+using FloodPanel.Calculation.ProjectTree;
+
+namespace FloodPanel.Calculation.Materials;
+
+/// <summary>The stress that a member may carry, with the way it came about.</summary>
+/// <param name="Value">f, design or allowable stress [Pa].</param>
+/// <param name="Strength">f_k, characteristic strength [Pa]; null when the stress was typed.</param>
+/// <param name="Formula">f from f_k as written; empty when the stress was typed.</param>
+/// <param name="Source">Where the factor stands, or that the stress was typed.</param>
+public sealed record DesignStress(double Value, double? Strength, string Formula, string Source)
+{
+    /// <summary>Design bending stress; null when neither an allowable nor a strength with a rule is there.</summary>
+    /// <param name="material">The material.</param>
+    /// <param name="basis">The design basis.</param>
+    public static DesignStress? Bending(Material material, DesignBasis basis) =>
+        Of(material.AllowableBending, material.BendingStrength, basis.For(material.Family));
+
+    /// <summary>Design shear stress; null when neither an allowable nor a strength with a rule is there.</summary>
+    /// <param name="material">The material.</param>
+    /// <param name="basis">The design basis.</param>
+    public static DesignStress? Shear(Material material, DesignBasis basis) =>
+        Of(material.AllowableShear, material.ShearStrength, basis.For(material.Family));
+
+    private static DesignStress? Of(double? allowable, double? strength, StrengthRule? rule)
+    {
+        if (allowable is { } typed)
+        {
+            return new(typed, null, "", "allowable typed by the user");
+        }
+
+        return strength is { } characteristic && rule is not null
+            ? new(rule.Factor * characteristic, characteristic, rule.Formula, rule.Source)
+            : null;
+    }
+}

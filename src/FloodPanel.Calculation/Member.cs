@@ -1,0 +1,49 @@
+using FloodPanel.Calculation.Cases;
+using FloodPanel.Calculation.Materials;
+using FloodPanel.Calculation.ProjectTree;
+using FloodPanel.Calculation.Sections;
+
+namespace FloodPanel.Calculation;
+
+/// <summary>A log or post resolved to numbers: section, material and the stresses it may carry.</summary>
+/// <param name="Material">The material.</param>
+/// <param name="Section">Properties of the cross-section.</param>
+/// <param name="Bending">Design bending stress; null when its inputs are missing or not covered.</param>
+/// <param name="Shear">Design shear stress; null when its inputs are missing or not covered.</param>
+/// <param name="DeflectionLimit">n in the limit length / n [-].</param>
+public sealed record Member(
+    Material Material, SectionProperties Section, DesignStress? Bending, DesignStress? Shear, double DeflectionLimit)
+{
+    /// <summary>E·I, bending stiffness [N·m²].</summary>
+    public double Stiffness { get; } = Material.ElasticModulus * Section.Inertia;
+
+    /// <summary>M_R = W·f_b, moment resistance [N·m]; infinite when the stress is missing, see <see cref="IsComplete"/>.</summary>
+    public double MomentResistance { get; } = Bending is null ? double.PositiveInfinity : Section.Modulus * Bending.Value;
+
+    /// <summary>V_R = A_v·f_v, shear resistance [N]; infinite when the stress is missing, see <see cref="IsComplete"/>.</summary>
+    public double ShearResistance { get; } = Shear is null ? double.PositiveInfinity : Section.ShearArea * Shear.Value;
+
+    /// <summary>Source of the bending check, as printed.</summary>
+    public string BendingSource { get; } = $"Elastic bending M/W; {Bending?.Source}";
+
+    /// <summary>Source of the shear check, as printed.</summary>
+    public string ShearSource { get; } = $"Shear over the shear area; {Shear?.Source}";
+
+    /// <summary>True when both stresses are known, so that every check of the member has a result.</summary>
+    public bool IsComplete => Bending is not null && Shear is not null;
+
+    internal static Member Of(
+        MaterialChoice material, ProfileChoice profile, double deflectionLimit, DesignBasis basis, Library library)
+    {
+        var found = library.Find(material)
+            ?? throw new ArgumentException("the library does not hold the material", nameof(material));
+        var shape = library.Find(profile)
+            ?? throw new ArgumentException("the library does not hold the profile", nameof(profile));
+        return new(
+            found,
+            SectionProperties.Of(shape),
+            DesignStress.Bending(found, basis),
+            DesignStress.Shear(found, basis),
+            deflectionLimit);
+    }
+}

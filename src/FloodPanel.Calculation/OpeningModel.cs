@@ -1,0 +1,103 @@
+using FloodPanel.Calculation.Actions;
+using FloodPanel.Calculation.Cases;
+using FloodPanel.Calculation.ProjectTree;
+
+namespace FloodPanel.Calculation;
+
+/// <summary>An opening resolved to the numbers that a load case needs. Base SI; heights from the sill.</summary>
+public sealed class OpeningModel
+{
+    /// <summary>Resolves an opening.</summary>
+    /// <param name="site">Levels and water.</param>
+    /// <param name="opening">An opening without problems, see <see cref="Validation"/>.</param>
+    /// <param name="basis">The design basis.</param>
+    /// <param name="library">The materials and profiles it may name.</param>
+    public OpeningModel(Site site, Opening opening, DesignBasis basis, Library library)
+    {
+        var (logs, posts) = (opening.Barrier.Logs, opening.Barrier.Posts);
+        Factors = basis.For(site.FloodZone);
+        UnitWeight = Hydrostatic.UnitWeight(site.WaterDensity);
+        RetainedDepth = site.DesignFloodLevel - opening.SillLevel;
+        ProtectedDepth = Math.Max(0, (opening.ProtectedSideLevel ?? opening.SillLevel) - opening.SillLevel);
+        ClearWidth = opening.ClearWidth;
+        Flow = opening.Actions.Flow;
+        Rake = double.DegreesToRadians(opening.RakeDegrees);
+        CosRake = Math.Cos(Rake);
+        Log = Member.Of(logs.Material, logs.Profile, logs.DeflectionLimit, basis, library);
+        LogCount = logs.Count;
+        EndBearing = logs.EndBearing;
+        Bays = opening.Barrier.Bays;
+        if (posts is not null && Bays.Count > 1)
+        {
+            Post = Member.Of(posts.Material, posts.Profile, posts.DeflectionLimit, basis, library);
+            PostWidth = posts.Width;
+        }
+    }
+
+    /// <summary>Load factors of the basis in the flood zone.</summary>
+    public LoadFactors Factors { get; }
+
+    /// <summary>γ, unit weight of water [N/m³].</summary>
+    public double UnitWeight { get; }
+
+    /// <summary>h, design flood level less sill level [m]; negative when the sill stays dry.</summary>
+    public double RetainedDepth { get; }
+
+    /// <summary>h', depth of water on the protected side [m], ≥ 0.</summary>
+    public double ProtectedDepth { get; }
+
+    /// <summary>Clear width of the opening [m].</summary>
+    public double ClearWidth { get; }
+
+    /// <summary>Moving water, or null.</summary>
+    public FlowInput? Flow { get; }
+
+    /// <summary>θ, angle of the face from the vertical [rad].</summary>
+    public double Rake { get; }
+
+    /// <summary>cos θ [-].</summary>
+    public double CosRake { get; }
+
+    /// <summary>The logs.</summary>
+    public Member Log { get; }
+
+    /// <summary>Number of logs in a stack [-].</summary>
+    public int LogCount { get; }
+
+    /// <summary>e, length of log that bears at each end [m].</summary>
+    public double EndBearing { get; }
+
+    /// <summary>Clear bays from left to right [m].</summary>
+    public ValueList<double> Bays { get; }
+
+    /// <summary>The posts; null when there is one bay.</summary>
+    public Member? Post { get; }
+
+    /// <summary>Width of a post across the opening [m].</summary>
+    public double PostWidth { get; }
+
+    /// <summary>Number of posts [-].</summary>
+    public int PostCount => Bays.Count - 1;
+
+    /// <summary>Length of the barrier along its face [m].</summary>
+    public double FaceLength => LogCount * Log.Section.Height;
+
+    /// <summary>H, vertical height of the barrier [m].</summary>
+    public double Height => FaceLength * CosRake;
+
+    /// <summary>Height z of the lower edge of a log [m].</summary>
+    /// <param name="index">Position in the stack from 0; the count of logs gives the top of the barrier.</param>
+    public double EdgeHeight(int index) => index * Log.Section.Height * CosRake;
+
+    /// <summary>L, effective span of a bay: clear bay and one end bearing [m].</summary>
+    /// <param name="bay">Bay from 0.</param>
+    public double Span(int bay) => Bays[bay] + EndBearing;
+
+    /// <summary>Width of face that loads a post: half of each clear bay beside it and its own width [m].</summary>
+    /// <param name="post">Post from 0.</param>
+    public double PostTributary(int post) => (Bays[post] + Bays[post + 1]) / 2 + PostWidth;
+
+    /// <summary>Width of face that loads a guide: half of the clear bay and the end bearing [m].</summary>
+    /// <param name="bay">Bay from 0, the first or the last.</param>
+    public double GuideTributary(int bay) => Bays[bay] / 2 + EndBearing;
+}

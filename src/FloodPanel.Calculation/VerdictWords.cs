@@ -1,0 +1,60 @@
+using System.Globalization;
+using FloodPanel.Calculation.Cases;
+
+namespace FloodPanel.Calculation;
+
+/// <summary>The verdict as a sentence.</summary>
+internal static class VerdictWords
+{
+    public static Sentence Sentence(VerdictKind kind, IReadOnlyList<string> missing, Governing? governing)
+    {
+        var governs = Governs(kind, governing);
+        return kind switch
+        {
+            VerdictKind.Adequate => new($"Adequate. {governs}"),
+            VerdictKind.Inadequate => new($"Inadequate. {governs}"),
+            _ => new($"Incomplete: not yet checked are {List(missing)}. {governs}"),
+        };
+    }
+
+    /// <summary>"a, b and c", each as words.</summary>
+    public static string List(IReadOnlyList<string> names)
+    {
+        var words = names.Select(NeededChecks.Title).ToArray();
+        return words.Length switch
+        {
+            0 => "other parts",
+            1 => words[0],
+            _ => $"{string.Join(", ", words[..^1])} and {words[^1]}",
+        };
+    }
+
+    private static string Governs(VerdictKind kind, Governing? governing)
+    {
+        if (governing is null)
+        {
+            return "No member has a result yet.";
+        }
+
+        var check = Capitalised(governing.Check);
+        var where = governing.Case is { } name ? $" in the {CaseNames.InWords(name)} case" : "";
+        var utilisation = Shown(governing.Utilisation);
+        return kind == VerdictKind.Inadequate
+            ? $"{check}{where} governs, at {utilisation} of the allowable."
+            : $"Of what is checked, {check.ToLowerInvariant()}{where} governs, at {utilisation} of the allowable.";
+    }
+
+    private static string Capitalised(string check)
+    {
+        var words = check.Replace('-', ' ');
+        return char.ToUpperInvariant(words[0]) + words[1..];
+    }
+
+    /// <summary>Two decimals; more where rounding would hide which side of 1 it stands on.</summary>
+    private static string Shown(double utilisation) => utilisation switch
+    {
+        double.PositiveInfinity => "more than any multiple",
+        > 1 and < 1.005 => utilisation.ToString("0.0000", CultureInfo.InvariantCulture),
+        _ => utilisation.ToString("0.00", CultureInfo.InvariantCulture),
+    };
+}

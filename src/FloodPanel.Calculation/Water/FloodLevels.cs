@@ -1,0 +1,58 @@
+using FloodPanel.Calculation.ProjectTree;
+
+namespace FloodPanel.Calculation.Water;
+
+/// <summary>Design flood level, retained depth and the height that the barrier must reach.</summary>
+public static class FloodLevels
+{
+    /// <summary>A barrier lower than required by no more than this is as high as required [m], 1 mm.</summary>
+    public const double HeightTolerance = 0.001;
+
+    private const string Source = "Levels in the project's datum";
+
+    /// <summary>Working of the design flood level of a site.</summary>
+    /// <param name="site">The site.</param>
+    public static Working DesignLevel(Site site) => new("Design flood level", Source, [.. Level(site)]);
+
+    /// <summary>Working of the levels at an opening.</summary>
+    /// <param name="site">The site.</param>
+    /// <param name="opening">The opening.</param>
+    public static Working At(Site site, Opening opening) => new("Retained depth", Source,
+    [
+        .. Level(site),
+        new("z_sill", "", opening.SillLevel, Dimension.Length),
+        new("h", "z_dfl − z_sill", site.DesignFloodLevel - opening.SillLevel, Dimension.Length),
+    ]);
+
+    /// <summary>Freeboard: required height of the barrier above the sill against its height.</summary>
+    /// <param name="retainedDepth">h, design flood level less sill level [m].</param>
+    /// <param name="freeboard">f, freeboard wanted [m], ≥ 0.</param>
+    /// <param name="barrierHeight">H, vertical height of the barrier [m], > 0.</param>
+    /// <remarks>Source: the project's freeboard. Limits: still water; wave crests are a matter of their own.</remarks>
+    public static Check Freeboard(double retainedDepth, double freeboard, double barrierHeight)
+    {
+        Guard.Finite(retainedDepth);
+        Guard.NonNegative(freeboard);
+        Guard.Positive(barrierHeight);
+
+        var required = Math.Max(0, retainedDepth + freeboard);
+        var counted = barrierHeight + HeightTolerance;
+        return new("freeboard", "Freeboard", "Freeboard chosen for the project; tolerance 1 mm", Dimension.Length, required, counted,
+        [
+            new("h", "", retainedDepth, Dimension.Length),
+            new("f", "", freeboard, Dimension.Length),
+            new("H_req", "max(0, h + f)", required, Dimension.Length),
+            new("H", "", barrierHeight, Dimension.Length),
+            new("Δ", "", HeightTolerance, Dimension.SectionLength),
+            new("u", "H_req/(H + Δ)", required / counted, Dimension.Ratio),
+        ]);
+    }
+
+    private static IEnumerable<CalculationStep> Level(Site site) =>
+    [
+        new("z_swl", "", site.DesignStillWaterLevel, Dimension.Length),
+        new("s", "", site.Surge, Dimension.Length),
+        new("c", "", site.ClimateAllowance, Dimension.Length),
+        new("z_dfl", "z_swl + s + c", site.DesignFloodLevel, Dimension.Length),
+    ];
+}
