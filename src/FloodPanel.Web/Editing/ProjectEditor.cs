@@ -25,7 +25,10 @@ public sealed class ProjectEditor : IAsyncDisposable
         settings.Changed += Show;
     }
 
+    /// <summary>The open project; empty before the first one is opened.</summary>
     public Guid Id => autosave.Id;
+
+    public bool IsOpen => Id != Guid.Empty;
 
     /// <summary>The newest revision that this tab knows of.</summary>
     public int Revision => autosave.Revision;

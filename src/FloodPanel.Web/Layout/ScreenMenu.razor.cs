@@ -1,3 +1,4 @@
+using FloodPanel.Calculation;
 using FloodPanel.Web.Editing;
 using Microsoft.AspNetCore.Components;
 using Microsoft.JSInterop;
@@ -5,7 +6,7 @@ using MudBlazor;
 
 namespace FloodPanel.Web.Layout;
 
-public sealed partial class ThemeButton
+public sealed partial class ScreenMenu
 {
     [Inject]
     public required ScreenSettings Settings { get; init; }
@@ -20,9 +21,18 @@ public sealed partial class ThemeButton
         _ => Icons.Material.Outlined.Contrast,
     };
 
+    private static string Tick(bool chosen) =>
+        chosen ? Icons.Material.Outlined.RadioButtonChecked : Icons.Material.Outlined.RadioButtonUnchecked;
+
     private async Task UseAsync(ThemeChoice theme)
     {
         Settings.Use(theme);
         await JS.InvokeVoidAsync("floodpanel.remember", RememberedSettings.ThemeCookie, RememberedSettings.Word(theme));
+    }
+
+    private async Task UseAsync(UnitSystem units)
+    {
+        Settings.Use(units);
+        await JS.InvokeVoidAsync("floodpanel.remember", RememberedSettings.UnitsCookie, RememberedSettings.Word(units));
     }
 }
