@@ -1,0 +1,101 @@
+namespace FloodPanel.Storage.ProjectFile;
+
+/// <summary>Reads one opening with its barrier.</summary>
+internal static class OpeningReader
+{
+    public static Opening Read(FileValue value)
+    {
+        var blank = new Opening();
+        if (value.AsObject() is not { } opening)
+        {
+            return blank;
+        }
+
+        var read = new Opening
+        {
+            Id = opening.Text("id"),
+            Name = opening.Text("name", blank.Name),
+            SillLevel = opening.Number("sillLevel"),
+            GroundLevel = opening.NumberOrNull("groundLevel"),
+            ClearWidth = opening.Number("clearWidth"),
+            ClearHeight = opening.Number("clearHeight"),
+            RakeDegrees = opening.Number("rake", blank.RakeDegrees),
+            ProtectedSideLevel = opening.NumberOrNull("protectedSideLevel"),
+            Wall = ReadWall(opening.Object("wall"), blank.Wall),
+            Actions = opening.Object("actions") is { } actions ? ActionReader.Read(actions) : blank.Actions,
+            Barrier = opening.NeededObject("barrier") is { } barrier ? ReadBarrier(barrier) : blank.Barrier,
+        };
+        opening.Close();
+        return read;
+    }
+
+    private static WallKind ReadWall(FileObject? wall, WallKind fallback)
+    {
+        var kind = wall?.Word("kind", FileWords.Wall, fallback) ?? fallback;
+        wall?.Close();
+        return kind;
+    }
+
+    private static Barrier ReadBarrier(FileObject barrier)
+    {
+        var read = new Barrier
+        {
+            Logs = barrier.NeededObject("logs") is { } logs ? ReadLogs(logs) : new LogStack(),
+            Bays = (barrier.Need("bays", "a list of clear widths")?.AsList() ?? []).Select(b => b.AsNumber()).ToValueList(),
+            Posts = barrier.Object("posts") is { } posts ? ReadPosts(posts) : null,
+            ByOthers = barrier.List("byOthers").Select(ReadByOthers).ToValueList(),
+        };
+        barrier.NotHeldYet("basePlate", "base plates");
+        barrier.NotHeldYet("anchors", "anchors");
+        barrier.NotHeldYet("guides", "guides");
+        barrier.NotHeldYet("footing", "footings");
+        barrier.Close();
+        return read;
+    }
+
+    private static LogStack ReadLogs(FileObject logs)
+    {
+        var blank = new LogStack();
+        var read = new LogStack
+        {
+            Material = SectionReader.ReadMaterial(logs),
+            Profile = SectionReader.ReadProfile(logs),
+            Count = logs.WholeNumber("count", Fields.LogCount),
+            EndBearing = logs.Number("endBearing", blank.EndBearing),
+            DeflectionLimit = logs.Number("deflectionLimit", blank.DeflectionLimit),
+            FittingClearance = logs.Number("fittingClearance", blank.FittingClearance),
+        };
+        logs.Close();
+        return read;
+    }
+
+    private static PostSet ReadPosts(FileObject posts)
+    {
+        var blank = new PostSet();
+        var read = new PostSet
+        {
+            Material = SectionReader.ReadMaterial(posts),
+            Profile = SectionReader.ReadProfile(posts),
+            Width = posts.Number("width", blank.Width),
+            DeflectionLimit = posts.Number("deflectionLimit", blank.DeflectionLimit),
+        };
+        posts.NotHeldYet("raker", "rakers");
+        posts.Close();
+        return read;
+    }
+
+    private static DesignedByOthers ReadByOthers(FileValue value)
+    {
+        if (value.AsObject() is not { } declared)
+        {
+            return new DesignedByOthers("", "", "");
+        }
+
+        var read = new DesignedByOthers(
+            declared.Word("check", FileWords.NeededCheck) ?? "",
+            declared.Text("name", ""),
+            declared.Text("reference", ""));
+        declared.Close();
+        return read;
+    }
+}

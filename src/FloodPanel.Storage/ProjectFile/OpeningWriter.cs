@@ -1,0 +1,92 @@
+using System.Text.Json;
+
+namespace FloodPanel.Storage.ProjectFile;
+
+/// <summary>Writes one opening with its barrier.</summary>
+internal static class OpeningWriter
+{
+    public static void Write(Utf8JsonWriter json, Opening opening)
+    {
+        json.WriteStartObject();
+        json.WriteString("id", opening.Id);
+        json.WriteString("name", opening.Name);
+        json.WriteNumber("sillLevel", opening.SillLevel);
+        json.WriteNumberOrNull("groundLevel", opening.GroundLevel);
+        json.WriteNumber("clearWidth", opening.ClearWidth);
+        json.WriteNumber("clearHeight", opening.ClearHeight);
+        json.WriteNumber("rake", opening.RakeDegrees);
+        json.WriteNumberOrNull("protectedSideLevel", opening.ProtectedSideLevel);
+        json.WriteStartObject("wall");
+        json.WriteString("kind", FileWords.Wall.Of(opening.Wall));
+        json.WriteEndObject();
+        ActionWriter.Write(json, opening.Actions);
+        WriteBarrier(json, opening.Barrier);
+        json.WriteEndObject();
+    }
+
+    public static void WriteNumberOrNull(this Utf8JsonWriter json, string name, double? value)
+    {
+        if (value is { } number)
+        {
+            json.WriteNumber(name, number);
+        }
+        else
+        {
+            json.WriteNull(name);
+        }
+    }
+
+    private static void WriteBarrier(Utf8JsonWriter json, Barrier barrier)
+    {
+        json.WriteStartObject("barrier");
+        WriteLogs(json, barrier.Logs);
+        json.WriteStartArray("bays");
+        foreach (var bay in barrier.Bays)
+        {
+            json.WriteNumberValue(bay);
+        }
+
+        json.WriteEndArray();
+        WritePosts(json, barrier.Posts);
+        json.WriteStartArray("byOthers");
+        foreach (var declared in barrier.ByOthers)
+        {
+            json.WriteStartObject();
+            json.WriteString("check", declared.Check);
+            json.WriteString("name", declared.Name);
+            json.WriteString("reference", declared.Reference);
+            json.WriteEndObject();
+        }
+
+        json.WriteEndArray();
+        json.WriteEndObject();
+    }
+
+    private static void WriteLogs(Utf8JsonWriter json, LogStack logs)
+    {
+        json.WriteStartObject("logs");
+        SectionWriter.Write(json, logs.Material);
+        SectionWriter.Write(json, logs.Profile);
+        json.WriteNumber("count", logs.Count);
+        json.WriteNumber("endBearing", logs.EndBearing);
+        json.WriteNumber("deflectionLimit", logs.DeflectionLimit);
+        json.WriteNumber("fittingClearance", logs.FittingClearance);
+        json.WriteEndObject();
+    }
+
+    private static void WritePosts(Utf8JsonWriter json, PostSet? posts)
+    {
+        if (posts is null)
+        {
+            json.WriteNull("posts");
+            return;
+        }
+
+        json.WriteStartObject("posts");
+        SectionWriter.Write(json, posts.Material);
+        SectionWriter.Write(json, posts.Profile);
+        json.WriteNumber("width", posts.Width);
+        json.WriteNumber("deflectionLimit", posts.DeflectionLimit);
+        json.WriteEndObject();
+    }
+}

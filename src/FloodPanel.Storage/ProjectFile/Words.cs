@@ -1,0 +1,56 @@
+namespace FloodPanel.Storage.ProjectFile;
+
+/// <summary>The fixed words that a field may hold, and what each stands for.</summary>
+internal sealed class Words<T>(params (string Word, T Value)[] pairs)
+{
+    /// <summary>The words, as a message lists them.</summary>
+    public string Allowed { get; } = pairs.Length == 1
+        ? $"\"{pairs[0].Word}\""
+        : string.Join(", ", pairs[..^1].Select(p => $"\"{p.Word}\"")) + $" or \"{pairs[^1].Word}\"";
+
+    public bool TryFind(string word, out T? value)
+    {
+        foreach (var pair in pairs)
+        {
+            if (pair.Word == word)
+            {
+                value = pair.Value;
+                return true;
+            }
+        }
+
+        value = default;
+        return false;
+    }
+
+    public string Of(T value) => pairs.Single(p => EqualityComparer<T>.Default.Equals(p.Value, value)).Word;
+}
+
+/// <summary>The words of the project file for the choices of the project tree.</summary>
+internal static class FileWords
+{
+    public static readonly Words<DesignBasisKind> DesignBasis = new(
+        ("allowable-stress", DesignBasisKind.AllowableStress),
+        ("us-strength", DesignBasisKind.UsStrength),
+        ("eurocode", DesignBasisKind.Eurocode));
+
+    public static readonly Words<FloodZone> FloodZone = new(
+        ("inland", Calculation.ProjectTree.FloodZone.Inland),
+        ("coastal-a", Calculation.ProjectTree.FloodZone.CoastalA),
+        ("coastal-high-hazard", Calculation.ProjectTree.FloodZone.CoastalHighHazard));
+
+    public static readonly Words<WallKind> Wall = new(
+        ("reinforced-concrete", WallKind.ReinforcedConcrete),
+        ("masonry", WallKind.Masonry),
+        ("cavity-masonry", WallKind.CavityMasonry),
+        ("timber-frame", WallKind.TimberFrame),
+        ("steel-frame", WallKind.SteelFrame));
+
+    public static readonly Words<MaterialFamily> Family = new(
+        ("aluminium", MaterialFamily.Aluminium),
+        ("steel", MaterialFamily.Steel),
+        ("timber", MaterialFamily.Timber),
+        ("composite", MaterialFamily.Composite));
+
+    public static readonly Words<string> NeededCheck = new([.. NeededChecks.MayBeByOthers.Select(c => (c, c))]);
+}

@@ -1,0 +1,130 @@
+using System.Text.Json.Nodes;
+using FloodPanel.Storage.ProjectFile;
+
+namespace FloodPanel.Storage.Tests;
+
+/// <summary>Projects that use every field of the tree, none of them at its default.</summary>
+internal static class Example
+{
+    public static Project Full { get; } = new()
+    {
+        Name = "Weir Cottage \"north\" \\ Überlauf 水門",
+        Reference = "R-7",
+        Client = "M. Ashdown",
+        Address = "1 Weir Lane\nLower Tarn",
+        Engineer = "P. Holm",
+        DesignBasis = DesignBasisKind.Eurocode,
+        Site = new Site
+        {
+            Datum = "ordnance",
+            WaterDensity = 1025,
+            AnnualProbability = 0.005,
+            DesignStillWaterLevel = 12.35,
+            Surge = 0.1,
+            ClimateAllowance = 1.0 / 3,
+            Freeboard = 0.25,
+            FloodZone = FloodZone.CoastalA,
+            Levels = [new LevelPoint(0.01, 12.2), new LevelPoint(0.005, 12.35)],
+        },
+        Openings = [Dock, Hatch],
+    };
+
+    public static string SamplePath(string name) => Path.Combine(AppContext.BaseDirectory, "Samples", name);
+
+    /// <summary>The full example as a JSON tree that a test may spoil.</summary>
+    public static JsonObject FullJson() => JsonNode.Parse(ProjectFileWriter.Write(Full))!.AsObject();
+
+    public static Project Read(byte[] file)
+    {
+        var reading = ProjectFileReader.Read(file);
+        Assert.Empty(reading.Problems);
+        return reading.Project!;
+    }
+
+    private static Opening Dock => new()
+    {
+        Id = "dock",
+        Name = "Loading dock",
+        SillLevel = 11.4,
+        GroundLevel = 11.3,
+        ClearWidth = 3.3,
+        ClearHeight = 2.1,
+        RakeDegrees = 12.5,
+        ProtectedSideLevel = 11.55,
+        Wall = WallKind.CavityMasonry,
+        Actions = new ActionSet
+        {
+            Flow = new FlowInput { Velocity = 1.2, ShapeCoefficient = 1.5 },
+            Wave = new NonBreakingWaveInput { Height = 0.4, Period = 3.1, AngleDegrees = 15, BedSlope = 0.02 },
+            Debris = new DebrisInput
+            {
+                Mass = 300,
+                Velocity = 1.1,
+                StoppingTime = 0.1,
+                Coefficients = new DebrisCoefficients { Importance = 1.2, Orientation = 0.8, Depth = 0.75, Blockage = 0.6, Response = 1.3 },
+            },
+            Wind = new WindInput { Pressure = 800 },
+            Line = new LineInput { Force = 740, Height = 1.1 },
+        },
+        Barrier = new Barrier
+        {
+            Logs = new LogStack
+            {
+                Material = new LibraryMaterial("en-aw-6005a-t6"),
+                Profile = new HollowRectangle { Height = 0.2, Depth = 0.08, Face = 0.003, Web = 0.0035, Webs = 4 },
+                Count = 7,
+                EndBearing = 0.045,
+                DeflectionLimit = 150,
+                FittingClearance = 0.012,
+            },
+            Bays = [1.6, 1.6],
+            Posts = new PostSet
+            {
+                Material = new Material
+                {
+                    Family = MaterialFamily.Steel,
+                    Name = "tested steel",
+                    Density = 7850,
+                    ElasticModulus = 210e9,
+                    BendingStrength = 275e6,
+                    ShearStrength = 158e6,
+                    AllowableBending = 165e6,
+                    AllowableShear = 95e6,
+                },
+                Profile = new ISection { Height = 0.1, Depth = 0.12, Flange = 0.01, Web = 0.006 },
+                Width = 0.1,
+                DeflectionLimit = 120,
+            },
+            ByOthers = [new DesignedByOthers("anchors", "N. Lund", "A-12")],
+        },
+    };
+
+    private static Opening Hatch => new()
+    {
+        Id = "hatch",
+        Name = "Hatch",
+        SillLevel = 11.9,
+        ClearWidth = 1,
+        ClearHeight = 1,
+        Actions = new ActionSet { Wave = new BreakingWaveInput { RiskCategory = 3 } },
+        Barrier = new Barrier
+        {
+            Logs = new LogStack
+            {
+                Material = new LibraryMaterial("c24"),
+                Profile = new GivenProperties
+                {
+                    Height = 0.2,
+                    Depth = 0.05,
+                    Area = 0.0041,
+                    Inertia = 1.7e-6,
+                    Modulus = 4.3e-5,
+                    PlasticModulus = 5e-5,
+                    ShearArea = 4.4e-4,
+                },
+                Count = 3,
+            },
+            Bays = [1],
+        },
+    };
+}

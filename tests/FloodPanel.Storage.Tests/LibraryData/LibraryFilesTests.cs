@@ -1,0 +1,135 @@
+using FloodPanel.Storage.LibraryData;
+
+namespace FloodPanel.Storage.Tests.LibraryData;
+
+public sealed class LibraryFilesTests : IDisposable
+{
+    private readonly string folder = Directory.CreateTempSubdirectory("floodpanel-library-").FullName;
+
+    public LibraryFilesTests()
+    {
+        foreach (var file in Directory.GetFiles(LibraryFiles.DeliveredFolder, "*.csv"))
+        {
+            File.Copy(file, Path.Combine(folder, Path.GetFileName(file)));
+        }
+    }
+
+    public void Dispose() => Directory.Delete(folder, recursive: true);
+
+    [Fact]
+    public void Load_Delivered_HoldsTheIdsOfTheFileFormat()
+    {
+        var library = LibraryFiles.Load(LibraryFiles.DeliveredFolder);
+
+        Assert.NotNull(library.Find(new LibraryMaterial("en-aw-6005a-t6")));
+        Assert.NotNull(library.Find(new LibraryMaterial("s275")));
+        Assert.All(library.Profiles.Values, p => Assert.Equal("invented", p.Evidence));
+        Assert.All(library.Materials.Values, m => Assert.NotEmpty(m.Source));
+    }
+
+    /// <summary>EN 1999-1-1:2007, Table 3.2b: EN AW-6063 T6, profiles up to 25 mm, f_o = 160 MPa.</summary>
+    [Fact]
+    public void Load_Delivered_En1999_6063T6() =>
+        Assert.Equal(160e6, LibraryFiles.Load(folder).Materials["en-aw-6063-t6"].Item.BendingStrength!.Value, tolerance: 1);
+
+    /// <summary>EN 338:2016, Table 3: D40, f_m,k = 40 MPa, f_v,k = 4.2 MPa, E_0,mean = 13 GPa, mean density 660 kg/m³.</summary>
+    [Fact]
+    public void Load_Delivered_En338_D40()
+    {
+        var d40 = LibraryFiles.Load(folder).Materials["d40"].Item;
+
+        Assert.Equal(40e6, d40.BendingStrength!.Value, tolerance: 1);
+        Assert.Equal(4.2e6, d40.ShearStrength!.Value, tolerance: 1);
+        Assert.Equal(13e9, d40.ElasticModulus, tolerance: 1);
+        Assert.Equal(660, d40.Density);
+    }
+
+    /// <summary>Von Mises: shear yield = yield / √3. The file rounds down to 0.01 MPa.</summary>
+    [Fact]
+    public void Load_Delivered_ShearStrengthOfMetalsIsYieldOverRootThree()
+    {
+        var metals = LibraryFiles.Load(folder).Materials.Values.Select(m => m.Item).Where(m => m.Family != MaterialFamily.Timber).ToList();
+
+        Assert.NotEmpty(metals);
+        Assert.All(metals, m => Assert.InRange(m.BendingStrength!.Value / Math.Sqrt(3) - m.ShearStrength!.Value, 0, 0.01e6));
+    }
+
+    [Fact]
+    public void Load_ProfileInMillimetres_IsInMetres()
+    {
+        var log = Assert.IsType<HollowRectangle>(LibraryFiles.Load(folder).Profiles["log-200-80"].Item);
+
+        Assert.Equal(0.2, log.Height, tolerance: 1e-12);
+        Assert.Equal(0.08, log.Depth, tolerance: 1e-12);
+        Assert.Equal(0.003, log.Face, tolerance: 1e-12);
+        Assert.Equal(3, log.Webs);
+    }
+
+    [Theory]
+    [InlineData("materials.csv", "d40,D40 hardwood,timber,660,", "d40,D40 hardwood,timber,-660,", "materials.csv, line 16: density_kg_m3 is \"-660\"; allowed is a number above 0 kg/m³ and at most 25000 kg/m³.")]
+    [InlineData("materials.csv", "d40,D40 hardwood,timber,660,", "d40,D40 hardwood,timber,NaN,", "materials.csv, line 16: density_kg_m3 is \"NaN\"; allowed is a number above 0 kg/m³ and at most 25000 kg/m³.")]
+    [InlineData("materials.csv", "d40,D40 hardwood,timber,", "d40,D40 hardwood,wood,", "materials.csv, line 16: family is \"wood\"; allowed is \"aluminium\", \"steel\", \"timber\" or \"composite\".")]
+    [InlineData("materials.csv", "d40,D40 hardwood", "c24,D40 hardwood", "materials.csv, line 16: id is \"c24\" again; allowed is once.")]
+    [InlineData("materials.csv", "d40,D40 hardwood", "D 40,D40 hardwood", "materials.csv, line 16: id is \"D 40\"; allowed are small letters, digits and hyphens.")]
+    [InlineData("materials.csv", "d40,D40 hardwood", "d40,", "materials.csv, line 16: title is empty; needed is text.")]
+    [InlineData("materials.csv", "d40,", "d40,,", "materials.csv, line 16: the row has 11 fields; needed are 10.")]
+    [InlineData("profiles.csv", "log-200-80,Hollow log 200 × 80,hollow-rectangle,200,80,3,3,3,,", "log-200-80,Hollow log 200 × 80,hollow-rectangle,200,80,3,3,3.5,,", "profiles.csv, line 4: webs is \"3.5\"; allowed is a whole number from 2 to 50.")]
+    [InlineData("profiles.csv", "log-200-80,Hollow log 200 × 80,hollow-rectangle,200,80,3,3,3,,", "log-200-80,Hollow log 200 × 80,hollow-rectangle,200,80,3,3,3,9,", "profiles.csv, line 4: wall_mm is \"9\"; this shape has none, the field must be empty.")]
+    [InlineData("profiles.csv", "log-200-80,Hollow log 200 × 80,hollow-rectangle", "log-200-80,Hollow log 200 × 80,round", "profiles.csv, line 4: shape is \"round\"; allowed is \"rectangle\", \"hollow-rectangle\", \"rectangular-tube\", \"i-section\" or \"properties\".")]
+    public void Load_BadRow_IsRefusedWithFileLineAndField(string file, string good, string bad, string expected)
+    {
+        Spoil(file, good, bad);
+
+        var problems = Assert.Throws<LibraryFileException>(() => LibraryFiles.Load(folder)).Problems;
+
+        Assert.Contains(expected, problems);
+    }
+
+    [Fact]
+    public void Load_EvidenceOfAnotherWord_IsRefused()
+    {
+        Spoil("profiles.csv", ",invented", ",guessed");
+
+        var problems = Assert.Throws<LibraryFileException>(() => LibraryFiles.Load(folder)).Problems;
+
+        Assert.Equal("profiles.csv, line 2: evidence is \"guessed\"; allowed is read, derived, memory, invented.", problems[0]);
+    }
+
+    [Fact]
+    public void Load_OtherColumns_IsRefused()
+    {
+        Spoil("materials.csv", "density_kg_m3", "density_lb_ft3");
+
+        var problem = Assert.Single(Assert.Throws<LibraryFileException>(() => LibraryFiles.Load(folder)).Problems);
+
+        Assert.StartsWith("materials.csv, line 1: the columns are \"id,title,family,density_lb_ft3,", problem);
+    }
+
+    [Fact]
+    public void Load_FileMissing_IsRefused()
+    {
+        File.Delete(Path.Combine(folder, "profiles.csv"));
+
+        var problem = Assert.Single(Assert.Throws<LibraryFileException>(() => LibraryFiles.Load(folder)).Problems);
+
+        Assert.StartsWith($"profiles.csv cannot be read in the data folder {folder}: ", problem);
+    }
+
+    [Fact]
+    public void Load_QuoteWithoutEnd_IsRefused()
+    {
+        File.AppendAllText(Path.Combine(folder, "profiles.csv"), "x,\"never closed");
+
+        var problem = Assert.Single(Assert.Throws<LibraryFileException>(() => LibraryFiles.Load(folder)).Problems);
+
+        Assert.StartsWith("profiles.csv is not a table of comma-separated values: ", problem);
+    }
+
+    private void Spoil(string file, string good, string bad)
+    {
+        var path = Path.Combine(folder, file);
+        var text = File.ReadAllText(path);
+        Assert.Contains(good, text, StringComparison.Ordinal);
+        File.WriteAllText(path, text.Replace(good, bad, StringComparison.Ordinal));
+    }
+}
