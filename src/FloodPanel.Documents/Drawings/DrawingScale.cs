@@ -1,0 +1,43 @@
+namespace FloodPanel.Documents.Drawings;
+
+/// <summary>The scales of ISO 5455, with 1:25 as is usual in building.</summary>
+public static class DrawingScale
+{
+    private static readonly int[] Denominators = [1, 2, 5, 10, 20, 25, 50, 100, 200, 500, 1000, 2000, 5000];
+
+    /// <summary>n of the largest scale 1:n at which something fits; the smallest scale there is when none does.</summary>
+    /// <param name="width">Width of the thing [m].</param>
+    /// <param name="height">Height of the thing [m].</param>
+    /// <param name="roomWide">Room on the sheet [mm].</param>
+    /// <param name="roomHigh">Room on the sheet [mm].</param>
+    public static int Fit(double width, double height, double roomWide, double roomHigh)
+    {
+        foreach (var denominator in Denominators)
+        {
+            var perMetre = PerMetre(denominator);
+            if (width * perMetre <= roomWide && height * perMetre <= roomHigh)
+            {
+                return denominator;
+            }
+        }
+
+        return Denominators[^1];
+    }
+
+    /// <summary>Millimetres on the sheet for a metre.</summary>
+    /// <param name="denominator">n in the scale 1:n.</param>
+    public static double PerMetre(int denominator) => 1000.0 / denominator;
+}
+
+/// <summary>From the opening to the sheet.</summary>
+/// <param name="OriginX">Where x = 0 stands on the sheet [mm].</param>
+/// <param name="SillY">Where z = 0 stands on the sheet [mm].</param>
+/// <param name="PerMetre">Millimetres on the sheet for a metre.</param>
+internal readonly record struct Projection(double OriginX, double SillY, double PerMetre)
+{
+    public double X(double x) => OriginX + x * PerMetre;
+
+    public double Y(double z) => SillY - z * PerMetre;
+
+    public SheetPoint At(double x, double z) => new(X(x), Y(z));
+}

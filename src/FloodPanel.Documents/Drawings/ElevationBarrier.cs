@@ -1,0 +1,125 @@
+using System.Globalization;
+
+namespace FloodPanel.Documents.Drawings;
+
+/// <summary>Logs, posts and guides in elevation.</summary>
+internal static class ElevationBarrier
+{
+    private const double LeastLog = 1.2;
+
+    /// <summary>Left edge and width of each bay [m] from the left reveal.</summary>
+    public static IReadOnlyList<(double Left, double Width)> Bays(DrawingInput input)
+    {
+        var left = 0.0;
+        var bays = new List<(double, double)>();
+        foreach (var width in input.Barrier.Bays)
+        {
+            bays.Add((left, width));
+            left += width + (input.Barrier.Posts?.Width ?? 0);
+        }
+
+        return bays;
+    }
+
+    public static void Draw(Sketch sketch, DrawingInput input, ElevationLayout layout)
+    {
+        var view = layout.Projection;
+        var (top, sill) = (layout.Shown(input.Result.BarrierHeight), view.SillY);
+        var bays = Bays(input);
+        for (var bay = 0; bay < bays.Count; bay++)
+        {
+            DrawLogs(sketch, input, view, bays[bay], bay + 1, top);
+        }
+
+        for (var post = 1; post < bays.Count; post++)
+        {
+            var (left, right) = (view.X(bays[post - 1].Left + bays[post - 1].Width), view.X(bays[post].Left));
+            var number = post.ToString(CultureInfo.InvariantCulture);
+            sketch.Add(new Mark(MarkKind.Post, $"Post {number}", null, $"post-{number}",
+                [Sketch.Box(left, top, right, sill, FillRole.Post, LineRole.Outline)]));
+        }
+
+        var width = Math.Clamp(1.4 * input.Barrier.Logs.EndBearing * view.PerMetre, 0.9, 0.7 * layout.Pier);
+        var (leftReveal, rightReveal) = (view.X(0), view.X(input.Opening.ClearWidth));
+        sketch.Add(Guide("left", leftReveal - width, top, leftReveal, sill));
+        sketch.Add(Guide("right", rightReveal, top, rightReveal + width, sill));
+    }
+
+    /// <summary>Numbers of the logs, from the bottom; over the water, so that they stay dark.</summary>
+    public static void DrawNumbers(Sketch sketch, DrawingInput input, ElevationLayout layout)
+    {
+        var view = layout.Projection;
+        var pitch = (view.SillY - layout.Shown(input.Result.BarrierHeight)) / input.LogCount;
+        var size = Math.Min(sketch.Sheet.SmallText, 0.92 * sketch.Sheet.TextSize);
+        var widest = Sketch.Width(input.LogCount.ToString(CultureInfo.InvariantCulture), size, TextRole.Normal);
+        foreach (var (left, width) in Bays(input).Take(4))
+        {
+            if (width * view.PerMetre < widest + 0.8)
+            {
+                continue;
+            }
+
+            foreach (var number in Numbered(input.LogCount, pitch, 1.25 * size))
+            {
+                var y = view.SillY - (number - 0.5) * pitch + 0.33 * size;
+                sketch.Add(new Text(
+                    number.ToString(CultureInfo.InvariantCulture), new(view.X(left + width / 2), y), size,
+                    TextAnchor.Middle, TextRole.Normal));
+            }
+        }
+    }
+
+    private static void DrawLogs(
+        Sketch sketch, DrawingInput input, Projection view, (double Left, double Width) bay, int number, double top)
+    {
+        var (left, right) = (view.X(bay.Left), view.X(bay.Left + bay.Width));
+        var pitch = (view.SillY - top) / input.LogCount;
+        if (pitch >= LeastLog)
+        {
+            for (var log = 1; log <= input.LogCount; log++)
+            {
+                var bottom = view.SillY - (log - 1) * pitch;
+                sketch.Add(new Mark(
+                    MarkKind.Log, FormattableString.Invariant($"Log {log}, bay {number}"), null,
+                    FormattableString.Invariant($"bay-{number}-log-{log}"),
+                    [Sketch.Box(left, bottom - pitch, right, bottom, FillRole.Log, LineRole.Edge)]));
+            }
+        }
+        else
+        {
+            sketch.Add(Sketch.Box(left, top, right, view.SillY, FillRole.Log, null));
+            var every = (int)Math.Ceiling(0.5 / pitch);
+            sketch.Add(new Hatch(
+                [.. Enumerable.Range(1, input.LogCount - 1).Where(i => i % every == 0)
+                    .Select(i => new Segment(new(left, view.SillY - i * pitch), new(right, view.SillY - i * pitch)))],
+                LineRole.Hatch));
+        }
+
+        sketch.Add(Sketch.Box(left, top, right, view.SillY, null, LineRole.Outline));
+    }
+
+    private static Mark Guide(string side, double left, double top, double right, double bottom) => new(
+        MarkKind.Guide, $"Guide, {side}", null, $"guide-{side}",
+        [Sketch.Box(left, top, right, bottom, FillRole.Post, LineRole.Outline)]);
+
+    /// <summary>The logs that get a number: all, or the first, the last and every few between.</summary>
+    internal static IEnumerable<int> Numbered(int count, double pitch, double spacing)
+    {
+        int[] steps = [1, 2, 5, 10, 20, 50, 100];
+        var step = steps.FirstOrDefault(s => s * pitch >= spacing, int.MaxValue);
+        if (step == int.MaxValue)
+        {
+            yield break;
+        }
+
+        for (var number = 1; number <= count; number++)
+        {
+            var isRound = step == 1 || (number % step == 0 && (count - number) * pitch >= spacing && (number - 1) * pitch >= spacing);
+            var isEnd = number == 1 || (number == count && (count - 1) * pitch >= spacing);
+            if (isRound || isEnd)
+            {
+                yield return number;
+            }
+        }
+    }
+}

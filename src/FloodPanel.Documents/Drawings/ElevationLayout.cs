@@ -1,0 +1,95 @@
+namespace FloodPanel.Documents.Drawings;
+
+/// <summary>Where everything of an elevation stands on its sheet.</summary>
+internal sealed record ElevationLayout
+{
+    public required Sheet Sheet { get; init; }
+
+    public required int Scale { get; init; }
+
+    /// <summary>x = 0 at the left reveal, z = 0 at the sill.</summary>
+    public required Projection Projection { get; init; }
+
+    /// <summary>Height of the sheet as drawn [mm].</summary>
+    public required double Height { get; init; }
+
+    /// <summary>Width of wall shown beside the opening [mm].</summary>
+    public required double Pier { get; init; }
+
+    /// <summary>True when the opening is cut off above the water, so that a larger scale fits.</summary>
+    public required bool IsBroken { get; init; }
+
+    /// <summary>Ground as shown above the sill [m]; ground far below is drawn nearer.</summary>
+    public required double Ground { get; init; }
+
+    /// <summary>Sheet y of the upper edge of the wall [mm].</summary>
+    public required double Top { get; init; }
+
+    /// <summary>Sheet y of the lower edge of the view, the ground or the sill [mm].</summary>
+    public required double Bottom { get; init; }
+
+    /// <summary>Sheet x of the outer edges of the wall [mm].</summary>
+    public required double Left { get; init; }
+
+    /// <summary>Sheet x of the outer edges of the wall [mm].</summary>
+    public required double Right { get; init; }
+
+    /// <summary>Sheet y kept inside the view.</summary>
+    public double Shown(double z) => Math.Clamp(Projection.Y(z), Top, Bottom);
+
+    public static ElevationLayout For(DrawingInput input, Sheet sheet, double levelColumn)
+    {
+        var u = sheet.TextSize;
+        var opening = input.Opening;
+        var extent = Math.Max(input.Result.BarrierHeight, opening.ClearHeight);
+        var needed = Math.Min(
+            Math.Max(input.Result.BarrierHeight, Math.Max(input.FloodHeight, input.RequiredHeight)), 1.6 * extent);
+        var ground = Math.Clamp(input.GroundHeight, -extent, 1.3 * extent);
+        var low = Math.Min(0, ground);
+        needed = Math.Max(needed, ground);
+
+        var (pier, lintel, head) = (2.4 * u, 1.6 * u, sheet.Margin + 2.0 * u);
+        var dimensions = 2 * sheet.Row + 0.4 * u;
+        var foot = 1.6 + DimensionRows(input, sheet) + sheet.TitleHeight + 0.7 * u;
+        var roomWide = sheet.Width - 2 * sheet.Margin - dimensions - 2 * pier - levelColumn;
+        var roomHigh = sheet.Height - head - lintel - foot;
+
+        var (whole, cut) = (Math.Max(opening.ClearHeight, needed), needed * 1.12);
+        var wholeScale = DrawingScale.Fit(opening.ClearWidth, whole - low, roomWide, roomHigh);
+        var cutScale = DrawingScale.Fit(opening.ClearWidth, cut - low, roomWide, roomHigh);
+        var broken = cutScale < wholeScale && cut < 0.85 * opening.ClearHeight;
+        var scale = broken ? cutScale : wholeScale;
+        var high = broken ? cut : whole;
+
+        var perMetre = DrawingScale.PerMetre(scale);
+        var content = Math.Max((high - low) * perMetre, 6 * 1.32 * u - lintel);
+        var height = sheet.Trim ? Math.Min(sheet.Height, head + lintel + content + foot) : sheet.Height;
+        var spareHigh = Math.Max(0, height - head - lintel - foot - (high - low) * perMetre);
+        var spareWide = Math.Max(0, roomWide - opening.ClearWidth * perMetre);
+        var left = sheet.Margin + dimensions + spareWide / 2;
+        var top = head + spareHigh / 2;
+        return new ElevationLayout
+        {
+            Sheet = sheet,
+            Scale = scale,
+            Projection = new Projection(left + pier, top + lintel + high * perMetre, perMetre),
+            Height = height,
+            Pier = pier,
+            IsBroken = broken,
+            Ground = ground,
+            Top = top,
+            Bottom = top + lintel + (high - low) * perMetre,
+            Left = left,
+            Right = left + 2 * pier + opening.ClearWidth * perMetre,
+        };
+    }
+
+    /// <summary>Distance of the two rows of dimensions below the ground [mm].</summary>
+    public static (double First, double Second) RowsBelow(DrawingInput input, Sheet sheet)
+    {
+        var first = 1.4 * sheet.TextSize + 1.6;
+        return (first, first + (input.Barrier.Bays.Count > 1 ? 2.5 : 1.7) * sheet.TextSize);
+    }
+
+    private static double DimensionRows(DrawingInput input, Sheet sheet) => RowsBelow(input, sheet).Second - 1.6;
+}

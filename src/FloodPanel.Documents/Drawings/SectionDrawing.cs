@@ -1,0 +1,72 @@
+using FloodPanel.Calculation;
+using FloodPanel.Calculation.Actions;
+
+namespace FloodPanel.Documents.Drawings;
+
+/// <summary>Section through the barrier under one load case, flood side on the left, with the pressures beside it.</summary>
+public static class SectionDrawing
+{
+    /// <summary>Draws the section.</summary>
+    /// <param name="input">What to draw.</param>
+    /// <param name="caseName">The load case, "design-flood".</param>
+    /// <param name="sheet">The sheet; <see cref="Sheet.Bench"/> when null.</param>
+    /// <param name="withPressures">False leaves the pressure diagram out.</param>
+    public static Scene Draw(DrawingInput input, string caseName, Sheet? sheet = null, bool withPressures = true)
+    {
+        var paper = sheet ?? Sheet.Bench;
+        var loadCase = input.Result.Cases.First(c => c.Name == caseName);
+        var water = SectionWater.In(input, caseName);
+        var columnWidth = LevelMarks.ColumnWidth(paper, Levels(input, water, _ => 0));
+        var layout = SectionLayout.For(input, water, withPressures ? loadCase : null, paper, columnWidth);
+        var sketch = new Sketch(paper);
+        sketch.Add(Sketch.Box(0, 0, paper.Width, layout.Height, FillRole.Paper, null));
+        SectionGround.Draw(sketch, layout);
+        var stack = new LogSection(input);
+        if (stack.Post(layout.Projection) is { } post)
+        {
+            sketch.Add(post);
+        }
+
+        sketch.Add(stack.Logs(layout.Projection));
+        SectionGround.DrawWater(sketch, input, layout, water, stack);
+        SectionDimensions.Draw(sketch, input, layout, water);
+        sketch.Add(LevelMarks.Column(
+            paper, Levels(input, water, layout.Shown), layout.Left, -1,
+            Math.Min(layout.Top, layout.Bottom - 5.5 * 1.32 * paper.TextSize), layout.Bottom + 1.3 * paper.TextSize));
+        if (withPressures)
+        {
+            sketch.Add(PressureFigure.Draw(paper, input, loadCase, layout.Projection, layout.FigureRight));
+        }
+
+        var title = $"Section, {caseName.Replace('-', ' ')}";
+        sketch.Add(TitleBlock.Draw(paper, layout.Height, input, title, layout.Scale));
+        ActionKind[] legend = withPressures ? [.. loadCase.Actions.Select(a => a.Kind)] : [];
+        return new Scene(
+            title, Describe(input, loadCase), paper.Width, layout.Height, layout.Scale, sketch.Shapes, legend);
+    }
+
+    private static List<Level> Levels(DrawingInput input, SectionWater water, Func<double, double> y)
+    {
+        var sill = input.Opening.SillLevel;
+        Level Mark(double z, string name, string? field, bool isWater = false) =>
+            new(y(z), input.Length(sill + z), name, field, isWater);
+        List<Level> levels =
+        [
+            Mark(input.RequiredHeight, "required top", FieldKeys.Freeboard),
+            Mark(input.Result.BarrierHeight, "barrier top", FieldKeys.LogCount),
+            Mark(input.FloodHeight, "design flood", FieldKeys.DesignStillWaterLevel, water.IsDesignFlood),
+            Mark(0, "sill", FieldKeys.SillLevel),
+            Mark(input.GroundHeight, "outside ground", FieldKeys.GroundLevel),
+        ];
+        return levels;
+    }
+
+    private static string Describe(DrawingInput input, CaseResult loadCase)
+    {
+        var resultant = loadCase.CentreOfPressure is { } centre
+            ? $"The unfactored resultant is {input.Format(loadCase.Resultant, Dimension.LineForce)}, "
+                + $"{input.LengthWithUnit(centre)} above the sill."
+            : "There is no load in this case.";
+        return $"{input.Opening.Name}, {input.LogCount} logs, {input.LengthWithUnit(input.Result.BarrierHeight)} high. {resultant}";
+    }
+}
