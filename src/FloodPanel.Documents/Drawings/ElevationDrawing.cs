@@ -87,7 +87,7 @@ public static class ElevationDrawing
 
     private static Polyline BreakLine(double x, double top, double bottom)
     {
-        var (middle, half) = ((top + bottom) / 2, Math.Min(1.2, (bottom - top) / 8));
+        var (middle, half) = (top + 0.22 * (bottom - top), Math.Min(1.2, (bottom - top) / 8));
         return new Polyline(
             [new(x, top), new(x, middle - half), new(x - half, middle - half / 2), new(x + half, middle + half / 2), new(x, middle + half), new(x, bottom)],
             LineRole.Extension);

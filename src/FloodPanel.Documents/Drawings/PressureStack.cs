@@ -51,10 +51,10 @@ public static class PressureStack
         var (atLow, atHigh) = (0.0, 0.0);
         foreach (var piece in pieces)
         {
-            if (piece.Bottom <= middle && piece.Top >= middle)
+            if (piece.Bottom < middle && piece.Top > middle)
             {
-                atLow += piece.AtZero + piece.Gradient * low;
-                atHigh += piece.AtZero + piece.Gradient * high;
+                atLow += piece.At(low);
+                atHigh += piece.At(high);
             }
         }
 

@@ -9,6 +9,9 @@ public enum LineRole
     /// <summary>Minor edges: joints between logs.</summary>
     Edge,
 
+    /// <summary>Frame of the sheet.</summary>
+    Frame,
+
     /// <summary>Edges out of sight.</summary>
     Hidden,
 
@@ -123,7 +126,7 @@ public static class LineWeights
     {
         LineRole.Outline => 0.5,
         LineRole.Ground or LineRole.Resultant => 0.7,
-        LineRole.Water or LineRole.Tick => 0.35,
+        LineRole.Water or LineRole.Tick or LineRole.Frame => 0.35,
         LineRole.Edge or LineRole.Hidden or LineRole.Dimension => 0.25,
         LineRole.Hatch => 0.13,
         _ => 0.18,

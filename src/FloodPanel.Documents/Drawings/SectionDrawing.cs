@@ -1,5 +1,6 @@
 using FloodPanel.Calculation;
 using FloodPanel.Calculation.Actions;
+using FloodPanel.Calculation.Cases;
 
 namespace FloodPanel.Documents.Drawings;
 
@@ -38,7 +39,7 @@ public static class SectionDrawing
             sketch.Add(PressureFigure.Draw(paper, input, loadCase, layout.Projection, layout.FigureRight));
         }
 
-        var title = $"Section, {caseName.Replace('-', ' ')}";
+        var title = $"Section, {CaseNames.InWords(caseName)}";
         sketch.Add(TitleBlock.Draw(paper, layout.Height, input, title, layout.Scale));
         ActionKind[] legend = withPressures ? [.. loadCase.Actions.Select(a => a.Kind)] : [];
         return new Scene(

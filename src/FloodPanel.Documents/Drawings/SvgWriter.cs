@@ -1,6 +1,7 @@
 using System.Globalization;
 using System.Text;
 using System.Xml.Linq;
+using FloodPanel.Documents.Typography;
 
 namespace FloodPanel.Documents.Drawings;
 
@@ -19,7 +20,7 @@ public static class SvgWriter
         new XAttribute("class", "fp-drawing"),
         new XAttribute("viewBox", $"0 0 {Number(scene.Width)} {Number(scene.Height)}"),
         new XAttribute("role", "img"),
-        new XAttribute("aria-label", $"{scene.Title}. {scene.Description}"),
+        new XAttribute("aria-label", Wording.OneLine($"{scene.Title}. {scene.Description}")),
         scene.Shapes.Select(Element));
 
     /// <summary>The scene as text, without line breaks.</summary>
@@ -50,7 +51,7 @@ public static class SvgWriter
             group.Add(new XAttribute("data-part", part));
         }
 
-        group.Add(new XElement(Svg + "title", mark.Name), mark.Parts.Select(Element));
+        group.Add(new XElement(Svg + "title", Wording.OneLine(mark.Name)), mark.Parts.Select(Element));
         return group;
     }
 
@@ -94,7 +95,7 @@ public static class SvgWriter
             element.Add(new XAttribute("x", x), new XAttribute("y", y));
         }
 
-        element.Add(text.Words);
+        element.Add(Wording.OneLine(text.Words));
         return element;
     }
 

@@ -16,7 +16,7 @@ internal static class TitleBlock
     {
         var inset = 0.25;
         var top = height - sheet.TitleHeight;
-        yield return Sketch.Box(inset, inset, sheet.Width - inset, height - inset, null, LineRole.Outline);
+        yield return Sketch.Box(inset, inset, sheet.Width - inset, height - inset, null, LineRole.Frame);
         yield return Sketch.Stroke(inset, top, sheet.Width - inset, top, LineRole.Dimension);
         yield return new Text(
             viewTitle, new(sheet.Margin, sheet.Margin + 0.75 * sheet.TextSize), sheet.TextSize, TextAnchor.Start, TextRole.Strong);

@@ -1,0 +1,69 @@
+using FloodPanel.Calculation;
+using FloodPanel.Calculation.ProjectTree;
+using FloodPanel.Documents.Drawings;
+
+namespace FloodPanel.Documents.Tests;
+
+/// <summary>Openings that stretch the drawings in every direction, by name.</summary>
+internal static class Openings
+{
+    private static readonly Dictionary<string, Func<UnitSystem, DrawingInput>> All = new()
+    {
+        ["garage"] = u => Sample.Input(Sample.Garage, u),
+        ["door"] = u => Sample.Input(Sample.Door, u),
+        ["half-metre"] = u => Sample.Input(Sample.Gap(0.5, 1, 0.6, 2), u),
+        ["tiny"] = u => Sample.Input(Sample.Gap(0.1, 1, 0.1, 1, 0.05), u),
+        ["twenty-metres"] = u => Sample.Input(Sample.Gap(20, 12, 2.2, 6), u),
+        ["hundred-metres"] = u => Sample.Input(Sample.Gap(100, 40, 2.2, 6), u),
+        ["forty-logs"] = u => Sample.Input(Sample.Gap(2.4, 1, 6.5, 40, 0.15), u),
+        ["hundred-logs"] = u => Sample.Input(Sample.Gap(2.4, 2, 30, 100, 0.3), u),
+        ["unequal-bays"] = u => Sample.Input(
+            Sample.Garage with { ClearWidth = 6.1, Barrier = Sample.Barrier(6, 0.1, 1.2, 2.8, 0.5, 1.3) }, u),
+        ["dry-sill"] = u => Sample.Input(Sample.Garage with { SillLevel = 13.2, GroundLevel = 12.0 }, u),
+        ["sill-at-flood"] = u => Sample.Input(Sample.Garage with { SillLevel = 12.35, GroundLevel = 12.35 }, u),
+        ["overtopped"] = u => Sample.Input(Sample.Garage with { SillLevel = 10.9, GroundLevel = 10.9 }, u),
+        ["drowned"] = u => Sample.Input(Sample.Garage with { SillLevel = -20, GroundLevel = null }, u),
+        ["high-ground"] = u => Sample.Input(Sample.Garage with { GroundLevel = 11.75 }, u),
+        ["deep-ground"] = u => Sample.Input(Sample.Garage with { GroundLevel = 2 }, u),
+        ["both-sides"] = u => Sample.Input(Sample.Garage with { ProtectedSideLevel = 11.7 }, u),
+        ["raked"] = u => Sample.Input(Sample.Garage with { RakeDegrees = 20, ProtectedSideLevel = 11.7 }, u),
+        ["steep-rake"] = u => Sample.Input(Sample.Garage with { RakeDegrees = 60 }, u),
+        ["low-levels"] = u => Sample.Input(
+            Sample.Garage with { SillLevel = -8001.25, GroundLevel = -8001.4 }, u,
+            Sample.Project with { Site = Sample.Project.Site with { DesignStillWaterLevel = -8000.5 } }),
+        ["shallow"] = u => Sample.Input(Sample.Garage with { SillLevel = 12.33, GroundLevel = 12.33 }, u),
+        ["timber"] = u => Sample.Input(
+            Sample.Garage with
+            {
+                Wall = WallKind.TimberFrame,
+                Barrier = Sample.Garage.Barrier with
+                {
+                    Logs = Sample.Garage.Barrier.Logs with
+                    {
+                        Material = Sample.Alloy with { Family = MaterialFamily.Timber, Density = 500 },
+                        Profile = new Rectangle { Height = 0.2, Depth = 0.1 },
+                    },
+                },
+            }, u),
+        ["i-section"] = u => Sample.Input(
+            Sample.Garage with
+            {
+                Wall = WallKind.SteelFrame,
+                Barrier = Sample.Garage.Barrier with
+                {
+                    Logs = Sample.Garage.Barrier.Logs with
+                    {
+                        Profile = new ISection { Height = 0.2, Depth = 0.15, Flange = 0.009, Web = 0.006 },
+                    },
+                },
+            }, u),
+        ["long-names"] = u => Sample.Input(
+            Sample.Garage with { Name = Sample.LongName }, u, Sample.Project with { Name = Sample.LongName }),
+        ["odd-names"] = u => Sample.Input(
+            Sample.Garage with { Name = "Door\u0001\n<b>\uFFFE & \uD83D\uDEB0" }, u, Sample.Project with { Name = "\uD800" }),
+    };
+
+    public static IEnumerable<string> Names => All.Keys;
+
+    public static DrawingInput Input(string name, UnitSystem units) => All[name](units);
+}
