@@ -92,7 +92,7 @@ internal static class OpeningReader
         }
 
         var read = new DesignedByOthers(
-            declared.Word("check", FileWords.NeededCheck) ?? "",
+            declared.Text("check"),
             declared.Text("name", ""),
             declared.Text("reference", ""));
         declared.Close();

@@ -5,7 +5,7 @@ namespace FloodPanel.Storage.ProjectFile;
 /// <summary>Where in the file a scan stands, as a path.</summary>
 internal sealed class ScanPlace
 {
-    private const int LargestNumberOfItems = 1000;
+    private const int LargestNumberOfItems = 10_000;
 
     private readonly Stack<Frame> frames = new();
     private bool begun;

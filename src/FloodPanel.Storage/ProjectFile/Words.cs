@@ -51,6 +51,4 @@ internal static class FileWords
         ("steel", MaterialFamily.Steel),
         ("timber", MaterialFamily.Timber),
         ("composite", MaterialFamily.Composite));
-
-    public static readonly Words<string> NeededCheck = new([.. NeededChecks.MayBeByOthers.Select(c => (c, c))]);
 }

@@ -23,7 +23,6 @@ public class RefusalTests
     [InlineData("site.floodZone", "\"v\"", "site.floodZone: The value is \"v\"; allowed is \"inland\", \"coastal-a\" or \"coastal-high-hazard\".")]
     [InlineData("openings[0].actions.wave.kind", "\"big\"", "openings[0].actions.wave.kind: The value is \"big\"; allowed is \"breaking\" or \"non-breaking\".")]
     [InlineData("openings[0].barrier.logs.material", "5", "openings[0].barrier.logs.material: The value is 5; allowed is a library id or a material with its own figures.")]
-    [InlineData("openings[0].barrier.byOthers[0].check", "\"anchor\"", "openings[0].barrier.byOthers[0].check: The value is \"anchor\"; allowed is \"logs\", \"posts\", \"base-plates\", \"anchors\", \"guides\" or \"supporting-wall\".")]
     [InlineData("openings[0].barrier.posts.profile.shape", "\"round\"", "openings[0].barrier.posts.profile.shape: The value is \"round\"; allowed is \"rectangle\", \"hollow-rectangle\", \"rectangular-tube\", \"i-section\" or \"properties\".")]
     public void Read_WrongValue_NamesPathValueAndWhatIsAllowed(string path, string json, string expected)
     {
@@ -178,7 +177,7 @@ public class RefusalTests
         string[] whole = ["count", "webs", "riskCategory"];
         string[] emptyAllowed = ["openings", "levels", "bays", "byOthers", "wall", "actions", "coefficients"];
         string[] libraryId = ["material", "profile"];
-        string[] words = ["format", "designBasis", "floodZone", "kind", "family", "shape", "check"];
+        string[] words = ["format", "designBasis", "floodZone", "kind", "family", "shape"];
         var name = place.Name;
         return other switch
         {
