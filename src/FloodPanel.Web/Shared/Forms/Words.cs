@@ -86,6 +86,9 @@ public static class Words
         _ => throw new ArgumentOutOfRangeException(nameof(profile), profile, null),
     };
 
+    /// <summary>The check without its member: "bending" of "log-bending".</summary>
+    public static string CheckOnly(string name) => name[(name.IndexOf('-') + 1)..].Replace('-', ' ');
+
     /// <summary>A name of the file format, "design-flood", as words, "Design flood".</summary>
     public static string FromName(string name) =>
         name.Length == 0 ? "" : char.ToUpperInvariant(name[0]) + name[1..].Replace('-', ' ');
