@@ -1,0 +1,178 @@
+using System.Text.Json.Nodes;
+
+namespace FloodPanel.Cli.Tests;
+
+public class CheckTests
+{
+    private static readonly string[] ByOthers = ["base-plates", "anchors", "guides", "supporting-wall"];
+
+    [Fact]
+    public void Check_OpeningsThatAreAdequate_Returns0()
+    {
+        using var file = new ProjectOnDisk(MakeAdequate);
+
+        var run = Invocation.Of("check", file.Path);
+
+        Assert.Equal(0, run.ExitCode);
+        Assert.Equal("", run.Errors);
+        Assert.Equal("adequate", run.Result["openings"]![0]!["verdict"]!.GetValue<string>());
+        Assert.Empty(run.Result["openings"]![0]!["missing"]!.AsArray());
+    }
+
+    [Fact]
+    public void Check_OpeningWithChecksMissing_Returns1()
+    {
+        var run = Invocation.Of("check", Invocation.Sample("sample-project.json"));
+
+        Assert.Equal(1, run.ExitCode);
+        Assert.Equal("", run.Errors);
+        Assert.Equal("incomplete", run.Result["openings"]![0]!["verdict"]!.GetValue<string>());
+    }
+
+    [Fact]
+    public void Check_OneOpeningThatFails_Returns1AndNamesWhatGoverns()
+    {
+        using var file = new ProjectOnDisk(project =>
+        {
+            MakeAdequate(project);
+            project["openings"]![0]!["barrier"]!["logs"]!["material"]!["allowableBending"] = 1e6;
+        });
+
+        var run = Invocation.Of("check", file.Path);
+
+        Assert.Equal(1, run.ExitCode);
+        Assert.Equal("inadequate", run.Result["openings"]![0]!["verdict"]!.GetValue<string>());
+        Assert.Equal("log-bending", run.Result["openings"]![0]!["governing"]!["check"]!.GetValue<string>());
+        Assert.Equal("log 1 in bay 1", run.Result["openings"]![0]!["governing"]!["member"]!.GetValue<string>());
+    }
+
+    [Fact]
+    public void Check_Result_HasTheNamesOfTheFormat()
+    {
+        var opening = Invocation.Of("check", Invocation.Sample("sample-project.json")).Result["openings"]![0]!;
+        var loadCase = opening["cases"]![0]!;
+
+        Assert.Equal(
+            "id verdict missing designFloodLevel retainedDepth barrierHeight governing cases notes", Names(opening));
+        Assert.Equal("check case utilisation member", Names(opening["governing"]!));
+        Assert.Equal("name resultant centreOfPressure actions logs posts guides", Names(loadCase));
+        Assert.Equal("kind resultant centreOfPressure", Names(loadCase["actions"]![0]!));
+        Assert.Equal("index bay bottom top lineLoad moment shear deflection utilisation", Names(loadCase["logs"]![0]!));
+        Assert.Equal("bending shear deflection", Names(loadCase["logs"]![0]!["utilisation"]!));
+        Assert.Equal("index baseShear baseMoment tipDeflection utilisation", Names(loadCase["posts"]![0]!));
+        Assert.Equal("side reaction peakLineReaction", Names(loadCase["guides"]![0]!));
+        Assert.Equal("code text", Names(opening["notes"]![0]!));
+    }
+
+    [Fact]
+    public void Check_MaterialWithoutStrength_HasNoUtilisationForIt()
+    {
+        using var file = new ProjectOnDisk(project =>
+            project["openings"]![1]!["barrier"]!["logs"]!["material"]!.AsObject().Remove("allowableShear"));
+
+        var side = Invocation.Of("check", file.Path).Result["openings"]![1]!;
+
+        var utilisation = side["cases"]![0]!["logs"]![0]!["utilisation"]!;
+        Assert.Null(utilisation["shear"]);
+        Assert.NotNull(utilisation["bending"]);
+        Assert.Contains("logs", side["missing"]!.AsArray().Select(m => m!.GetValue<string>()));
+    }
+
+    [Fact]
+    public void Check_SillAboveTheFlood_HasNoCentreOfPressure()
+    {
+        using var file = new ProjectOnDisk(project =>
+        {
+            project["openings"]![0]!["actions"] = null;
+            project["openings"]![0]!["sillLevel"] = 5;
+        });
+
+        var designFlood = Invocation.Of("check", file.Path).Result["openings"]![0]!["cases"]![0]!;
+
+        Assert.Equal(0, designFlood["resultant"]!.GetValue<double>());
+        Assert.Null(designFlood["centreOfPressure"]);
+    }
+
+    [Fact]
+    public void Check_Levels_ReadAsTyped()
+    {
+        var run = Invocation.Of("check", Invocation.Sample("sample-project.json"));
+
+        Assert.Contains("\"designFloodLevel\": 4.45,", run.Output, StringComparison.Ordinal);
+    }
+
+    [Fact]
+    public async Task Program_SampleProject_WritesPureJsonAndReturns1()
+    {
+        var run = await Invocation.OfProgramAsync("check", Invocation.Sample("sample-project.json"));
+
+        Assert.Equal(1, run.ExitCode);
+        Assert.Equal("", run.Errors);
+        Assert.Equal('{', run.Output[0]);
+        Assert.EndsWith("}\n", run.Output);
+        Assert.Equal(Invocation.Of("check", Invocation.Sample("sample-project.json")).Output, run.Output);
+    }
+
+    [Fact]
+    public async Task Program_AdequateProject_Returns0()
+    {
+        using var file = new ProjectOnDisk(MakeAdequate);
+
+        var run = await Invocation.OfProgramAsync("check", file.Path);
+
+        Assert.Equal((0, ""), (run.ExitCode, run.Errors));
+    }
+
+    [Fact]
+    public async Task Program_FileItCannotRead_Returns2WithOneLineOnStandardErrorOnly()
+    {
+        var run = await Invocation.OfProgramAsync("check", "nowhere.json");
+
+        Assert.Equal((2, ""), (run.ExitCode, run.Output));
+        Assert.Equal("nowhere.json: There is no such file.", run.Errors.TrimEnd());
+    }
+
+    [Theory]
+    [InlineData("--help")]
+    [InlineData("-h")]
+    [InlineData("help")]
+    [InlineData("check", "--help")]
+    public void Help_Asked_IsOnStandardOutput(params string[] arguments)
+    {
+        var run = Invocation.Of(arguments);
+
+        Assert.Equal((0, ""), (run.ExitCode, run.Errors));
+        Assert.StartsWith("usage: floodpanel check FILE", run.Output);
+        Assert.Contains("people leave when told to", run.Output, StringComparison.Ordinal);
+    }
+
+    [Theory]
+    [InlineData]
+    [InlineData("calculate", "a.json")]
+    [InlineData("check")]
+    [InlineData("check", "a.json", "b.json")]
+    public void Command_Unknown_ShowsUsageOnStandardError(params string[] arguments)
+    {
+        var run = Invocation.Of(arguments);
+
+        Assert.Equal((2, ""), (run.ExitCode, run.Output));
+        Assert.StartsWith("usage: floodpanel check FILE", run.Errors);
+    }
+
+    private static string Names(JsonNode node) => string.Join(' ', node.AsObject().Select(p => p.Key));
+
+    /// <summary>The dock alone, still water and flow only, with every part that is not calculated declared by others.</summary>
+    private static void MakeAdequate(JsonObject project)
+    {
+        var dock = project["openings"]![0]!.DeepClone();
+        dock["actions"] = new JsonObject { ["flow"] = new JsonObject { ["velocity"] = 1.1 } };
+        dock["barrier"]!["byOthers"] = new JsonArray(
+            [.. ByOthers.Select(check => new JsonObject
+            {
+                ["check"] = check,
+                ["name"] = "N. Lund",
+                ["reference"] = "A-12",
+            })]);
+        project["openings"] = new JsonArray(dock);
+    }
+}
