@@ -22,6 +22,9 @@ public static class Units
     private const double KipPerSquareInch = 1000 * PoundForce / (Inch * Inch);
     private const double Degree = Math.PI / 180;
 
+    /// <summary>Decimals without an exponent, however small the number.</summary>
+    private const string PlainDecimals = "0.##############################";
+
     private static readonly FrozenDictionary<Dimension, (Unit SI, Unit US)> Table =
         new Dictionary<Dimension, (Unit, Unit)>
         {
@@ -75,12 +78,8 @@ public static class Units
     /// <param name="value">The number [base SI].</param>
     /// <param name="dimension">What it measures.</param>
     /// <param name="system">The system of units.</param>
-    public static string Format(double value, Dimension dimension, UnitSystem system)
-    {
-        var symbol = Of(dimension, system).Symbol;
-        var number = FormatNumber(value, dimension, system);
-        return symbol.Length == 0 ? number : symbol == "°" ? number + symbol : $"{number} {symbol}";
-    }
+    public static string Format(double value, Dimension dimension, UnitSystem system) =>
+        WithSymbol(FormatNumber(value, dimension, system), dimension, system);
 
     /// <summary>Number and unit of a quantity, "1.78 kN".</summary>
     /// <param name="quantity">The quantity.</param>
@@ -94,11 +93,14 @@ public static class Units
     /// <param name="system">The system of units.</param>
     public static string FormatNumber(double value, Dimension dimension, UnitSystem system)
     {
+        if (!double.IsFinite(value))
+        {
+            return value > 0 ? "∞" : value < 0 ? "−∞" : "–";
+        }
+
         var unit = Of(dimension, system);
         var shown = value / unit.InSI;
-        var text = unit.Decimals is { } decimals
-            ? shown.ToString("F" + decimals.ToString(CultureInfo.InvariantCulture), CultureInfo.InvariantCulture)
-            : SignificantFigures(shown, 3);
+        var text = unit.Decimals is { } decimals ? Fixed(shown, decimals) : SignificantFigures(shown);
         return text.StartsWith('-') && text.AsSpan(1).IndexOfAnyInRange('1', '9') < 0 ? text[1..] : text;
     }
 
@@ -106,23 +108,40 @@ public static class Units
     /// <param name="value">The number [base SI].</param>
     /// <param name="dimension">What it measures.</param>
     /// <param name="system">The system of units.</param>
-    public static string FormatInput(double value, Dimension dimension, UnitSystem system) =>
-        FromSI(value, dimension, system).ToString("G9", CultureInfo.InvariantCulture) is var text && text.Contains('E')
-            ? FromSI(value, dimension, system).ToString("0.#########", CultureInfo.InvariantCulture)
-            : text;
-
-    private static string SignificantFigures(double value, int figures)
+    public static string FormatInput(double value, Dimension dimension, UnitSystem system)
     {
-        if (value == 0 || !double.IsFinite(value))
-        {
-            return value == 0 ? "0" : value > 0 ? "∞" : value < 0 ? "−∞" : "–";
-        }
+        // Adding zero makes a negative zero positive.
+        var text = (FromSI(value, dimension, system) + 0.0).ToString("G9", CultureInfo.InvariantCulture);
+        return text.Contains('E')
+            ? double.Parse(text, CultureInfo.InvariantCulture).ToString(PlainDecimals, CultureInfo.InvariantCulture)
+            : text;
+    }
 
-        var magnitude = (int)Math.Floor(Math.Log10(Math.Abs(value)));
-        var scale = Math.Pow(10, Math.Max(magnitude - figures + 1, 0));
-        var rounded = Math.Round(value / scale) * scale;
-        var decimals = Math.Clamp(figures - 1 - magnitude, 0, 9);
-        return (decimals == 0 ? rounded : value).ToString(
-            "F" + decimals.ToString(CultureInfo.InvariantCulture), CultureInfo.InvariantCulture);
+    /// <summary>Number and unit as typed, "0.0999 m": for messages about a value, which rounding must not disguise.</summary>
+    /// <param name="quantity">The quantity.</param>
+    /// <param name="system">The system of units.</param>
+    public static string FormatTyped(Quantity quantity, UnitSystem system) =>
+        WithSymbol(FormatInput(quantity.Value, quantity.Dimension, system), quantity.Dimension, system);
+
+    private static string WithSymbol(string number, Dimension dimension, UnitSystem system) =>
+        Of(dimension, system).Symbol switch
+        {
+            "" => number,
+            "°" => number + "°",
+            var symbol => $"{number} {symbol}",
+        };
+
+    private static string Fixed(double value, int decimals) =>
+        value.ToString("F" + decimals.ToString(CultureInfo.InvariantCulture), CultureInfo.InvariantCulture);
+
+    /// <summary>Three significant figures, also where rounding carries: 9.996 is 10.0.</summary>
+    private static string SignificantFigures(double value)
+    {
+        const int most = 9;
+        var scientific = value.ToString("E2", CultureInfo.InvariantCulture);
+        var exponent = int.Parse(scientific.AsSpan(scientific.IndexOf('E') + 1), NumberStyles.AllowLeadingSign, CultureInfo.InvariantCulture);
+        return value == 0 || exponent < -most
+            ? "0"
+            : Fixed(double.Parse(scientific, CultureInfo.InvariantCulture), Math.Clamp(2 - exponent, 0, most));
     }
 }

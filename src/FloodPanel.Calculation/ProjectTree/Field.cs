@@ -24,7 +24,7 @@ public sealed record Field(
     public bool Allows(double value) =>
         (MinimumExcluded ? value > Minimum : value >= Minimum) && value <= Maximum;
 
-    /// <summary>What is allowed, "above 0.00 m and at most 50.00 m".</summary>
+    /// <summary>What is allowed, "above 0.000 m and at most 50.000 m".</summary>
     public Sentence Allowed => MinimumExcluded
         ? new($"above {new Quantity(Minimum, Dimension)} and at most {new Quantity(Maximum, Dimension)}")
         : new($"from {new Quantity(Minimum, Dimension)} to {new Quantity(Maximum, Dimension)}");
@@ -42,7 +42,7 @@ public sealed record Field(
         var least = new Quantity(Minimum, Dimension);
         var most = new Quantity(Maximum, Dimension);
         return MinimumExcluded
-            ? new($"{Label} is {shown}; allowed is above {least} and at most {most}.")
-            : new($"{Label} is {shown}; allowed is {least} to {most}.");
+            ? new($"{Label} is {shown:typed}; allowed is above {least} and at most {most}.")
+            : new($"{Label} is {shown:typed}; allowed is {least} to {most}.");
     }
 }
