@@ -47,8 +47,14 @@ public sealed class CaseEvaluation
     /// <summary>Calculates a load case.</summary>
     /// <param name="model">An opening with as many logs and bays as this object has room for.</param>
     /// <param name="kind">The case.</param>
+    /// <exception cref="ArgumentException">The opening has other counts of logs or bays.</exception>
     public void Fill(OpeningModel model, CaseKind kind)
     {
+        if (model.LogCount != logLoads.Length || model.PostCount != posts.Length)
+        {
+            throw new ArgumentException("has other counts of logs or bays than there is room for", nameof(model));
+        }
+
         CaseDiagram.Fill(Diagram, model, kind);
         FillLogs(model);
         for (var post = 0; post < posts.Length; post++)

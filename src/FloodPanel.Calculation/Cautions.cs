@@ -1,6 +1,7 @@
 using FloodPanel.Calculation.Actions;
 using FloodPanel.Calculation.Handling;
 using FloodPanel.Calculation.ProjectTree;
+using FloodPanel.Calculation.Water;
 
 namespace FloodPanel.Calculation;
 
@@ -37,7 +38,7 @@ internal static class Cautions
 
         Declarations(notes, opening);
         Lifting(notes, schedule);
-        Walls(notes, opening, Math.Max(model.RetainedDepth, site.DesignFloodLevel - (opening.GroundLevel ?? opening.SillLevel)));
+        Walls(notes, opening, FloodLevels.Depth(site.DesignFloodLevel, Math.Min(opening.SillLevel, opening.GroundLevel ?? opening.SillLevel)));
         notes.Add(CalculationAid);
         return notes;
     }
@@ -51,13 +52,13 @@ internal static class Cautions
                 $"The design flood level, {Length(site.DesignFloodLevel)}, does not rise above the sill, {Length(opening.SillLevel)}: no water stands against the barrier in the design flood.")));
         }
 
-        if (depth > height)
+        if (depth > height + FloodLevels.HeightTolerance)
         {
             notes.Add(new("overtopped", new(
                 $"The design flood stands {Length(depth - height)} above the top of the barrier: water flows over it.")));
         }
 
-        if (height > opening.ClearHeight)
+        if (height > opening.ClearHeight + FloodLevels.HeightTolerance)
         {
             notes.Add(new("taller-than-opening", new(
                 $"The barrier, {Length(height)} high, is taller than the clear height of the opening, {Length(opening.ClearHeight)}: check that the top logs can be placed.")));
@@ -90,7 +91,7 @@ internal static class Cautions
         foreach (var declaration in opening.Barrier.ByOthers.Where(d => !VerdictRules.IsNamed(d)))
         {
             notes.Add(new("by-others-unnamed", new(
-                $"The {NeededChecks.Title(declaration.Check)} are declared designed by others without a name and a reference: enter both, or the check stays missing.")));
+                $"Declared designed by others without a name and a reference: {NeededChecks.Title(declaration.Check)}. Enter both, or the check stays missing.")));
         }
     }
 

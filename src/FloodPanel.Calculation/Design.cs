@@ -12,7 +12,7 @@ public static class Design
     /// <summary>Calculates every opening of a project.</summary>
     /// <param name="project">A project without problems, see <see cref="Validation.Validate"/>.</param>
     /// <param name="library">The materials and profiles it may name.</param>
-    /// <exception cref="ArgumentException">The project has problems that <see cref="Validation.Validate"/> would name.</exception>
+    /// <exception cref="ArgumentException">The site or an opening has problems that <see cref="Validation.Validate"/> would name.</exception>
     public static ProjectResult Run(Project project, Library library) =>
         new(project, [.. project.Openings.Select(o => Evaluate(project, o, library))]);
 
@@ -20,10 +20,11 @@ public static class Design
     /// <param name="project">The project: its site and design basis apply.</param>
     /// <param name="opening">An opening without problems, see <see cref="Validation.Validate"/>.</param>
     /// <param name="library">The materials and profiles it may name.</param>
-    /// <exception cref="ArgumentException">The opening has problems that <see cref="Validation.Validate"/> would name.</exception>
+    /// <exception cref="ArgumentException">The site or the opening has problems that <see cref="Validation.Validate"/> would name.</exception>
     public static OpeningResult Evaluate(Project project, Opening opening, Library library)
     {
         var site = project.Site;
+        RefuseProblems(Validation.Problems(site, opening, library), nameof(opening));
         var model = new OpeningModel(site, opening, DesignBases.Of(project.DesignBasis), library);
         var cases = Cases(model);
         var freeboard = FloodLevels.Freeboard(model.RetainedDepth, site.Freeboard, model.Height);
@@ -48,6 +49,14 @@ public static class Design
             Verdict = VerdictRules.Of(opening, model, cases, freeboard, uncomputed),
             Notes = Cautions.Of(site, opening, model, schedule, uncomputed),
         };
+    }
+
+    private static void RefuseProblems(IReadOnlyList<InputProblem> problems, string parameter)
+    {
+        if (problems.Count > 0)
+        {
+            throw new ArgumentException($"has problems, the first at {problems[0].Path}: {problems[0].Message}", parameter);
+        }
     }
 
     private static CaseResult[] Cases(OpeningModel model)

@@ -1,6 +1,7 @@
 using FloodPanel.Calculation.Actions;
 using FloodPanel.Calculation.Cases;
 using FloodPanel.Calculation.ProjectTree;
+using FloodPanel.Calculation.Water;
 
 namespace FloodPanel.Calculation;
 
@@ -17,8 +18,8 @@ public sealed class OpeningModel
         var (logs, posts) = (opening.Barrier.Logs, opening.Barrier.Posts);
         Factors = basis.For(site.FloodZone);
         UnitWeight = Hydrostatic.UnitWeight(site.WaterDensity);
-        RetainedDepth = site.DesignFloodLevel - opening.SillLevel;
-        ProtectedDepth = Math.Max(0, (opening.ProtectedSideLevel ?? opening.SillLevel) - opening.SillLevel);
+        RetainedDepth = FloodLevels.Depth(site.DesignFloodLevel, opening.SillLevel);
+        ProtectedDepth = Math.Max(0, FloodLevels.Depth(opening.ProtectedSideLevel ?? opening.SillLevel, opening.SillLevel));
         ClearWidth = opening.ClearWidth;
         Flow = opening.Actions.Flow;
         Rake = double.DegreesToRadians(opening.RakeDegrees);

@@ -1,4 +1,5 @@
 using FloodPanel.Calculation.ProjectTree;
+using FloodPanel.Calculation.Water;
 
 namespace FloodPanel.Calculation;
 
@@ -39,6 +40,18 @@ public static class Validation
         return problems.Problems;
     }
 
+    /// <summary>Problems of one opening and its site, with the paths that they have in a project of their own.</summary>
+    /// <param name="site">Levels and water.</param>
+    /// <param name="opening">The opening.</param>
+    /// <param name="library">The materials and profiles it may name.</param>
+    internal static IReadOnlyList<InputProblem> Problems(Site site, Opening opening, Library library)
+    {
+        var problems = new ProblemList();
+        ValidateSite(site, problems);
+        ValidateOpening(site, opening, "openings[0]", problems, library);
+        return problems.Problems;
+    }
+
     /// <summary>True for 1 to 60 letters (a to z), digits and hyphens.</summary>
     /// <param name="id">The identifier.</param>
     public static bool IsIdentifier(string id) =>
@@ -63,24 +76,24 @@ public static class Validation
     private static void ValidateOpening(Site site, Opening opening, string path, ProblemList problems, Library library)
     {
         var sill = problems.Check(Fields.SillLevel, opening.SillLevel, path);
+        var retained = FloodLevels.Depth(site.DesignFloodLevel, opening.SillLevel);
+        if (sill && retained > GreatestRetainedDepth)
+        {
+            problems.Add($"{path}.sillLevel", $"Sill level is {Length(opening.SillLevel)}, {Length(retained):typed} below the design flood level, {Length(site.DesignFloodLevel)}; allowed is up to {Length(GreatestRetainedDepth)} below it.");
+        }
+
         problems.Check(Fields.GroundLevel, opening.GroundLevel, path);
         problems.Check(Fields.ClearWidth, opening.ClearWidth, path);
         problems.Check(Fields.ClearHeight, opening.ClearHeight, path);
         problems.Check(Fields.Rake, opening.RakeDegrees, path);
         problems.Check(Fields.ProtectedSideLevel, opening.ProtectedSideLevel, path);
-        var retained = site.DesignFloodLevel - opening.SillLevel;
-        if (sill && retained > GreatestRetainedDepth)
+        if (opening.ProtectedSideLevel is { } behind && FloodLevels.Depth(behind, site.DesignFloodLevel) > 0)
         {
-            problems.Add($"{path}.sillLevel", $"Sill level is {Length(opening.SillLevel)}, {Length(retained)} below the design flood level, {Length(site.DesignFloodLevel)}; allowed is up to {Length(GreatestRetainedDepth)} below it.");
+            problems.Add($"{path}.protectedSideLevel", $"Protected-side water level is {Length(behind):typed}, above the design flood level, {Length(site.DesignFloodLevel):typed}; allowed is up to that level, because reverse head is not covered.");
         }
 
-        if (opening.ProtectedSideLevel is { } behind && behind > site.DesignFloodLevel)
-        {
-            problems.Add($"{path}.protectedSideLevel", $"Protected-side water level is {Length(behind)}, above the design flood level, {Length(site.DesignFloodLevel)}; allowed is up to that level, because reverse head is not covered.");
-        }
-
-        BarrierValidation.Validate(opening, path, problems, library);
         ActionValidation.Validate(opening, path, problems, library);
+        BarrierValidation.Validate(opening, path, problems, library);
     }
 
     private static Quantity Length(double value) => new(value, Dimension.Length);

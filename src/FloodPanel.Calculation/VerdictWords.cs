@@ -50,11 +50,11 @@ internal static class VerdictWords
         return char.ToUpperInvariant(words[0]) + words[1..];
     }
 
-    /// <summary>Two decimals; more where rounding would hide which side of 1 it stands on.</summary>
+    /// <summary>Two decimals, or words where rounding would hide that it stands above 1.</summary>
     private static string Shown(double utilisation) => utilisation switch
     {
         double.PositiveInfinity => "more than any multiple",
-        > 1 and < 1.005 => utilisation.ToString("0.0000", CultureInfo.InvariantCulture),
+        > 1 and < 1.005 => "just over 1.00",
         _ => utilisation.ToString("0.00", CultureInfo.InvariantCulture),
     };
 }

@@ -15,8 +15,8 @@ public static class DesignBases
         new(FloodSide: 1.5, ProtectedSide: 1.5, BrimFull: 1.5),
         new Dictionary<MaterialFamily, StrengthRule>
         {
-            [MaterialFamily.Aluminium] = new(1 / 1.65, "f_k/1.65", "Aluminum Design Manual 2020, F.1: safety factor 1.65 on yield"),
-            [MaterialFamily.Steel] = new(1 / 1.67, "f_k/1.67", "AISC 360, F1: safety factor 1.67"),
+            [MaterialFamily.Aluminium] = new(1 / 1.65, "f_k/1.65", "Aluminum Design Manual 2020, F.1 and G.1: safety factor 1.65 on yield"),
+            [MaterialFamily.Steel] = new(1 / 1.67, "f_k/1.67", "AISC 360, F1 and G1: safety factor 1.67"),
         }.ToFrozenDictionary());
 
     /// <summary>US strength design: factored loads against factored strengths.</summary>
@@ -28,15 +28,15 @@ public static class DesignBases
         new(FloodSide: 2.0, ProtectedSide: 2.0, BrimFull: 2.0),
         new Dictionary<MaterialFamily, StrengthRule>
         {
-            [MaterialFamily.Aluminium] = new(0.90, "0.90·f_k", "Aluminum Design Manual 2020, F.1: resistance factor 0.90 (from memory)"),
-            [MaterialFamily.Steel] = new(0.90, "0.90·f_k", "AISC 360, F1: resistance factor 0.90"),
+            [MaterialFamily.Aluminium] = new(0.90, "0.90·f_k", "Aluminum Design Manual 2020, F.1 and G.1: resistance factor 0.90 (from memory)"),
+            [MaterialFamily.Steel] = new(0.90, "0.90·f_k", "AISC 360, F1 and G1: resistance factor 0.90"),
         }.ToFrozenDictionary());
 
     /// <summary>Eurocode partial factors.</summary>
     public static DesignBasis Eurocode { get; } = new(
         DesignBasisKind.Eurocode,
         "Eurocode",
-        "EN 1990, Tables A1.2 (from memory): 1.5 variable, 1.0 favourable, 1.35 where geometry limits the level",
+        "EN 1990, Table A1.2(B) (from memory): 1.5 variable, 1.0 favourable, 1.35 where geometry limits the level",
         new(FloodSide: 1.5, ProtectedSide: 1.0, BrimFull: 1.35),
         new(FloodSide: 1.5, ProtectedSide: 1.0, BrimFull: 1.35),
         new Dictionary<MaterialFamily, StrengthRule>

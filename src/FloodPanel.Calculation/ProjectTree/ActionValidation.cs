@@ -1,3 +1,5 @@
+using FloodPanel.Calculation.Water;
+
 namespace FloodPanel.Calculation.ProjectTree;
 
 /// <summary>Finds problems in the actions of an opening.</summary>
@@ -59,15 +61,17 @@ internal static class ActionValidation
 
     private static void LineHeight(Opening opening, LineInput line, string path, ProblemList problems, Library library)
     {
-        if (library.Find(opening.Barrier.Logs.Profile) is not { } profile)
+        // Heights that are refused themselves say nothing about the line load.
+        if (library.Find(opening.Barrier.Logs.Profile) is not { } profile
+            || !Fields.ProfileHeight.Allows(profile.Height) || !Fields.LogCount.Allows(opening.Barrier.Logs.Count))
         {
             return;
         }
 
         var height = opening.Barrier.Logs.Count * profile.Height * Math.Cos(double.DegreesToRadians(opening.RakeDegrees));
-        if (line.Height > height)
+        if (line.Height > height + FloodLevels.HeightTolerance)
         {
-            problems.Add($"{path}.height", $"Line load height is {new Quantity(line.Height, Dimension.Length)}; allowed is up to the top of the barrier, {new Quantity(height, Dimension.Length)}.");
+            problems.Add($"{path}.height", $"Line load height is {new Quantity(line.Height, Dimension.Length):typed}; allowed is up to the top of the barrier, {new Quantity(height, Dimension.Length)}.");
         }
     }
 }

@@ -53,9 +53,11 @@ internal static class BarrierValidation
         }
 
         var filled = bays.Sum() + (bays.Count - 1) * (posts?.Width ?? 0);
-        if (!(Math.Abs(filled - opening.ClearWidth) <= FitTolerance + 1e-9))
+        var gap = Math.Abs(filled - opening.ClearWidth);
+        if (double.IsFinite(gap) && gap > FitTolerance + 1e-9)
         {
-            problems.Add($"{path}.bays", $"Clear bays and posts add up to {Length(filled)}; they must fill the clear width, {Length(opening.ClearWidth)}, within {Section(FitTolerance)}.");
+            var differs = filled > opening.ClearWidth ? "more" : "less";
+            problems.Add($"{path}.bays", $"Clear bays and posts add up to {Length(filled)}, {Section(gap)} {differs} than the clear width, {Length(opening.ClearWidth)}; allowed is a difference of {Section(FitTolerance)}.");
         }
     }
 
@@ -68,7 +70,7 @@ internal static class BarrierValidation
         var bearings = 2 * barrier.Logs.EndBearing;
         if (barrier.Bays.Count > 1 && bearings > posts.Width + 1e-9)
         {
-            problems.Add($"{path}.width", $"Post width is {Section(posts.Width)}; it must take two end bearings, {Section(bearings)} together.");
+            problems.Add($"{path}.width", $"Post width is {Section(posts.Width):typed}; allowed is at least two end bearings, {Section(bearings):typed} together.");
         }
     }
 

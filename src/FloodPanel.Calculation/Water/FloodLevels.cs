@@ -10,6 +10,15 @@ public static class FloodLevels
 
     private const string Source = "Levels in the project's datum";
 
+    /// <summary>Depth of water above a sill [m]; negative where the level is below it.</summary>
+    /// <param name="level">Water level [m, project datum].</param>
+    /// <param name="sillLevel">Sill level [m, project datum].</param>
+    /// <remarks>
+    /// Rounded to 1e-9 m. Levels are sums of decimals, and the noise of their binary fractions must not decide
+    /// whether water stands as high as a sill or as the water behind it. Adding zero makes a negative zero positive.
+    /// </remarks>
+    public static double Depth(double level, double sillLevel) => Math.Round(level - sillLevel, 9) + 0.0;
+
     /// <summary>Working of the design flood level of a site.</summary>
     /// <param name="site">The site.</param>
     public static Working DesignLevel(Site site) => new("Design flood level", Source, [.. Level(site)]);
@@ -21,7 +30,7 @@ public static class FloodLevels
     [
         .. Level(site),
         new("z_sill", "", opening.SillLevel, Dimension.Length),
-        new("h", "z_dfl − z_sill", site.DesignFloodLevel - opening.SillLevel, Dimension.Length),
+        new("h", "z_dfl − z_sill", Depth(site.DesignFloodLevel, opening.SillLevel), Dimension.Length),
     ]);
 
     /// <summary>Freeboard: required height of the barrier above the sill against its height.</summary>
