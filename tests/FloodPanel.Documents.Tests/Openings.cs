@@ -22,7 +22,7 @@ internal static class Openings
         ["dry-sill"] = u => Sample.Input(Sample.Garage with { SillLevel = 13.2, GroundLevel = 12.0 }, u),
         ["sill-at-flood"] = u => Sample.Input(Sample.Garage with { SillLevel = 12.35, GroundLevel = 12.35 }, u),
         ["overtopped"] = u => Sample.Input(Sample.Garage with { SillLevel = 10.9, GroundLevel = 10.9 }, u),
-        ["drowned"] = u => Sample.Input(Sample.Garage with { SillLevel = -20, GroundLevel = null }, u),
+        ["drowned"] = u => Sample.Input(Sample.Garage with { SillLevel = -7, GroundLevel = null }, u),
         ["high-ground"] = u => Sample.Input(Sample.Garage with { GroundLevel = 11.75 }, u),
         ["deep-ground"] = u => Sample.Input(Sample.Garage with { GroundLevel = 2 }, u),
         ["both-sides"] = u => Sample.Input(Sample.Garage with { ProtectedSideLevel = 11.7 }, u),

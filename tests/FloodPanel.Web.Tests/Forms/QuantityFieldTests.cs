@@ -49,7 +49,7 @@ public class QuantityFieldTests : BunitContext
     }
 
     [Theory]
-    [InlineData("200", "Clear width is 200.000 m; allowed is 0.100 m to 100.000 m.")]
+    [InlineData("200", "Clear width is 200 m; allowed is 0.100 m to 100.000 m.")]
     [InlineData("abc", "Clear width reads “abc”: it is not a number. Allowed is from 0.100 m to 100.000 m.")]
     [InlineData("", "Clear width is empty; allowed is from 0.100 m to 100.000 m.")]
     [InlineData("1,250", "Clear width reads “1,250”: it could mean 1.250 or 1250. Write one of these. Allowed is from 0.100 m to 100.000 m.")]
