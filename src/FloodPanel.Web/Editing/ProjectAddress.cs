@@ -1,3 +1,5 @@
+using FloodPanel.Calculation;
+
 namespace FloodPanel.Web.Editing;
 
 /// <summary>Addresses of the pages of a project.</summary>
@@ -10,6 +12,9 @@ public static class ProjectAddress
     public static string Bench(Guid id, string openingId) => $"/projects/{id}/openings/{Uri.EscapeDataString(openingId)}";
 
     public static string Export(Guid id) => $"/projects/{id}/export";
+
+    public static string OwnerSummary(Guid id, UnitSystem units) =>
+        $"/projects/{id}/owner-summary.pdf?units={(units == UnitSystem.SI ? "si" : "us")}";
 
     /// <summary>True when an address without its leading slash is one of this project's pages.</summary>
     public static bool Covers(string relative, Guid id) =>

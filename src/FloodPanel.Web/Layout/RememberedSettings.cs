@@ -3,7 +3,7 @@ using FloodPanel.Web.Editing;
 
 namespace FloodPanel.Web.Layout;
 
-/// <summary>The cookies in which a browser remembers its settings; written by wwwroot/js/settings.js.</summary>
+/// <summary>The cookies in which a browser remembers its settings; written by wwwroot/js/floodpanel.js.</summary>
 public static class RememberedSettings
 {
     public const string UnitsCookie = "fp-units";

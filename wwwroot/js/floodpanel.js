@@ -21,7 +21,21 @@ window.floodpanel = (() => {
   });
   apply();
 
+  // Fetched first, so that a refusal becomes a sentence on the page and not a failed file in the download list.
+  const download = async address => {
+    const answer = await fetch(address);
+    if (!answer.ok) return await answer.text();
+    const name = /filename\*=UTF-8''([^;]+)/i.exec(answer.headers.get("Content-Disposition") ?? "")?.[1];
+    const link = document.createElement("a");
+    link.href = URL.createObjectURL(await answer.blob());
+    link.download = name ? decodeURIComponent(name) : "";
+    link.click();
+    setTimeout(() => URL.revokeObjectURL(link.href), 60000);
+    return null;
+  };
+
   return {
+    download,
     remember: (name, value) => { write(name, value); apply(); },
     watchSystem: target => { listener = target; return system.matches; },
   };
