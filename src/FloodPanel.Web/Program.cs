@@ -1,26 +1,37 @@
-using FloodPanel.Calculation;
+using FloodPanel.Storage;
+using FloodPanel.Storage.LibraryData;
 using FloodPanel.Web;
 using FloodPanel.Web.Editing;
+using FloodPanel.Web.Files;
 using FloodPanel.Web.Startup;
-using MudBlazor.Services;
 
 var builder = WebApplication.CreateBuilder(new WebApplicationOptions { Args = args, ContentRootPath = AppContext.BaseDirectory });
 builder.WebHost.UseStaticWebAssets();
 builder.UseAddressOfOurOwn();
-builder.Services.AddRazorComponents().AddInteractiveServerComponents();
-builder.Services.AddMudServices(options => options.SnackbarConfiguration.PositionClass = "mud-snackbar-location-bottom-left");
-builder.Services.AddSingleton(TimeProvider.System);
-builder.Services.AddSingleton<MemoryProjects>();
-builder.Services.AddSingleton(Library.Empty);
-builder.Services.AddScoped(services => services.GetRequiredService<MemoryProjects>().Access);
-builder.Services.AddScoped<ScreenSettings>();
-builder.Services.AddScoped<ProjectEditor>();
+try
+{
+    var office = Office.Open(builder.Configuration);
+    builder.Services.AddFloodPanel(office);
+    var app = builder.Build();
+    if (office.IsNew)
+    {
+        await DemoProject.AddAsync(app.Services.GetRequiredService<ProjectStore>());
+    }
 
-var app = builder.Build();
-app.UseProtectiveHeaders();
-app.UseStatusCodePagesWithReExecute("/not-found", createScopeForStatusCodePages: true);
-app.UseAntiforgery();
-app.MapStaticAssets();
-app.MapRazorComponents<App>().AddInteractiveServerRenderMode(options => options.ContentSecurityFrameAncestorsPolicy = null);
-app.SayWhereItListens();
-await app.RunAsync();
+    app.UseAnswerToFaults();
+    app.UseProtectiveHeaders();
+    app.UseStatusCodePagesWithReExecute("/not-found", createScopeForStatusCodePages: true);
+    app.UseAntiforgery();
+    app.MapStaticAssets();
+    app.MapProjectFiles();
+    app.MapRazorComponents<App>().AddInteractiveServerRenderMode(options => options.ContentSecurityFrameAncestorsPolicy = null);
+    app.Lifetime.ApplicationStopping.Register(app.Services.GetRequiredService<OpenEditors>().SaveAll);
+    app.SayWhereItListens(office.DataFolder);
+    await app.RunAsync();
+    return 0;
+}
+catch (Exception e) when (e is StoreException or LibraryFileException)
+{
+    await Console.Error.WriteLineAsync(e.Message);
+    return 1;
+}

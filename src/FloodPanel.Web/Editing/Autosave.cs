@@ -1,4 +1,5 @@
 using FloodPanel.Calculation.ProjectTree;
+using FloodPanel.Storage;
 
 namespace FloodPanel.Web.Editing;
 
@@ -37,7 +38,7 @@ public sealed class Autosave : IAsyncDisposable
     public event Action? Changed;
 
     /// <summary>Starts from what stands in the store.</summary>
-    public void Start(OpenedProject opened)
+    public void Start(StoredProject opened)
     {
         timer.Change(Timeout.InfiniteTimeSpan, Timeout.InfiniteTimeSpan);
         (Id, Revision, latest, saved) = (opened.Id, opened.Revision, opened.Project, opened.Project);
@@ -48,7 +49,7 @@ public sealed class Autosave : IAsyncDisposable
     public void Note(Project project)
     {
         latest = project;
-        if (State.Step == SaveStep.Conflict)
+        if (State.NeedsChoice)
         {
             return;
         }
@@ -78,10 +79,17 @@ public sealed class Autosave : IAsyncDisposable
         }
     }
 
+    /// <summary>After a choice was made: saving goes on.</summary>
+    public Task ResumeAsync()
+    {
+        Show(State with { Step = SaveStep.Waiting, Reason = null });
+        return SaveNowAsync();
+    }
+
     private async Task SaveLatestAsync()
     {
         var snapshot = latest;
-        if (State.Step == SaveStep.Conflict)
+        if (State.NeedsChoice)
         {
             return;
         }
@@ -108,16 +116,22 @@ public sealed class Autosave : IAsyncDisposable
 
     private void Take(SaveOutcome outcome, Project snapshot)
     {
-        if (!outcome.Accepted)
+        switch (outcome)
         {
-            Show(State with { Step = SaveStep.Conflict });
-            return;
+            case ProjectSaved accepted:
+                (Revision, saved) = (accepted.Revision, snapshot);
+                // What was typed during the save has set the timer again.
+                Show(new SaveState(ReferenceEquals(latest, snapshot) ? SaveStep.Saved : SaveStep.Waiting, accepted.SavedAt));
+                break;
+            case SaveConflict:
+                Show(State with { Step = SaveStep.Conflict });
+                break;
+            case ProjectGone:
+                Show(State with { Step = SaveStep.Gone });
+                break;
+            default:
+                throw new InvalidOperationException($"The store answered {outcome}.");
         }
-
-        (Revision, saved) = (outcome.Revision, snapshot);
-        // What was typed during the save has set the timer again.
-        var step = ReferenceEquals(latest, snapshot) ? SaveStep.Saved : SaveStep.Waiting;
-        Show(new SaveState(step, outcome.SavedAt));
     }
 
     private void Show(SaveState state)

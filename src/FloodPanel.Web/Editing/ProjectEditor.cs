@@ -1,5 +1,6 @@
 using FloodPanel.Calculation;
 using FloodPanel.Calculation.ProjectTree;
+using FloodPanel.Storage;
 
 namespace FloodPanel.Web.Editing;
 
@@ -11,18 +12,20 @@ public sealed class ProjectEditor : IAsyncDisposable
 {
     private readonly ProjectAccess access;
     private readonly ScreenSettings settings;
+    private readonly OpenEditors editors;
     private readonly LiveResults results;
     private readonly EditHistory history;
     private readonly Autosave autosave;
 
-    public ProjectEditor(ProjectAccess access, Library library, ScreenSettings settings, TimeProvider time)
+    public ProjectEditor(ProjectAccess access, Library library, ScreenSettings settings, OpenEditors editors, TimeProvider time)
     {
-        (this.access, this.settings) = (access, settings);
+        (this.access, this.settings, this.editors) = (access, settings, editors);
         results = new LiveResults(library);
         history = new EditHistory(time);
         autosave = new Autosave(access, time);
         autosave.Changed += Show;
         settings.Changed += Show;
+        editors.Add(this);
     }
 
     /// <summary>The open project; empty before the first one is opened.</summary>
@@ -132,7 +135,14 @@ public sealed class ProjectEditor : IAsyncDisposable
         return opened.Id;
     }
 
-    private void Load(OpenedProject opened)
+    /// <summary>Answers a deletion by someone else: brings the project back and saves what this tab holds.</summary>
+    public async Task PutBackAsync()
+    {
+        await access.Restore(Id);
+        await autosave.ResumeAsync();
+    }
+
+    private void Load(StoredProject opened)
     {
         history.Clear();
         Project = opened.Project;
@@ -154,10 +164,11 @@ public sealed class ProjectEditor : IAsyncDisposable
 
     public async ValueTask DisposeAsync()
     {
+        editors.Remove(this);
         settings.Changed -= Show;
         autosave.Changed -= Show;
         await autosave.SaveNowAsync();
-        if (State.Step == SaveStep.Conflict)
+        if (State.NeedsChoice)
         {
             // The tab was closed before the choice was made; a copy loses nothing and overwrites nothing.
             await SaveAsCopyAsync();

@@ -15,6 +15,9 @@ public enum SaveStep
 
     /// <summary>Someone else saved the project in between; the user must choose.</summary>
     Conflict,
+
+    /// <summary>Someone else deleted the project in between; the user must choose.</summary>
+    Gone,
 }
 
 /// <summary>How what is typed stands to what is stored.</summary>
@@ -24,4 +27,7 @@ public enum SaveStep
 public sealed record SaveState(SaveStep Step, DateTimeOffset SavedAt, string? Reason = null)
 {
     public bool IsSafe => Step == SaveStep.Saved;
+
+    /// <summary>Nothing is saved until the user has chosen.</summary>
+    public bool NeedsChoice => Step is SaveStep.Conflict or SaveStep.Gone;
 }

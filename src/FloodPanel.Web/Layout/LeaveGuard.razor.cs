@@ -29,10 +29,10 @@ public sealed partial class LeaveGuard
             return;
         }
 
-        if (Editor.State.Step == SaveStep.Conflict)
+        if (Editor.State.NeedsChoice)
         {
             leaving.PreventNavigation();
-            Snackbar.Add("Choose first: save yours as a copy, or reload theirs.", Severity.Warning);
+            Snackbar.Add("Choose first what to do with what is not saved; see the note at the top of the page.", Severity.Warning);
         }
         else if (await Dialogs.ShowMessageBoxAsync(
             "Leave without saving?", $"The last changes are not saved: {Editor.State.Reason}", yesText: "Leave", cancelText: "Stay") != true)

@@ -17,6 +17,7 @@ public sealed partial class SaveStateLabel
         SaveStep.Saved => $"Saved {When}",
         SaveStep.Waiting or SaveStep.Saving => "Saving…",
         SaveStep.Conflict => "Not saved: changed elsewhere",
+        SaveStep.Gone => "Not saved: deleted elsewhere",
         _ => $"Not saved: {State.Reason}",
     };
 

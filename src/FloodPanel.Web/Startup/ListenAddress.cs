@@ -20,11 +20,13 @@ public static class ListenAddress
         }
     }
 
-    public static void SayWhereItListens(this WebApplication app) => app.Lifetime.ApplicationStarted.Register(() =>
+    public static void SayWhereItListens(this WebApplication app, string dataFolder) => app.Lifetime.ApplicationStarted.Register(() =>
     {
         foreach (var address in app.Services.GetRequiredService<IServer>().Features.Get<IServerAddressesFeature>()?.Addresses ?? [])
         {
             Console.WriteLine($"FloodPanel is ready: open {address} in a browser. Ctrl+C stops it.");
         }
+
+        Console.WriteLine($"Projects are stored in {dataFolder}.");
     });
 }

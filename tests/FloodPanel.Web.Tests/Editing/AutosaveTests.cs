@@ -1,4 +1,5 @@
 using FloodPanel.Calculation.ProjectTree;
+using FloodPanel.Storage;
 using FloodPanel.Web.Editing;
 
 namespace FloodPanel.Web.Tests.Editing;
@@ -15,7 +16,7 @@ public sealed class AutosaveTests : IAsyncDisposable
         store = new MemoryStore(time);
         id = store.Put(Named("as opened"));
         autosave = new Autosave(store.Access, time);
-        autosave.Start(new OpenedProject(id, 1, time.GetUtcNow(), store.Revisions(id)[0]));
+        autosave.Start(new StoredProject(id, 1, time.GetUtcNow(), store.Revisions(id)[0]));
     }
 
     [Fact]
@@ -77,6 +78,22 @@ public sealed class AutosaveTests : IAsyncDisposable
 
         Assert.Equal(SaveStep.Conflict, autosave.State.Step);
         Assert.Equal(["as opened", "theirs"], store.Revisions(id).Select(p => p.Name));
+    }
+
+    [Fact]
+    public async Task ResumeAsync_AfterADeletionWasUndone_SavesWhatIsHeld()
+    {
+        store.DeleteByAnother(id);
+        autosave.Note(Named("mine"));
+        await autosave.SaveNowAsync();
+        var gone = autosave.State.Step;
+        await store.Access.Restore(id);
+
+        await autosave.ResumeAsync();
+
+        Assert.Equal(SaveStep.Gone, gone);
+        Assert.Equal("mine", store.Revisions(id)[^1].Name);
+        Assert.True(autosave.State.IsSafe);
     }
 
     [Fact]

@@ -1,4 +1,5 @@
 using FloodPanel.Calculation.ProjectTree;
+using FloodPanel.Storage;
 using FloodPanel.Web.Editing;
 
 namespace FloodPanel.Web.Tests.Editing;
@@ -8,9 +9,11 @@ public sealed class MemoryStore(TimeProvider time)
 {
     private readonly Dictionary<Guid, List<Project>> projects = [];
 
+    private readonly HashSet<Guid> deleted = [];
+
     public Exception? Failure { get; set; }
 
-    public ProjectAccess Access => new(OpenAsync, SaveAsync, CreateAsync);
+    public ProjectAccess Access => new(OpenAsync, SaveAsync, CreateAsync, RestoreAsync);
 
     public IReadOnlyList<Project> Revisions(Guid id) => projects[id];
 
@@ -26,9 +29,12 @@ public sealed class MemoryStore(TimeProvider time)
     /// <summary>A save by somebody else.</summary>
     public void SaveByAnother(Guid id, Project project) => projects[id].Add(project);
 
-    private Task<OpenedProject?> OpenAsync(Guid id) => Task.FromResult(
-        projects.TryGetValue(id, out var revisions)
-            ? new OpenedProject(id, revisions.Count, time.GetUtcNow(), revisions[^1])
+    /// <summary>A deletion by somebody else.</summary>
+    public void DeleteByAnother(Guid id) => deleted.Add(id);
+
+    private Task<StoredProject?> OpenAsync(Guid id) => Task.FromResult(
+        projects.TryGetValue(id, out var revisions) && !deleted.Contains(id)
+            ? new StoredProject(id, revisions.Count, time.GetUtcNow(), revisions[^1])
             : null);
 
     private Task<SaveOutcome> SaveAsync(Guid id, int openedRevision, Project project)
@@ -38,15 +44,22 @@ public sealed class MemoryStore(TimeProvider time)
             return Task.FromException<SaveOutcome>(Failure);
         }
 
-        var revisions = projects[id];
-        var accepted = openedRevision == revisions.Count;
-        if (accepted)
+        if (deleted.Contains(id))
         {
-            revisions.Add(project);
+            return Task.FromResult<SaveOutcome>(new ProjectGone());
         }
 
-        return Task.FromResult(new SaveOutcome(accepted, revisions.Count, time.GetUtcNow()));
+        var revisions = projects[id];
+        if (openedRevision != revisions.Count)
+        {
+            return Task.FromResult<SaveOutcome>(new SaveConflict(new StoredProject(id, revisions.Count, time.GetUtcNow(), revisions[^1])));
+        }
+
+        revisions.Add(project);
+        return Task.FromResult<SaveOutcome>(new ProjectSaved(revisions.Count, time.GetUtcNow()));
     }
 
-    private async Task<OpenedProject> CreateAsync(Project project) => (await OpenAsync(Put(project)))!;
+    private Task<bool> RestoreAsync(Guid id) => Task.FromResult(deleted.Remove(id));
+
+    private async Task<StoredProject> CreateAsync(Project project) => (await OpenAsync(Put(project)))!;
 }
