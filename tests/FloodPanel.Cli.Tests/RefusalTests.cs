@@ -60,7 +60,7 @@ public class RefusalTests
     [InlineData("site.waterDensity", "\"salt\"", "site.waterDensity: The value is \"salt\"; allowed is a finite number.")]
     [InlineData("openings[0].barrier.logs.count", "0", "openings[0].barrier.logs.count: Number of logs is 0; allowed is 1 to 100.")]
     [InlineData("openings[0].barrier.logs.count", "true", "openings[0].barrier.logs.count: The value is true; allowed is a whole number from 1 to 100.")]
-    [InlineData("openings[1].rake", "75", "openings[1].rake: Rake is 75.0°; allowed is 0.0° to 60.0°.")]
+    [InlineData("openings[1].rake", "75", "openings[1].rake: Rake is 75°; allowed is 0.0° to 60.0°.")]
     [InlineData("openings[0].wall.kind", "\"glass\"", "openings[0].wall.kind: The value is \"glass\"; allowed is \"reinforced-concrete\", \"masonry\", \"cavity-masonry\", \"timber-frame\" or \"steel-frame\".")]
     public void Check_WrongValue_NamesPathValueAndWhatIsAllowed(string path, string json, string expected)
     {
