@@ -52,6 +52,9 @@ public static class StoreSetup
         {
             DataSource = Path.Combine(folder, FileName),
             ForeignKeys = true,
+
+            // Seconds that a command waits for another writer before it fails.
+            DefaultTimeout = 10,
         };
         builder.UseSqlite(connection.ConnectionString).AddInterceptors(ConnectionSettings.Instance);
     }

@@ -153,6 +153,20 @@ public sealed class ProjectStoreTests : IDisposable
     }
 
     [Fact]
+    public async Task Save_DatabaseThatFails_IsToldInASentence()
+    {
+        var created = await Store.CreateAsync(Example.Full, Stop);
+        folder.Execute("CREATE TRIGGER full BEFORE INSERT ON Revisions BEGIN SELECT RAISE(ABORT, 'disk is full'); END");
+
+        var refusal = await Assert.ThrowsAsync<StoreException>(
+            () => Store.SaveAsync(created.Id, 1, Example.Full with { Reference = "lost" }, Stop));
+
+        Assert.StartsWith("The database does not answer (", refusal.Message);
+        Assert.Contains("disk is full", refusal.Message, StringComparison.Ordinal);
+        Assert.Equal(created, await Store.OpenAsync(created.Id, Stop));
+    }
+
+    [Fact]
     public async Task Duplicate_Project_IsASeparateProjectAtRevision1()
     {
         var created = await Store.CreateAsync(Example.Full, Stop);
