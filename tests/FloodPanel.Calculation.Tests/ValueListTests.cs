@@ -1,5 +1,3 @@
-using Barrier = FloodPanel.Calculation.ProjectTree.Barrier;
-
 namespace FloodPanel.Calculation.Tests;
 
 public class ValueListTests

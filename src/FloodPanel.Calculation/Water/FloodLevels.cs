@@ -14,10 +14,10 @@ public static class FloodLevels
     /// <param name="level">Water level [m, project datum].</param>
     /// <param name="sillLevel">Sill level [m, project datum].</param>
     /// <remarks>
-    /// Rounded to 1e-9 m. Levels are sums of decimals, and the noise of their binary fractions must not decide
+    /// Rounded to 1e-10 m. Levels are sums of decimals, and the noise of their binary fractions must not decide
     /// whether water stands as high as a sill or as the water behind it. Adding zero makes a negative zero positive.
     /// </remarks>
-    public static double Depth(double level, double sillLevel) => Math.Round(level - sillLevel, 9) + 0.0;
+    public static double Depth(double level, double sillLevel) => Math.Round(level - sillLevel, 10) + 0.0;
 
     /// <summary>Working of the design flood level of a site.</summary>
     /// <param name="site">The site.</param>
