@@ -92,7 +92,8 @@ public static class PaperTheme
             Body1 = new Body1Typography { FontFamily = Family, FontSize = "0.9375rem", LineHeight = "1.4", LetterSpacing = "0" },
             Body2 = new Body2Typography { FontFamily = Family, FontSize = "0.875rem", LineHeight = "1.4", LetterSpacing = "0" },
             Caption = new CaptionTypography { FontFamily = Family, FontSize = "0.8125rem", LineHeight = "1.35", LetterSpacing = "0" },
-            Subtitle1 = new Subtitle1Typography { FontFamily = Family, FontSize = "0.9375rem", FontWeight = "600", LetterSpacing = "0" },
+            // Inputs take their type from this one.
+            Subtitle1 = new Subtitle1Typography { FontFamily = Family, FontSize = "0.9375rem", FontWeight = "400", LetterSpacing = "0" },
             Subtitle2 = new Subtitle2Typography { FontFamily = Family, FontSize = "0.875rem", FontWeight = "600", LetterSpacing = "0" },
             H5 = new H5Typography { FontFamily = Family, FontSize = "1.375rem", FontWeight = "600", LetterSpacing = "0" },
             H6 = new H6Typography { FontFamily = Family, FontSize = "1.0625rem", FontWeight = "600", LetterSpacing = "0" },

@@ -2,6 +2,7 @@ using FloodPanel.Storage;
 using FloodPanel.Web.Editing;
 using FloodPanel.Web.Pages.Projects;
 using Microsoft.AspNetCore.DataProtection;
+using MudBlazor;
 using MudBlazor.Services;
 
 namespace FloodPanel.Web.Startup;
@@ -11,7 +12,16 @@ public static class FloodPanelServices
     public static void AddFloodPanel(this IServiceCollection services, Office office)
     {
         services.AddRazorComponents().AddInteractiveServerComponents();
-        services.AddMudServices(options => options.SnackbarConfiguration.PositionClass = "mud-snackbar-location-bottom-left");
+        services.AddMudServices(options =>
+        {
+            var notes = options.SnackbarConfiguration;
+            notes.PositionClass = Defaults.Classes.Position.BottomLeft;
+            (notes.ShowTransitionDuration, notes.HideTransitionDuration) = (100, 100);
+            // Long enough to read it, think, and undo.
+            notes.VisibleStateDuration = 8000;
+            notes.MaximumOpacity = 100;
+            notes.HideIcon = true;
+        });
         services.AddFloodPanelStorage(office.DataFolder);
         services.AddSingleton(office.Library);
         services.AddSingleton<OpenEditors>();

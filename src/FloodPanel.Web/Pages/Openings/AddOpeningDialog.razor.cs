@@ -12,6 +12,7 @@ public sealed partial class AddOpeningDialog
     private double? sillLevel;
     private double? clearWidth;
     private double? clearHeight;
+    private bool tried;
 
     [Inject]
     public required Library Library { get; init; }
@@ -44,6 +45,25 @@ public sealed partial class AddOpeningDialog
         if (Proposal is { } opening)
         {
             Dialog.Close(opening);
+        }
+
+        tried = true;
+    }
+
+    private string Missing
+    {
+        get
+        {
+            var missing = new[]
+            {
+                name.Trim().Length == 0 ? "a name" : null,
+                sillLevel is null ? "the sill level" : null,
+                clearWidth is null ? "the clear width" : null,
+                clearHeight is null ? "the clear height" : null,
+            }.OfType<string>().ToArray();
+            return missing.Length == 0
+                ? "Put right what is marked, then add the opening."
+                : $"Still needed: {string.Join(", ", missing)}.";
         }
     }
 

@@ -1,3 +1,4 @@
+using FloodPanel.Calculation;
 using Microsoft.AspNetCore.Components;
 using MudBlazor;
 
@@ -6,6 +7,7 @@ namespace FloodPanel.Web.Pages.Projects;
 public sealed partial class NewProjectDialog
 {
     private string name = "";
+    private Sentence? problem;
 
     [CascadingParameter]
     public required IMudDialogInstance Dialog { get; set; }
@@ -15,6 +17,10 @@ public sealed partial class NewProjectDialog
         if (name.Trim() is { Length: > 0 } given)
         {
             Dialog.Close(given);
+        }
+        else
+        {
+            problem = new($"Project name is empty; give the project a name.");
         }
     }
 }

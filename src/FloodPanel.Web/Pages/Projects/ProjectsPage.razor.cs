@@ -32,6 +32,8 @@ public sealed partial class ProjectsPage
     [Inject]
     public required IJSRuntime JS { get; init; }
 
+    private bool IsEmpty => rows.Count == 0 && search.Length == 0;
+
     private IReadOnlyList<ProjectSummary> Sorted => order.Sort(rows);
 
     protected override Task OnInitializedAsync() => LoadAsync();
