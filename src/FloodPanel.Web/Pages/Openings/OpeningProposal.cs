@@ -8,7 +8,7 @@ namespace FloodPanel.Web.Pages.Openings;
 
 /// <summary>
 /// A barrier to begin with for a new opening: hollow aluminium logs up to the required top, steel tube posts where
-/// the opening is wide, each the lightest of the library of which no check fails. The engineer changes it on the Bench.
+/// the opening is wide: the lightest stack of the library, and the lightest posts, of which no check fails. The engineer changes it on the Bench.
 /// </summary>
 public static class OpeningProposal
 {
@@ -43,9 +43,10 @@ public static class OpeningProposal
         var height = new Quantity(barrier.Logs.Count * (library.Find(barrier.Logs.Profile)?.Height ?? 0), Dimension.Length);
         var log = barrier.Logs.Profile is LibraryProfile named ? library.Profiles[named.Id].Title : "log";
         var bay = new Quantity(barrier.Bays[0], Dimension.Length);
+        var posts = barrier.Bays.Count == 2 ? "1 post" : FormattableString.Invariant($"{barrier.Bays.Count - 1} posts");
         return barrier.Bays.Count == 1
             ? new($"Retained depth {depth}. Proposed: {barrier.Logs.Count} × {log}, {height} high, in one bay of {bay}.")
-            : new($"Retained depth {depth}. Proposed: {barrier.Logs.Count} × {log}, {height} high, in {barrier.Bays.Count} bays of {bay} with {barrier.Bays.Count - 1} posts between.");
+            : new($"Retained depth {depth}. Proposed: {barrier.Logs.Count} × {log}, {height} high, in {barrier.Bays.Count} bays of {bay} with {posts} between.");
     }
 
     /// <summary>An identifier made of a name, "garage-door", not used in the project yet.</summary>
@@ -81,14 +82,17 @@ public static class OpeningProposal
         IReadOnlyList<PostSet?> posts = bare.ClearWidth > WidestBay && postMaterial is not null
             ? [.. ByMass<RectangularTube>(library).Select(p => PostsOf(postMaterial, p))]
             : [null];
-        foreach (var log in logMaterial is null ? [] : ByMass<HollowRectangle>(library))
+        if (logMaterial is null)
         {
-            var logs = new LogStack
-            {
-                Material = logMaterial!,
-                Profile = new LibraryProfile(log.Id),
-                Count = CountFor(project.Site, bare.SillLevel, log.Item.Height),
-            };
+            yield break;
+        }
+
+        var stacks = ByMass<HollowRectangle>(library)
+            .Select(log => (Log: log, Count: CountFor(project.Site, bare.SillLevel, log.Item.Height)))
+            .OrderBy(stack => stack.Count * SectionProperties.Of(stack.Log.Item).Area);
+        foreach (var (log, count) in stacks)
+        {
+            var logs = new LogStack { Material = logMaterial, Profile = new LibraryProfile(log.Id), Count = count };
             foreach (var post in posts)
             {
                 yield return bare with { Barrier = new Barrier { Logs = logs, Posts = post, Bays = BaysFor(bare.ClearWidth, post?.Width) } };
