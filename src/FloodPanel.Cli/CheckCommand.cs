@@ -19,7 +19,10 @@ internal static class CheckCommand
 
         var result = Design.Run(project, library);
         output.Write(ResultWriter.Write(result));
-        return result.Openings.All(o => o.Verdict.Kind == VerdictKind.Adequate) ? ExitCode.Adequate : ExitCode.NotAdequate;
+
+        // Without an opening nothing was shown to be adequate.
+        var allAdequate = result.Openings.Count > 0 && result.Openings.All(o => o.Verdict.Kind == VerdictKind.Adequate);
+        return allAdequate ? ExitCode.Adequate : ExitCode.NotAdequate;
     }
 
     private static Project Open(string path)

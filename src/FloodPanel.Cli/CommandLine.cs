@@ -12,7 +12,8 @@ internal static class CommandLine
           check FILE   calculates every opening of a project file and writes one JSON object to standard output
           --help       shows this text
 
-        exit code: 0 every opening is adequate, 1 one is inadequate or incomplete, 2 the file cannot be calculated
+        exit code: 0 every opening is adequate, 1 one is inadequate or incomplete (or there is none), 2 the file
+        cannot be calculated; one line on standard error then names the field and what is wrong with it
 
         The result is a calculation aid. It must be checked by a licensed engineer and follow local codes. A barrier can
         fail or be overtopped: people leave when told to.

@@ -6,7 +6,7 @@ internal static class ExitCode
     /// <summary>Every opening is adequate.</summary>
     public const int Adequate = 0;
 
-    /// <summary>An opening is inadequate or incomplete.</summary>
+    /// <summary>An opening is inadequate or incomplete, or there is none.</summary>
     public const int NotAdequate = 1;
 
     /// <summary>Nothing could be calculated; one line on standard error says why.</summary>

@@ -47,6 +47,17 @@ public class CheckTests
     }
 
     [Fact]
+    public void Check_ProjectWithoutOpenings_Returns1()
+    {
+        using var file = new ProjectOnDisk(project => project["openings"] = new JsonArray());
+
+        var run = Invocation.Of("check", file.Path);
+
+        Assert.Equal((1, ""), (run.ExitCode, run.Errors));
+        Assert.Empty(run.Result["openings"]!.AsArray());
+    }
+
+    [Fact]
     public void Check_Result_HasTheNamesOfTheFormat()
     {
         var opening = Invocation.Of("check", Invocation.Sample("sample-project.json")).Result["openings"]![0]!;
