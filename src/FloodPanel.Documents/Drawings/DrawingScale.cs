@@ -33,11 +33,34 @@ public static class DrawingScale
 /// <param name="OriginX">Where x = 0 stands on the sheet [mm].</param>
 /// <param name="SillY">Where z = 0 stands on the sheet [mm].</param>
 /// <param name="PerMetre">Millimetres on the sheet for a metre.</param>
-internal readonly record struct Projection(double OriginX, double SillY, double PerMetre)
+/// <param name="Cut">The stretch of x that is left out, or null.</param>
+internal readonly record struct Projection(double OriginX, double SillY, double PerMetre, BayCut? Cut = null)
 {
-    public double X(double x) => OriginX + x * PerMetre;
+    public double X(double x)
+    {
+        if (Cut is not { } cut || x <= cut.FromX)
+        {
+            return OriginX + x * PerMetre;
+        }
+
+        var along = Math.Min(1, (x - cut.FromX) / (cut.ToX - cut.FromX));
+        return OriginX + cut.FromX * PerMetre + along * cut.Gap + Math.Max(0, x - cut.ToX) * PerMetre;
+    }
 
     public double Y(double z) => SillY - z * PerMetre;
 
     public SheetPoint At(double x, double z) => new(X(x), Y(z));
+}
+
+/// <summary>Bays left out of the elevation of a long barrier, so that the others can be seen.</summary>
+/// <param name="First">First bay left out, from 0.</param>
+/// <param name="Last">Last bay left out, from 0.</param>
+/// <param name="FromX">Where the stretch left out begins [m].</param>
+/// <param name="ToX">Where it ends [m].</param>
+/// <param name="Gap">Width of the break on the sheet [mm].</param>
+internal sealed record BayCut(int First, int Last, double FromX, double ToX, double Gap)
+{
+    public int Count => Last - First + 1;
+
+    public bool Omits(int bay) => bay >= First && bay <= Last;
 }

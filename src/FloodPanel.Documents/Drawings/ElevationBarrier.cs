@@ -7,31 +7,17 @@ internal static class ElevationBarrier
 {
     private const double LeastLog = 1.2;
 
-    /// <summary>Left edge and width of each bay [m] from the left reveal.</summary>
-    public static IReadOnlyList<(double Left, double Width)> Bays(DrawingInput input)
-    {
-        var left = 0.0;
-        var bays = new List<(double, double)>();
-        foreach (var width in input.Barrier.Bays)
-        {
-            bays.Add((left, width));
-            left += width + (input.Barrier.Posts?.Width ?? 0);
-        }
-
-        return bays;
-    }
-
     public static void Draw(Sketch sketch, DrawingInput input, ElevationLayout layout)
     {
         var view = layout.Projection;
         var (top, sill) = (layout.Shown(input.Result.BarrierHeight), view.SillY);
-        var bays = Bays(input);
-        for (var bay = 0; bay < bays.Count; bay++)
+        var bays = ElevationBays.Of(input);
+        foreach (var bay in Shown(bays.Count, view.Cut))
         {
             DrawLogs(sketch, input, view, bays[bay], bay + 1, top);
         }
 
-        for (var post = 1; post < bays.Count; post++)
+        foreach (var post in ShownPosts(bays.Count, view.Cut))
         {
             var (left, right) = (view.X(bays[post - 1].Left + bays[post - 1].Width), view.X(bays[post].Left));
             var number = post.ToString(CultureInfo.InvariantCulture);
@@ -52,7 +38,9 @@ internal static class ElevationBarrier
         var pitch = (view.SillY - layout.Shown(input.Result.BarrierHeight)) / input.LogCount;
         var size = Math.Min(sketch.Sheet.SmallText, 0.92 * sketch.Sheet.TextSize);
         var widest = Sketch.Width(input.LogCount.ToString(CultureInfo.InvariantCulture), size, TextRole.Normal);
-        foreach (var (left, width) in Bays(input).Take(4))
+        var bays = ElevationBays.Of(input);
+        var (low, high) = (view.SillY - 0.5 * size, view.SillY - input.LogCount * pitch + 0.5 * size);
+        foreach (var (left, width) in Shown(bays.Count, view.Cut).Select(bay => bays[bay]))
         {
             if (width * view.PerMetre < widest + 0.8)
             {
@@ -61,13 +49,21 @@ internal static class ElevationBarrier
 
             foreach (var number in Numbered(input.LogCount, pitch, 1.25 * size))
             {
-                var y = view.SillY - (number - 0.5) * pitch + 0.33 * size;
+                var y = Math.Clamp(view.SillY - (number - 0.5) * pitch, Math.Min(high, low), low) + 0.33 * size;
                 sketch.Add(new Text(
                     number.ToString(CultureInfo.InvariantCulture), new(view.X(left + width / 2), y), size,
                     TextAnchor.Middle, TextRole.Normal));
             }
         }
     }
+
+    /// <summary>The bays that are drawn, from 0.</summary>
+    public static IEnumerable<int> Shown(int count, BayCut? cut) =>
+        Enumerable.Range(0, count).Where(bay => cut is null || !cut.Omits(bay));
+
+    /// <summary>The posts that are drawn, from 1; a post stands on each side of a break.</summary>
+    public static IEnumerable<int> ShownPosts(int bays, BayCut? cut) =>
+        Enumerable.Range(1, bays - 1).Where(post => cut is null || post <= cut.First || post > cut.Last);
 
     private static void DrawLogs(
         Sketch sketch, DrawingInput input, Projection view, (double Left, double Width) bay, int number, double top)
@@ -102,7 +98,7 @@ internal static class ElevationBarrier
         MarkKind.Guide, $"Guide, {side}", null, $"guide-{side}",
         [Sketch.Box(left, top, right, bottom, FillRole.Post, LineRole.Outline)]);
 
-    /// <summary>The logs that get a number: all, or the first, the last and every few between.</summary>
+    /// <summary>The logs that get a number: all, or the first and every few from there.</summary>
     internal static IEnumerable<int> Numbered(int count, double pitch, double spacing)
     {
         int[] steps = [1, 2, 5, 10, 20, 50, 100];
@@ -114,9 +110,13 @@ internal static class ElevationBarrier
 
         for (var number = 1; number <= count; number++)
         {
-            var isRound = step == 1 || (number % step == 0 && (count - number) * pitch >= spacing && (number - 1) * pitch >= spacing);
-            var isEnd = number == 1 || (number == count && (count - 1) * pitch >= spacing);
-            if (isRound || isEnd)
+            var isRound = step switch
+            {
+                1 => true,
+                2 => number % 2 == 1,
+                _ => number % step == 0 && (number - 1) * pitch >= spacing,
+            };
+            if (isRound || number == 1)
             {
                 yield return number;
             }

@@ -11,56 +11,44 @@ internal static class ElevationDimensions
         DrawHeights(sketch, input, layout);
     }
 
-    /// <summary>Draws bays and posts; false when some bay is too narrow for its figure.</summary>
+    /// <summary>Draws bays and posts; false when a bay stands without its figure.</summary>
     private static bool DrawChain(Sketch sketch, DrawingInput input, ElevationLayout layout, double y)
     {
-        var (sheet, view) = (sketch.Sheet, layout.Projection);
-        var bays = ElevationBarrier.Bays(input);
-        var narrowest = bays.Min(b => b.Width) * view.PerMetre;
-        var fits = bays.All(b => Sketch.Width(input.Length(b.Width), sheet.TextSize, TextRole.Normal) <= narrowest - 1);
-        var edge = layout.Bottom + 1.9;
-        var lastFigureEnd = double.NegativeInfinity;
-        for (var i = 0; i < bays.Count; i++)
+        var view = layout.Projection;
+        var bays = ElevationBays.Of(input);
+        var chain = new Chain(sketch.Sheet, y, layout.Bottom + 1.9);
+        foreach (var i in ElevationBarrier.Shown(bays.Count, view.Cut))
         {
-            var (left, right) = (view.X(bays[i].Left), view.X(bays[i].Left + bays[i].Width));
-            var name = FormattableString.Invariant($"Bay {i + 1}, {input.LengthWithUnit(bays[i].Width)}");
-            string[] figures = fits || bays.Count == 1 ? [input.Length(bays[i].Width)] : [];
-            var overflow = bays.Count == 1 ? Overflow.After : Overflow.Omit;
-            sketch.Add(DimensionMarks.Horizontal(
-                sheet, new DimensionLabel(FieldKeys.Bay(i), name, figures, overflow), left, right, y, edge));
-            if (i > 0)
+            if (i > 0 && (view.Cut is null || i != view.Cut.Last + 1))
             {
-                lastFigureEnd = DrawPostWidth(sketch, input, view.X(bays[i - 1].Left + bays[i - 1].Width), left, y, lastFigureEnd, i);
+                AddPost(sketch, input, chain, view, bays, i);
             }
+
+            var name = FormattableString.Invariant($"Bay {i + 1}, {input.LengthWithUnit(bays[i].Width)}");
+            sketch.Add(chain.Link(
+                FieldKeys.Bay(i), name, input.Length(bays[i].Width), view.X(bays[i].Left), view.X(bays[i].Left + bays[i].Width)));
         }
 
-        return fits;
+        if (view.Cut is { } cut)
+        {
+            AddPost(sketch, input, chain, view, bays, cut.First);
+            AddPost(sketch, input, chain, view, bays, cut.Last + 1);
+            var words = FormattableString.Invariant($"{cut.Count} bays");
+            sketch.Add(new Text(
+                words, new((view.X(cut.FromX) + view.X(cut.ToX)) / 2, y - 0.3 * sketch.Sheet.TextSize), sketch.Sheet.SmallText,
+                TextAnchor.Middle, TextRole.Muted));
+        }
+
+        return chain.IsComplete;
     }
 
-    /// <summary>Posts are narrower than their figure: it stands below the line, where it does not meet the last one.</summary>
-    private static double DrawPostWidth(
-        Sketch sketch, DrawingInput input, double left, double right, double y, double lastFigureEnd, int post)
+    private static void AddPost(
+        Sketch sketch, DrawingInput input, Chain chain, Projection view, IReadOnlyList<(double Left, double Width)> bays, int post)
     {
-        var sheet = sketch.Sheet;
         var width = input.Barrier.Posts?.Width ?? 0;
-        var figure = input.Length(width);
-        var half = Sketch.Width(figure, sheet.SmallText, TextRole.Normal) / 2;
-        var middle = (left + right) / 2;
-        List<Shape> parts =
-        [
-            Sketch.Box(left, y, right, y + sheet.TextSize, FillRole.Reach, null),
-            Sketch.Stroke(left, y, right, y, LineRole.Dimension),
-        ];
-        if (middle - half > lastFigureEnd + 1)
-        {
-            lastFigureEnd = middle + half;
-            parts.Add(new Text(
-                figure, new(middle, y + 0.5 + 0.8 * sheet.SmallText), sheet.SmallText, TextAnchor.Middle, TextRole.Normal));
-        }
-
+        var left = bays[post - 1].Left + bays[post - 1].Width;
         var name = FormattableString.Invariant($"Post {post}, width {input.LengthWithUnit(width)}");
-        sketch.Add(new Mark(MarkKind.Dimension, name, FieldKeys.PostWidth, null, parts));
-        return lastFigureEnd;
+        sketch.Add(chain.SmallLink(FieldKeys.PostWidth, name, input.Length(width), view.X(left), view.X(left + width)));
     }
 
     private static void DrawClearWidth(Sketch sketch, DrawingInput input, ElevationLayout layout, double y, bool chainFits)
@@ -69,7 +57,7 @@ internal static class ElevationDimensions
         var width = input.Length(input.Opening.ClearWidth);
         var bays = input.Barrier.Bays;
         var areEqual = bays.All(b => input.Length(b) == input.Length(bays[0]));
-        string[] figures = chainFits || bays.Count == 1
+        string[] figures = (chainFits && view.Cut is null) || bays.Count == 1
             ? [width]
             : areEqual
                 ? [FormattableString.Invariant($"{width}, {bays.Count} bays of {input.Length(bays[0])}"), width]

@@ -17,6 +17,7 @@ public static class ElevationDrawing
         ElevationBarrier.Draw(sketch, input, layout);
         DrawWater(sketch, input, layout);
         DrawGround(sketch, input, layout);
+        DrawBreak(sketch, layout);
         ElevationBarrier.DrawNumbers(sketch, input, layout);
         ElevationDimensions.Draw(sketch, input, layout);
         var columnTop = Math.Min(layout.Top, layout.Bottom - 5.5 * 1.32 * paper.TextSize);
@@ -30,9 +31,9 @@ public static class ElevationDrawing
 
     private static Level[] Levels(DrawingInput input, Func<double, double> y)
     {
-        var sill = input.Opening.SillLevel;
+        var reach = ElevationLayout.Reach(input);
         Level Mark(double z, string name, string? field, bool isWater = false) =>
-            new(y(z), input.Length(sill + z), name, field, isWater);
+            LevelMarks.Level(input, reach, y, z, name, field, isWater);
         return
         [
             Mark(input.RequiredHeight, "required top", FieldKeys.Freeboard),
@@ -83,6 +84,20 @@ public static class ElevationDrawing
             : Sketch.Box(leftReveal, head, rightReveal, view.SillY, null, LineRole.Outline));
         sketch.Add(BreakLine(layout.Left, layout.Top, layout.Bottom));
         sketch.Add(BreakLine(layout.Right, layout.Top, layout.Bottom));
+    }
+
+    /// <summary>A blank strip between two break lines, where bays are left out.</summary>
+    private static void DrawBreak(Sketch sketch, ElevationLayout layout)
+    {
+        if (layout.Projection.Cut is not { } cut)
+        {
+            return;
+        }
+
+        var (left, right) = (layout.Projection.X(cut.FromX), layout.Projection.X(cut.ToX));
+        sketch.Add(Sketch.Box(left + 0.4, layout.Top - 0.2, right - 0.4, layout.Bottom + 1.7, FillRole.Paper, null));
+        sketch.Add(BreakLine(left + 0.4, layout.Top, layout.Bottom + 1.6));
+        sketch.Add(BreakLine(right - 0.4, layout.Top, layout.Bottom + 1.6));
     }
 
     private static Polyline BreakLine(double x, double top, double bottom)

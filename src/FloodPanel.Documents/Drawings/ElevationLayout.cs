@@ -37,16 +37,21 @@ internal sealed record ElevationLayout
     /// <summary>Sheet y kept inside the view.</summary>
     public double Shown(double z) => Math.Clamp(Projection.Y(z), Top, Bottom);
 
+    /// <summary>Lowest and highest z that is drawn [m], apart from the head of the opening; what lies beyond is off scale.</summary>
+    public static (double Low, double High) Reach(DrawingInput input)
+    {
+        var extent = Math.Max(input.Result.BarrierHeight, input.Opening.ClearHeight);
+        var highest = Math.Max(Math.Max(input.FloodHeight, input.RequiredHeight), input.GroundHeight);
+        var high = Math.Min(Math.Max(input.Result.BarrierHeight, highest), 1.6 * extent);
+        return (Math.Clamp(Math.Min(0, input.GroundHeight), -extent, 0), high);
+    }
+
     public static ElevationLayout For(DrawingInput input, Sheet sheet, double levelColumn)
     {
         var u = sheet.TextSize;
         var opening = input.Opening;
-        var extent = Math.Max(input.Result.BarrierHeight, opening.ClearHeight);
-        var needed = Math.Min(
-            Math.Max(input.Result.BarrierHeight, Math.Max(input.FloodHeight, input.RequiredHeight)), 1.6 * extent);
-        var ground = Math.Clamp(input.GroundHeight, -extent, 1.3 * extent);
-        var low = Math.Min(0, ground);
-        needed = Math.Max(needed, ground);
+        var (low, needed) = Reach(input);
+        var ground = Math.Clamp(input.GroundHeight, low, needed);
 
         var (pier, lintel, head) = (2.4 * u, 1.6 * u, sheet.Margin + 2.0 * u);
         var dimensions = 2 * sheet.Row + 0.4 * u;
@@ -58,21 +63,24 @@ internal sealed record ElevationLayout
         var wholeScale = DrawingScale.Fit(opening.ClearWidth, whole - low, roomWide, roomHigh);
         var cutScale = DrawingScale.Fit(opening.ClearWidth, cut - low, roomWide, roomHigh);
         var broken = cutScale < wholeScale && cut < 0.85 * opening.ClearHeight;
-        var scale = broken ? cutScale : wholeScale;
         var high = broken ? cut : whole;
+        var bayCut = ElevationBays.Cut(input, high - low, roomWide, roomHigh, 3.4 * u);
+        var width = opening.ClearWidth - (bayCut is null ? 0 : bayCut.ToX - bayCut.FromX);
+        var gap = bayCut?.Gap ?? 0;
+        var scale = DrawingScale.Fit(width, high - low, roomWide - gap, roomHigh);
 
         var perMetre = DrawingScale.PerMetre(scale);
         var content = Math.Max((high - low) * perMetre, 6 * 1.32 * u - lintel);
         var height = sheet.Trim ? Math.Min(sheet.Height, head + lintel + content + foot) : sheet.Height;
         var spareHigh = Math.Max(0, height - head - lintel - foot - (high - low) * perMetre);
-        var spareWide = Math.Max(0, roomWide - opening.ClearWidth * perMetre);
+        var spareWide = Math.Max(0, roomWide - gap - width * perMetre);
         var left = sheet.Margin + dimensions + spareWide / 2;
         var top = head + spareHigh / 2;
         return new ElevationLayout
         {
             Sheet = sheet,
             Scale = scale,
-            Projection = new Projection(left + pier, top + lintel + high * perMetre, perMetre),
+            Projection = new Projection(left + pier, top + lintel + high * perMetre, perMetre, bayCut),
             Height = height,
             Pier = pier,
             IsBroken = broken,
@@ -80,7 +88,7 @@ internal sealed record ElevationLayout
             Top = top,
             Bottom = top + lintel + (high - low) * perMetre,
             Left = left,
-            Right = left + 2 * pier + opening.ClearWidth * perMetre,
+            Right = left + 2 * pier + gap + width * perMetre,
         };
     }
 

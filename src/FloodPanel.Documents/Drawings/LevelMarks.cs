@@ -13,6 +13,15 @@ internal static class LevelMarks
 {
     private const double Triangle = 1.9;
 
+    /// <summary>A level at a height; the name says so when it lies beyond what is drawn.</summary>
+    public static Level Level(
+        DrawingInput input, (double Low, double High) reach, Func<double, double> y, double z, string name, string? field,
+        bool isWater)
+    {
+        var isOff = z < reach.Low - 0.001 || z > reach.High + 0.001;
+        return new(y(z), input.Length(input.Opening.SillLevel + z), isOff ? $"{name}, off scale" : name, field, isWater);
+    }
+
     /// <summary>Width that the widest of the marks needs, triangle and leader included [mm].</summary>
     public static double ColumnWidth(Sheet sheet, IEnumerable<Level> levels) =>
         levels.Max(l => LabelWidth(sheet, l)) + Knee(sheet);

@@ -146,8 +146,8 @@ internal static class PressureFigure
                 Sketch.Stroke(tail, y, axis - 2, y, LineRole.Resultant),
                 new Polygon([new(axis, y), new(axis - 2.8, y - 1), new(axis - 2.8, y + 1)], FillRole.Ink, null),
                 new Text(
-                    "resultant", new(axis + 1.2, y - 1.35 * sheet.TextSize), sheet.SmallText, TextAnchor.Start, TextRole.Muted),
-                new Text(figure, new(axis + 1.2, y - 0.3 * sheet.TextSize), sheet.TextSize, TextAnchor.Start, TextRole.Strong),
+                    "resultant", new(axis + 1.2, y - 1.6 * sheet.TextSize), sheet.SmallText, TextAnchor.Start, TextRole.Muted),
+                new Text(figure, new(axis + 1.2, y - 0.55 * sheet.TextSize), sheet.TextSize, TextAnchor.Start, TextRole.Strong),
                 DimensionMarks.Vertical(sheet, height, view.SillY, y, axis + 0.85 * sheet.Row, axis + 0.6),
             ]);
     }

@@ -30,6 +30,7 @@ public static class SectionDrawing
 
         sketch.Add(stack.Logs(layout.Projection));
         SectionGround.DrawWater(sketch, input, layout, water, stack);
+        DrawTops(sketch, input, layout);
         SectionDimensions.Draw(sketch, input, layout, water);
         sketch.Add(LevelMarks.Column(
             paper, Levels(input, water, layout.Shown), layout.Left, -1,
@@ -46,12 +47,22 @@ public static class SectionDrawing
             title, Describe(input, loadCase), paper.Width, layout.Height, layout.Scale, sketch.Shapes, legend);
     }
 
-    private static List<Level> Levels(DrawingInput input, SectionWater water, Func<double, double> y)
+    /// <summary>Thin lines that carry the top of the barrier and the top required across to the barrier.</summary>
+    private static void DrawTops(Sketch sketch, DrawingInput input, SectionLayout layout)
     {
-        var sill = input.Opening.SillLevel;
+        foreach (var z in new[] { input.Result.BarrierHeight, input.RequiredHeight })
+        {
+            var y = layout.Shown(z);
+            sketch.Add(Sketch.Stroke(layout.Left, y, layout.BarrierRight, y, LineRole.Extension));
+        }
+    }
+
+    private static Level[] Levels(DrawingInput input, SectionWater water, Func<double, double> y)
+    {
+        var reach = SectionLayout.Reach(input, water);
         Level Mark(double z, string name, string? field, bool isWater = false) =>
-            new(y(z), input.Length(sill + z), name, field, isWater);
-        List<Level> levels =
+            LevelMarks.Level(input, reach, y, z, name, field, isWater);
+        return
         [
             Mark(input.RequiredHeight, "required top", FieldKeys.Freeboard),
             Mark(input.Result.BarrierHeight, "barrier top", FieldKeys.LogCount),
@@ -59,7 +70,6 @@ public static class SectionDrawing
             Mark(0, "sill", FieldKeys.SillLevel),
             Mark(input.GroundHeight, "outside ground", FieldKeys.GroundLevel),
         ];
-        return levels;
     }
 
     private static string Describe(DrawingInput input, CaseResult loadCase)

@@ -41,17 +41,21 @@ internal sealed record SectionLayout
 
     public double Shown(double z) => Math.Clamp(Projection.Y(z), Top, Bottom);
 
+    /// <summary>Lowest and highest z that is drawn [m]; what lies beyond is off scale.</summary>
+    public static (double Low, double High) Reach(DrawingInput input, SectionWater water)
+    {
+        var barrier = input.Result.BarrierHeight;
+        var highest = Math.Max(Math.Max(water.FloodSide ?? 0, input.RequiredHeight), input.GroundHeight);
+        return (Math.Clamp(Math.Min(0, input.GroundHeight), -1.2 * barrier, 0), Math.Clamp(highest, barrier, 2 * barrier));
+    }
+
     public static SectionLayout For(
         DrawingInput input, SectionWater water, CaseResult? pressures, Sheet sheet, double levelColumn)
     {
         var u = sheet.TextSize;
-        var result = input.Result;
         var stack = new LogSection(input);
-        var high = Math.Min(
-            Math.Max(Math.Max(result.BarrierHeight, water.FloodSide ?? 0), input.RequiredHeight), 2 * result.BarrierHeight);
-        var ground = Math.Clamp(input.GroundHeight, -1.2 * result.BarrierHeight, 1.6 * result.BarrierHeight);
-        var low = Math.Min(0, ground);
-        high = Math.Max(high, ground);
+        var (low, high) = Reach(input, water);
+        var ground = Math.Clamp(input.GroundHeight, low, high);
 
         var head = sheet.Margin + 2.2 * u + (pressures is null ? 0 : PressureFigure.LegendHeight(sheet, input, pressures));
         var foot = sheet.TitleHeight + 3.4 * u;
