@@ -53,6 +53,6 @@ internal sealed class Chain(Sheet sheet, double y, double edgeY)
         }
 
         below.Add((middle - half, middle + half));
-        return new Text(figure, new(middle, y + 0.5 + 0.8 * size), size, TextAnchor.Middle, TextRole.Normal);
+        return new Text(figure, new(middle, y + 1.15 + 0.72 * size), size, TextAnchor.Middle, TextRole.Normal);
     }
 }

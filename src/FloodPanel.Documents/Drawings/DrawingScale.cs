@@ -5,6 +5,9 @@ public static class DrawingScale
 {
     private static readonly int[] Denominators = [1, 2, 5, 10, 20, 25, 50, 100, 200, 500, 1000, 2000, 5000];
 
+    /// <summary>Room [mm] that may be missing: a sheet cut to the height of its drawing still holds it.</summary>
+    private const double Slack = 1e-6;
+
     /// <summary>n of the largest scale 1:n at which something fits; the smallest scale there is when none does.</summary>
     /// <param name="width">Width of the thing [m].</param>
     /// <param name="height">Height of the thing [m].</param>
@@ -15,7 +18,7 @@ public static class DrawingScale
         foreach (var denominator in Denominators)
         {
             var perMetre = PerMetre(denominator);
-            if (width * perMetre <= roomWide && height * perMetre <= roomHigh)
+            if (width * perMetre <= roomWide + Slack && height * perMetre <= roomHigh + Slack)
             {
                 return denominator;
             }

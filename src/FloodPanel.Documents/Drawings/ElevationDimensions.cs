@@ -16,6 +16,12 @@ internal static class ElevationDimensions
     {
         var view = layout.Projection;
         var bays = ElevationBays.Of(input);
+        if (bays.Count == 1)
+        {
+            DrawOnlyBay(sketch, input, layout, y);
+            return true;
+        }
+
         var chain = new Chain(sketch.Sheet, y, layout.Bottom + 1.9);
         foreach (var i in ElevationBarrier.Shown(bays.Count, view.Cut))
         {
@@ -42,6 +48,14 @@ internal static class ElevationDimensions
         return chain.IsComplete;
     }
 
+    private static void DrawOnlyBay(Sketch sketch, DrawingInput input, ElevationLayout layout, double y)
+    {
+        var (view, width) = (layout.Projection, input.Barrier.Bays[0]);
+        var label = new DimensionLabel(
+            FieldKeys.Bay(0), $"Bay 1, {input.LengthWithUnit(width)}", [input.Length(width)], Overflow.After);
+        sketch.Add(DimensionMarks.Horizontal(sketch.Sheet, label, view.X(0), view.X(width), y, layout.Bottom + 1.9));
+    }
+
     private static void AddPost(
         Sketch sketch, DrawingInput input, Chain chain, Projection view, IReadOnlyList<(double Left, double Width)> bays, int post)
     {
@@ -57,7 +71,7 @@ internal static class ElevationDimensions
         var width = input.Length(input.Opening.ClearWidth);
         var bays = input.Barrier.Bays;
         var areEqual = bays.All(b => input.Length(b) == input.Length(bays[0]));
-        string[] figures = (chainFits && view.Cut is null) || bays.Count == 1
+        string[] figures = chainFits && view.Cut is null
             ? [width]
             : areEqual
                 ? [FormattableString.Invariant($"{width}, {bays.Count} bays of {input.Length(bays[0])}"), width]

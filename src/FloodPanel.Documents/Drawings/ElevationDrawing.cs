@@ -9,10 +9,14 @@ public static class ElevationDrawing
     public static Scene Draw(DrawingInput input, Sheet? sheet = null)
     {
         var paper = sheet ?? Sheet.Bench;
+        return View(input, paper).On(paper, input, []);
+    }
+
+    internal static DrawnView View(DrawingInput input, Sheet paper)
+    {
         var columnWidth = LevelMarks.ColumnWidth(paper, Levels(input, _ => 0));
         var layout = ElevationLayout.For(input, paper, columnWidth);
         var sketch = new Sketch(paper);
-        sketch.Add(Sketch.Box(0, 0, paper.Width, layout.Height, FillRole.Paper, null));
         DrawWall(sketch, input, layout);
         ElevationBarrier.Draw(sketch, input, layout);
         DrawWater(sketch, input, layout);
@@ -23,8 +27,7 @@ public static class ElevationDrawing
         var columnTop = Math.Min(layout.Top, layout.Bottom - 5.5 * 1.32 * paper.TextSize);
         sketch.Add(LevelMarks.Column(
             paper, Levels(input, layout.Shown), layout.Right, 1, columnTop, layout.Bottom + 1.3 * paper.TextSize));
-        sketch.Add(TitleBlock.Draw(paper, layout.Height, input, Title, layout.Scale));
-        return new Scene(Title, Describe(input), paper.Width, layout.Height, layout.Scale, sketch.Shapes, []);
+        return new DrawnView(Title, Describe(input), layout.Scale, layout.Height, sketch.Shapes);
     }
 
     private const string Title = "Elevation from the flood side";

@@ -46,14 +46,22 @@ internal sealed record ElevationLayout
         return (Math.Clamp(Math.Min(0, input.GroundHeight), -extent, 0), high);
     }
 
+    /// <summary>The layout; less of the wall is shown where that makes room for a larger scale.</summary>
     public static ElevationLayout For(DrawingInput input, Sheet sheet, double levelColumn)
+    {
+        var wide = With(2.4 * sheet.TextSize, input, sheet, levelColumn);
+        var narrow = With(1.3 * sheet.TextSize, input, sheet, levelColumn);
+        return narrow.Scale < wide.Scale ? narrow : wide;
+    }
+
+    private static ElevationLayout With(double pier, DrawingInput input, Sheet sheet, double levelColumn)
     {
         var u = sheet.TextSize;
         var opening = input.Opening;
         var (low, needed) = Reach(input);
         var ground = Math.Clamp(input.GroundHeight, low, needed);
 
-        var (pier, lintel, head) = (2.4 * u, 1.6 * u, sheet.Margin + 2.0 * u);
+        var (lintel, head) = (1.6 * u, sheet.Margin + 2.0 * u);
         var dimensions = 2 * sheet.Row + 0.4 * u;
         var foot = 1.6 + DimensionRows(input, sheet) + sheet.TitleHeight + 0.7 * u;
         var roomWide = sheet.Width - 2 * sheet.Margin - dimensions - 2 * pier - levelColumn;

@@ -15,12 +15,17 @@ public static class SectionDrawing
     public static Scene Draw(DrawingInput input, string caseName, Sheet? sheet = null, bool withPressures = true)
     {
         var paper = sheet ?? Sheet.Bench;
-        var loadCase = input.Result.Cases.First(c => c.Name == caseName);
+        ActionKind[] legend = withPressures ? [.. Case(input, caseName).Actions.Select(a => a.Kind)] : [];
+        return View(input, caseName, paper, withPressures).On(paper, input, legend);
+    }
+
+    internal static DrawnView View(DrawingInput input, string caseName, Sheet paper, bool withPressures)
+    {
+        var loadCase = Case(input, caseName);
         var water = SectionWater.In(input, caseName);
         var columnWidth = LevelMarks.ColumnWidth(paper, Levels(input, water, _ => 0));
         var layout = SectionLayout.For(input, water, withPressures ? loadCase : null, paper, columnWidth);
         var sketch = new Sketch(paper);
-        sketch.Add(Sketch.Box(0, 0, paper.Width, layout.Height, FillRole.Paper, null));
         SectionGround.Draw(sketch, layout);
         var stack = new LogSection(input);
         if (stack.Post(layout.Projection) is { } post)
@@ -41,11 +46,12 @@ public static class SectionDrawing
         }
 
         var title = $"Section, {CaseNames.InWords(caseName)}";
-        sketch.Add(TitleBlock.Draw(paper, layout.Height, input, title, layout.Scale));
-        ActionKind[] legend = withPressures ? [.. loadCase.Actions.Select(a => a.Kind)] : [];
-        return new Scene(
-            title, Describe(input, loadCase), paper.Width, layout.Height, layout.Scale, sketch.Shapes, legend);
+        return new DrawnView(title, Describe(input, loadCase), layout.Scale, layout.Height, sketch.Shapes);
     }
+
+    private static CaseResult Case(DrawingInput input, string name) =>
+        input.Result.Cases.FirstOrDefault(c => c.Name == name)
+        ?? throw new ArgumentException($"The opening has no load case {name}.", nameof(name));
 
     /// <summary>Thin lines that carry the top of the barrier and the top required across to the barrier.</summary>
     private static void DrawTops(Sketch sketch, DrawingInput input, SectionLayout layout)

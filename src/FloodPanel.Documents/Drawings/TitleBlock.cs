@@ -6,21 +6,17 @@ namespace FloodPanel.Documents.Drawings;
 /// <summary>Frame and title block at the foot of a sheet.</summary>
 internal static class TitleBlock
 {
-    /// <summary>The frame, the block and the title of the view.</summary>
+    /// <summary>The frame and the block.</summary>
     /// <param name="sheet">The sheet.</param>
     /// <param name="height">Height of the sheet as drawn [mm].</param>
     /// <param name="input">The project, the opening, the revision and the units.</param>
-    /// <param name="viewTitle">Title of the view.</param>
-    /// <param name="scale">n in the scale 1:n.</param>
-    public static IEnumerable<Shape> Draw(Sheet sheet, double height, DrawingInput input, string viewTitle, int scale)
+    /// <param name="scale">The scale in words, "1:50".</param>
+    public static IEnumerable<Shape> Draw(Sheet sheet, double height, DrawingInput input, string scale)
     {
         var inset = 0.25;
         var top = height - sheet.TitleHeight;
         yield return Sketch.Box(inset, inset, sheet.Width - inset, height - inset, null, LineRole.Frame);
         yield return Sketch.Stroke(inset, top, sheet.Width - inset, top, LineRole.Dimension);
-        yield return new Text(
-            viewTitle, new(sheet.Margin, sheet.Margin + 0.75 * sheet.TextSize), sheet.TextSize, TextAnchor.Start, TextRole.Strong);
-
         var left = inset;
         foreach (var (heading, words, width) in Cells(sheet, input, scale))
         {
@@ -38,15 +34,15 @@ internal static class TitleBlock
         }
     }
 
-    private static IEnumerable<(string Heading, string Words, double Width)> Cells(Sheet sheet, DrawingInput input, int scale)
+    private static IEnumerable<(string Heading, string Words, double Width)> Cells(Sheet sheet, DrawingInput input, string scale)
     {
         var unit = Calculation.Units.Of(Dimension.Length, input.Units).Symbol;
-        var small = 4.6 * sheet.TextSize;
-        var names = sheet.Width - 0.5 - 3 * small;
+        double Small(string words) => Math.Max(4.6 * sheet.TextSize, 2.2 + Sketch.Width(words, sheet.TextSize, TextRole.Normal));
+        var names = sheet.Width - 0.5 - Small(scale) - Small(unit) - Small(input.Revision);
         yield return ("Project", input.Project.Name, 0.55 * names);
         yield return ("Opening", input.Opening.Name, 0.45 * names);
-        yield return ("Scale", FormattableString.Invariant($"1:{scale}"), small);
-        yield return ("Lengths", unit, small);
-        yield return ("Revision", input.Revision, small);
+        yield return ("Scale", scale, Small(scale));
+        yield return ("Lengths", unit, Small(unit));
+        yield return ("Revision", input.Revision, Small(input.Revision));
     }
 }

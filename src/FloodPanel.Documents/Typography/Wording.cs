@@ -56,4 +56,42 @@ public static class Wording
 
         return kept.Length == 0 ? "" : kept.ToString().TrimEnd() + Ellipsis;
     }
+
+    /// <summary>The text in lines that fit; words too long for a line are broken, what does not fit in the last line is cut.</summary>
+    /// <param name="text">The words.</param>
+    /// <param name="font">The font.</param>
+    /// <param name="size">Font size.</param>
+    /// <param name="width">Room, in the unit of the size.</param>
+    /// <param name="most">Greatest number of lines.</param>
+    public static IReadOnlyList<string> Lines(string text, FontFile font, double size, double width, int most = int.MaxValue)
+    {
+        var lines = new List<string>();
+        var rest = OneLine(text);
+        while (rest.Length > 0 && lines.Count < most)
+        {
+            var line = lines.Count == most - 1 ? Shorten(rest, font, size, width) : FirstLine(rest, font, size, width);
+            lines.Add(line);
+            rest = lines.Count == most ? "" : rest[line.Length..].TrimStart();
+        }
+
+        return lines;
+    }
+
+    private static string FirstLine(string text, FontFile font, double size, double width)
+    {
+        var (end, breakAt, used) = (0, 0, 0.0);
+        foreach (var rune in text.EnumerateRunes())
+        {
+            used += font.Width(rune.ToString(), size);
+            if (used > width && end > 0)
+            {
+                return text[..(breakAt > 0 && rune.Value != ' ' ? breakAt : end)].TrimEnd();
+            }
+
+            end += rune.Utf16SequenceLength;
+            breakAt = rune.Value is ' ' or '-' ? end : breakAt;
+        }
+
+        return text;
+    }
 }
