@@ -5,7 +5,7 @@ internal static class Spread
 {
     /// <summary>
     /// Places with at least the spacing between them and the least sum of squared moves (pooling neighbours that
-    /// violate the order), shifted as a whole into the range.
+    /// violate the order), within the range.
     /// </summary>
     /// <param name="wanted">Wanted places, ascending.</param>
     /// <param name="spacing">Least distance between two places.</param>
@@ -17,9 +17,7 @@ internal static class Spread
         var pools = new List<(double Sum, int Count)>();
         for (var i = 0; i < wanted.Count; i++)
         {
-            var room = most - (wanted.Count - 1 - i) * spacing;
-            var place = Math.Max(Math.Min(wanted[i], room), least + i * spacing);
-            pools.Add((place - i * spacing, 1));
+            pools.Add((wanted[i] - i * spacing, 1));
             while (pools.Count > 1 && Mean(pools[^2]) > Mean(pools[^1]))
             {
                 var merged = (pools[^2].Sum + pools[^1].Sum, pools[^2].Count + pools[^1].Count);
@@ -28,7 +26,12 @@ internal static class Spread
             }
         }
 
-        return [.. pools.SelectMany(p => Enumerable.Repeat(Mean(p), p.Count)).Select((offset, i) => offset + i * spacing)];
+        var last = most - (wanted.Count - 1) * spacing;
+        return
+        [
+            .. pools.SelectMany(p => Enumerable.Repeat(Math.Max(least, Math.Min(Mean(p), last)), p.Count))
+                .Select((offset, i) => offset + i * spacing),
+        ];
     }
 
     private static double Mean((double Sum, int Count) pool) => pool.Sum / pool.Count;
