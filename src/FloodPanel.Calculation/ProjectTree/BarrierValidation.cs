@@ -41,9 +41,10 @@ internal static class BarrierValidation
             return;
         }
 
+        var allowed = posts is null || Fields.PostWidth.Allows(posts.Width);
         for (var i = 0; i < bays.Count; i++)
         {
-            problems.CheckAt(Fields.BayWidth, bays[i], $"{path}.bays[{i}]");
+            allowed &= problems.CheckAt(Fields.BayWidth, bays[i], $"{path}.bays[{i}]");
         }
 
         if (bays.Count > 1 && posts is null)
@@ -52,9 +53,15 @@ internal static class BarrierValidation
             return;
         }
 
+        // A width that is refused itself says nothing about the sum.
+        if (!allowed || !Fields.ClearWidth.Allows(opening.ClearWidth))
+        {
+            return;
+        }
+
         var filled = bays.Sum() + (bays.Count - 1) * (posts?.Width ?? 0);
         var gap = Math.Abs(filled - opening.ClearWidth);
-        if (double.IsFinite(gap) && gap > FitTolerance + 1e-9)
+        if (gap > FitTolerance + 1e-9)
         {
             var differs = filled > opening.ClearWidth ? "more" : "less";
             problems.Add($"{path}.bays", $"Clear bays and posts add up to {Length(filled)}, {Section(gap)} {differs} than the clear width, {Length(opening.ClearWidth)}; allowed is a difference of {Section(FitTolerance)}.");
