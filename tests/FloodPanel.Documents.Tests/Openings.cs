@@ -13,6 +13,7 @@ internal static class Openings
         ["door"] = u => Sample.Input(Sample.Door, u),
         ["half-metre"] = u => Sample.Input(Sample.Gap(0.5, 1, 0.6, 2), u),
         ["tiny"] = u => Sample.Input(Sample.Gap(0.1, 1, 0.1, 1, 0.05), u),
+        ["slit"] = u => Sample.Input(Sample.Gap(0.3, 1, 12, 40), u),
         ["twenty-metres"] = u => Sample.Input(Sample.Gap(20, 12, 2.2, 6), u),
         ["hundred-metres"] = u => Sample.Input(Sample.Gap(100, 40, 2.2, 6), u),
         ["forty-logs"] = u => Sample.Input(Sample.Gap(2.4, 1, 6.5, 40, 0.15), u),

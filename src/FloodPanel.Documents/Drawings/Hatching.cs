@@ -136,10 +136,16 @@ internal static class Hatching
             {
                 var chance = Scatter(column, row);
                 var place = new SheetPoint((column + 0.2 + 0.6 * chance) * cell, (row + 0.2 + 0.6 * Scatter(row, column)) * cell);
-                var stone = chance > 0.72 ? Stone(place) : [new(place, place with { X = place.X + 0.14 })];
-                foreach (var piece in stone.SelectMany(side => PolygonCut.Inside(side, area)))
+                if (chance > 0.72)
                 {
-                    yield return piece;
+                    foreach (var piece in Stone(place).SelectMany(side => PolygonCut.Inside(side, area)))
+                    {
+                        yield return piece;
+                    }
+                }
+                else if (PolygonCut.Contains(area, place))
+                {
+                    yield return new Segment(place, place with { X = place.X + 0.14 });
                 }
             }
         }

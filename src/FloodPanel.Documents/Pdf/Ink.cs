@@ -4,7 +4,7 @@ using PdfSharp.Drawing;
 namespace FloodPanel.Documents.Pdf;
 
 /// <summary>Ink on paper: the light colours of the screen (css/app.css, css/drawing.css), on white.</summary>
-public static class Ink
+internal static class Ink
 {
     /// <summary>Lines and words.</summary>
     public const uint Black = 0x16202A;
