@@ -15,19 +15,19 @@ public sealed record Member(
     Material Material, SectionProperties Section, DesignStress? Bending, DesignStress? Shear, double DeflectionLimit)
 {
     /// <summary>E·I, bending stiffness [N·m²].</summary>
-    public double Stiffness { get; } = Material.ElasticModulus * Section.Inertia;
+    public double Stiffness => Material.ElasticModulus * Section.Inertia;
 
     /// <summary>M_R = W·f_b, moment resistance [N·m]; infinite when the stress is missing, see <see cref="IsComplete"/>.</summary>
-    public double MomentResistance { get; } = Bending is null ? double.PositiveInfinity : Section.Modulus * Bending.Value;
+    public double MomentResistance => Bending is null ? double.PositiveInfinity : Section.Modulus * Bending.Value;
 
     /// <summary>V_R = A_v·f_v, shear resistance [N]; infinite when the stress is missing, see <see cref="IsComplete"/>.</summary>
-    public double ShearResistance { get; } = Shear is null ? double.PositiveInfinity : Section.ShearArea * Shear.Value;
+    public double ShearResistance => Shear is null ? double.PositiveInfinity : Section.ShearArea * Shear.Value;
 
     /// <summary>Source of the bending check, as printed.</summary>
-    public string BendingSource { get; } = $"Elastic bending M/W; {Bending?.Source}";
+    public string BendingSource => $"Elastic bending M/W; {Bending?.Source}";
 
     /// <summary>Source of the shear check, as printed.</summary>
-    public string ShearSource { get; } = $"Shear over the shear area; {Shear?.Source}";
+    public string ShearSource => $"Shear over the shear area; {Shear?.Source}";
 
     /// <summary>True when both stresses are known, so that every check of the member has a result.</summary>
     public bool IsComplete => Bending is not null && Shear is not null;

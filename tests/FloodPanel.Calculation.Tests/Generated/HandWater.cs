@@ -1,0 +1,65 @@
+using MathNet.Numerics.Integration;
+
+namespace FloodPanel.Calculation.Tests.Generated;
+
+/// <summary>
+/// The pressure of a case written out as a plain function of height, and its integrals by Gauss's rule between the
+/// heights where it breaks: a second way to every resultant, which shares nothing with the pressure diagram.
+/// </summary>
+internal sealed class HandWater(Scenario scenario, string caseName)
+{
+    private readonly double unitWeight = scenario.Site.WaterDensity * 9.80665;
+    private readonly double height = scenario.Result.BarrierHeight;
+    private readonly double flood = caseName == "brim-full" ? scenario.Result.BarrierHeight : scenario.Result.RetainedDepth;
+    private readonly double behind = caseName == "brim-full" ? 0 : scenario.Result.ProtectedDepth;
+
+    public double FloodSide(double z) => unitWeight * Math.Max(0, flood - z);
+
+    public double ProtectedSide(double z) => unitWeight * Math.Max(0, behind - z);
+
+    public double Flow(double z)
+    {
+        var wetted = Math.Min(flood, height);
+        if (caseName == "brim-full" || scenario.Opening.Actions.Flow is not { } flow || z > wetted)
+        {
+            return 0;
+        }
+
+        var square = flow.Velocity * flow.Velocity;
+        var surcharge = unitWeight * flow.ShapeCoefficient * square / (2 * 9.80665);
+        return flow.Velocity <= 3.05
+            ? surcharge
+            : Math.Max(surcharge, Drag(scenario.Opening.ClearWidth / wetted) * scenario.Site.WaterDensity * square / 2);
+    }
+
+    /// <summary>Unfactored pressure.</summary>
+    public double Pressure(double z) => FloodSide(z) - ProtectedSide(z) + Flow(z);
+
+    /// <summary>Factored pressure.</summary>
+    public double Design(double z)
+    {
+        var (floodSide, protectedSide, brimFull) = HandFactors.Of(scenario.Project.DesignBasis, scenario.Site.FloodZone);
+        var factor = caseName == "brim-full" ? brimFull : floodSide;
+        return factor * (FloodSide(z) + Flow(z)) - protectedSide * ProtectedSide(z);
+    }
+
+    /// <summary>∫ f dz over a band of height.</summary>
+    public double Integral(Func<double, double> function, double bottom, double top)
+    {
+        double[] ends = [bottom, .. new[] { behind, flood, height }.Where(z => z > bottom && z < top).Order(), top];
+        var sum = 0.0;
+        for (var i = 1; i < ends.Length; i++)
+        {
+            sum += GaussLegendreRule.Integrate(function, ends[i - 1], ends[i], order: 5);
+        }
+
+        return sum;
+    }
+
+    private static double Drag(double ratio)
+    {
+        (double Limit, double Coefficient)[] table =
+            [(12, 1.25), (20, 1.3), (32, 1.4), (40, 1.5), (80, 1.75), (120, 1.8), (double.MaxValue, 2.0)];
+        return table.First(row => ratio <= row.Limit).Coefficient;
+    }
+}
