@@ -44,6 +44,10 @@ public sealed partial class QuantityField : IDisposable
     [Parameter]
     public double? Default { get; set; }
 
+    /// <summary>What an empty field means, shown in it: "as sill".</summary>
+    [Parameter]
+    public string? EmptyText { get; set; }
+
     /// <summary>The units in which the number is shown and typed.</summary>
     [CascadingParameter]
     public UnitSystem Units { get; set; }
@@ -74,7 +78,7 @@ public sealed partial class QuantityField : IDisposable
 
     private string InputMode => Field.Dimension == Dimension.Count ? "numeric" : "text";
 
-    private string? Placeholder => Default is { } value ? Calculation.Units.FormatInput(value, Field.Dimension, Units) : null;
+    private string? Placeholder => Default is { } value ? Calculation.Units.FormatInput(value, Field.Dimension, Units) : EmptyText;
 
     private bool CanReset => Default is { } value && Value is { } current && current != value;
 

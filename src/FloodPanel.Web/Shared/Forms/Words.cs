@@ -76,14 +76,17 @@ public static class Words
     };
 
     /// <summary>Name of the shape of a profile.</summary>
-    public static string Of(Profile profile) => profile switch
+    public static string Of(Profile profile) => OfShape(profile.GetType());
+
+    /// <summary>Name of a shape, by its type.</summary>
+    public static string OfShape(Type shape) => shape.Name switch
     {
-        Rectangle => "Rectangle",
-        HollowRectangle => "Hollow, with webs",
-        RectangularTube => "Rectangular tube",
-        ISection => "I-section",
-        GivenProperties => "Given properties",
-        _ => throw new ArgumentOutOfRangeException(nameof(profile), profile, null),
+        nameof(Rectangle) => "Rectangle",
+        nameof(HollowRectangle) => "Hollow, with webs",
+        nameof(RectangularTube) => "Rectangular tube",
+        nameof(ISection) => "I-section",
+        nameof(GivenProperties) => "Given properties",
+        _ => throw new ArgumentOutOfRangeException(nameof(shape), shape, null),
     };
 
     /// <summary>The check without its member: "bending" of "log-bending".</summary>

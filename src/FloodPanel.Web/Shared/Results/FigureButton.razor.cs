@@ -7,6 +7,8 @@ namespace FloodPanel.Web.Shared.Results;
 public sealed partial class FigureButton
 {
     private object? lastRendered;
+    private ElementReference button;
+    private bool wasOpen;
 
     /// <summary>What the number is, for those who cannot see where it stands: "Moment of log 3".</summary>
     [Parameter, EditorRequired]
@@ -55,6 +57,17 @@ public sealed partial class FigureButton
         var same = now.Equals(lastRendered);
         lastRendered = now;
         return !same;
+    }
+
+    // Where the panel is closed, the keyboard goes back to the number that it was opened from.
+    protected override async Task OnAfterRenderAsync(bool firstRender)
+    {
+        var closed = wasOpen && !IsOpen && Open?.Key is null && Opens is not null;
+        wasOpen = IsOpen;
+        if (closed)
+        {
+            await button.FocusAsync(preventScroll: true);
+        }
     }
 
     private void Toggle() => Open?.Toggle(Opens!);
