@@ -28,7 +28,7 @@ public class WorkingPanelTests : BunitContext
         Assert.Contains($"= {load}·(1.640 m)²/8", asked.TextContent);
         Assert.Contains(Units.FormatNumber(check.Demand, Dimension.Moment, UnitSystem.SI), asked.TextContent);
         Assert.Contains(check.Source, panel.Find(".source").TextContent);
-        Assert.Contains("Log 1, bay 1, Design flood case", panel.Find(".working-where").TextContent);
+        Assert.Contains("Log 1, bay 1, design flood case", panel.Find(".working-where").TextContent);
         Assert.Contains("Passes", panel.Find(".outcome").TextContent);
     }
 

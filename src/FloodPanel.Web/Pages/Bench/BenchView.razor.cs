@@ -117,7 +117,7 @@ public sealed partial class BenchView : IDisposable
     }
 
     private string CaseWords(string name) =>
-        governing?.Case == name ? $"{Words.FromName(name)}, governs" : Words.FromName(name);
+        governing?.Case == name ? $"{Words.OfCase(name)}, governs" : Words.OfCase(name);
 
     private void ChooseCase(string name) => chosenCase = name;
 

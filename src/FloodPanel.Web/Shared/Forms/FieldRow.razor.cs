@@ -29,6 +29,10 @@ public partial class FieldRow
     [Parameter]
     public bool AsGroup { get; set; }
 
+    /// <summary>True where the control takes all the room that the label leaves: words, not numbers.</summary>
+    [Parameter]
+    public bool Roomy { get; set; }
+
     /// <summary>True where the control needs the whole width, under its label.</summary>
     [Parameter]
     public bool Wide { get; set; }
@@ -42,7 +46,7 @@ public partial class FieldRow
 
     private string ProblemId => ProblemIdOf(For);
 
-    private string RowClass => $"field-row{(Wide ? " wide" : "")}{(Problem is null ? "" : " refused")}";
+    private string RowClass => $"field-row{(Wide ? " wide" : Roomy ? " roomy" : "")}{(Problem is null ? "" : " refused")}";
 
     internal static string ProblemIdOf(string control) => control + "-problem";
 

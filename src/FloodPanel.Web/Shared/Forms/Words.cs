@@ -1,5 +1,6 @@
 using FloodPanel.Calculation;
 using FloodPanel.Calculation.Actions;
+using FloodPanel.Calculation.Cases;
 using FloodPanel.Calculation.ProjectTree;
 
 namespace FloodPanel.Web.Shared.Forms;
@@ -92,7 +93,12 @@ public static class Words
     /// <summary>The check without its member: "bending" of "log-bending".</summary>
     public static string CheckOnly(string name) => name[(name.IndexOf('-') + 1)..].Replace('-', ' ');
 
+    /// <summary>Name of a load case, by its name in files.</summary>
+    public static string OfCase(string name) => Capitalised(CaseNames.InWords(name));
+
     /// <summary>A name of the file format, "design-flood", as words, "Design flood".</summary>
-    public static string FromName(string name) =>
-        name.Length == 0 ? "" : char.ToUpperInvariant(name[0]) + name[1..].Replace('-', ' ');
+    public static string FromName(string name) => Capitalised(name.Replace('-', ' '));
+
+    private static string Capitalised(string words) =>
+        words.Length == 0 ? "" : char.ToUpperInvariant(words[0]) + words[1..];
 }

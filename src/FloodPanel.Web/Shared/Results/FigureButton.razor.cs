@@ -30,6 +30,10 @@ public sealed partial class FigureButton
     [Parameter]
     public bool WithUnit { get; set; }
 
+    /// <summary>Unseen digits behind the number, see <see cref="FigureColumn"/>.</summary>
+    [Parameter]
+    public string Pad { get; set; } = "";
+
     /// <summary>Name for tests.</summary>
     [Parameter]
     public string? TestId { get; set; }
@@ -53,7 +57,7 @@ public sealed partial class FigureButton
     // A ladder holds hundreds of these; only those that look different are drawn again.
     protected override bool ShouldRender()
     {
-        var now = (What, Number, UnitSymbol, IsOpen, Opens is null);
+        var now = (What, Number, UnitSymbol, IsOpen, Opens is null, Pad);
         var same = now.Equals(lastRendered);
         lastRendered = now;
         return !same;

@@ -1,5 +1,6 @@
 using System.Globalization;
 using FloodPanel.Calculation;
+using FloodPanel.Calculation.Cases;
 using FloodPanel.Web.Shared.Forms;
 
 namespace FloodPanel.Web.Shared.Results;
@@ -71,14 +72,14 @@ public static class Figures
 
     private static FigureWorking? InCase(CaseResult loadCase, FigureKey key)
     {
-        var inCase = $"{Words.FromName(loadCase.Name)} case";
+        var inCase = $"{CaseNames.InWords(loadCase.Name)} case";
         switch (key.Name)
         {
             case Resultant:
-                return Of(loadCase.ResultantWorking, inCase);
+                return Of(loadCase.ResultantWorking, Sentence(inCase));
             case Action:
                 var action = loadCase.Actions.ElementAtOrDefault(key.Index - 1);
-                return action is null ? null : Of(action.Working, inCase);
+                return action is null ? null : Of(action.Working, Sentence(inCase));
             case Guide:
                 var guide = loadCase.Guides.FirstOrDefault(g => g.Side == key.Side);
                 return guide is null ? null : Of(guide.Working, $"{Words.FromName(guide.Side)} guide, {inCase}");
@@ -106,6 +107,8 @@ public static class Figures
     private static string LogName(LogResult log) => $"Log {Number(log.Index)}, {BayName(log.Bay).ToLowerInvariant()}";
 
     private static string PostName(PostResult post) => $"Post {Number(post.Index)}";
+
+    private static string Sentence(string words) => char.ToUpperInvariant(words[0]) + words[1..];
 
     private static string BayName(int bay) => $"Bay {Number(bay)}";
 

@@ -32,13 +32,18 @@ public sealed partial class LogLadder
     protected override void OnParametersSet() =>
         Rows = [.. Case.Logs.Where(log => log.Bay == Bay).OrderByDescending(log => log.Index)];
 
+    private IReadOnlyList<string> Pads(Func<LogResult, double> figure, Dimension dimension) =>
+        FigureColumn.Pads(Rows.Select(figure), dimension, Units);
+
     private FigureKey Key(string name, string symbol, LogResult log) => new(name, symbol, Case.Name, log.Index, log.Bay);
+
+    private static Check?[] ChecksOf(LogResult log) => [log.BendingCheck, log.ShearCheck, log.DeflectionCheck];
 
     private string UnitOf(Dimension dimension) => Calculation.Units.Of(dimension, Units).Symbol;
 
     private string? RowClass(LogResult log)
     {
-        var fails = new[] { log.BendingCheck, log.ShearCheck, log.DeflectionCheck }.Any(check => check is { Passes: false });
+        var fails = ChecksOf(log).Any(check => check is { Passes: false });
         var governs = Governing is { } key && key.Case == Case.Name && key.Bay == log.Bay && key.Index == log.Index
             && key.Name.StartsWith("log", StringComparison.Ordinal);
         return fails && governs ? "fails governing" : fails ? "fails" : governs ? "governing" : null;

@@ -22,11 +22,18 @@ public sealed partial class UseCell
     [Parameter, EditorRequired]
     public Func<Check, FigureKey> Key { get; set; } = null!;
 
+    /// <summary>Unseen digits behind the number, see <see cref="FigureColumn"/>.</summary>
+    [Parameter]
+    public string Pad { get; set; } = "";
+
     /// <summary>The figure that governs the opening.</summary>
     [Parameter]
     public FigureKey? GoverningKey { get; set; }
 
-    private Check? Worst => Checks.OfType<Check>().MaxBy(check => check.Utilisation);
+    private Check? Worst => WorstOf(Checks);
+
+    /// <summary>The check that is used most; null when there is none.</summary>
+    public static Check? WorstOf(IEnumerable<Check?> checks) => checks.OfType<Check>().MaxBy(check => check.Utilisation);
 
     private bool Governs => Worst is { } check && GoverningKey == Key(check);
 }
