@@ -100,8 +100,26 @@ public static class Units
 
         var unit = Of(dimension, system);
         var shown = value / unit.InSI;
-        var text = unit.Decimals is { } decimals ? Fixed(shown, decimals) : SignificantFigures(shown);
-        return text.StartsWith('-') && text.AsSpan(1).IndexOfAnyInRange('1', '9') < 0 ? text[1..] : text;
+        return WithoutMinusZero(unit.Decimals is { } decimals ? Fixed(shown, decimals) : SignificantFigures(shown));
+    }
+
+    /// <summary>
+    /// The numbers of a column, all with the decimals of the largest, so that their points stand in line and small
+    /// ones do not claim a precision that nobody needs.
+    /// </summary>
+    /// <param name="values">The numbers [base SI].</param>
+    /// <param name="dimension">What they measure.</param>
+    /// <param name="system">The system of units.</param>
+    public static IReadOnlyList<string> FormatColumn(IReadOnlyList<double> values, Dimension dimension, UnitSystem system)
+    {
+        var largest = FormatNumber(values.Select(Math.Abs).Where(double.IsFinite).DefaultIfEmpty().Max(), dimension, system);
+        var point = largest.IndexOf('.');
+        var decimals = point < 0 ? 0 : largest.Length - point - 1;
+        return [.. values.Select(Number)];
+
+        string Number(double value) => double.IsFinite(value)
+            ? WithoutMinusZero(Fixed(FromSI(value, dimension, system), decimals))
+            : FormatNumber(value, dimension, system);
     }
 
     /// <summary>The number as typed back into a form: enough digits to mean the same, no trailing zeros.</summary>
@@ -130,6 +148,9 @@ public static class Units
             "°" => number + "°",
             var symbol => $"{number} {symbol}",
         };
+
+    private static string WithoutMinusZero(string text) =>
+        text.StartsWith('-') && text.AsSpan(1).IndexOfAnyInRange('1', '9') < 0 ? text[1..] : text;
 
     private static string Fixed(double value, int decimals) =>
         value.ToString("F" + decimals.ToString(CultureInfo.InvariantCulture), CultureInfo.InvariantCulture);

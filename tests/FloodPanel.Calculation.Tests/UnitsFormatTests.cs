@@ -46,6 +46,20 @@ public class UnitsFormatTests
             Assert.All(Enum.GetValues<UnitSystem>(), system =>
                 Assert.Equal(text, Units.FormatNumber(value, dimension, system))));
 
+    [Theory]
+    [InlineData(new[] { 1746.0, 966, 139, 2.25, 0 }, new[] { "1.75", "0.97", "0.14", "0.00", "0.00" })]
+    [InlineData(new[] { 23_400.0, 1746 }, new[] { "23.4", "1.7" })]
+    [InlineData(new[] { 234_000.0, -1746 }, new[] { "234", "-2" })]
+    [InlineData(new[] { 1746.0, -0.1, double.PositiveInfinity }, new[] { "1.75", "0.00", "∞" })]
+    [InlineData(new[] { 0.0, 0.0 }, new[] { "0", "0" })]
+    [InlineData(new double[0], new string[0])]
+    public void FormatColumn_Forces_TakeTheDecimalsOfTheLargest(double[] values, string[] texts) =>
+        Assert.Equal(texts, Units.FormatColumn(values, Dimension.Force, UnitSystem.SI));
+
+    [Fact]
+    public void FormatColumn_Lengths_KeepTheirFixedDecimals() =>
+        Assert.Equal(["100.000", "0.500"], Units.FormatColumn([100, 0.5], Dimension.Length, UnitSystem.SI));
+
     /// <summary>4448.2216152605 N is 1000 lbf; 47.88 Pa is 1 psf.</summary>
     [Theory]
     [InlineData(4448.2216152605, Dimension.Force, UnitSystem.SI, "4.45 kN")]

@@ -166,6 +166,18 @@ public class QuantityTextTests
         Assert.Equal(default, reading);
     }
 
+    [Theory]
+    [InlineData(3.3, Dimension.Length, UnitSystem.SI, "3.3")]
+    [InlineData(1234.56789, Dimension.Length, UnitSystem.SI, "1234.56789")]
+    [InlineData(3.3, Dimension.Length, UnitSystem.USCustomary, "10.8268")]
+    [InlineData(3.048, Dimension.Length, UnitSystem.USCustomary, "10")]
+    [InlineData(0.04, Dimension.SectionLength, UnitSystem.USCustomary, "1.5748")]
+    [InlineData(1e-9, Dimension.SecondMoment, UnitSystem.USCustomary, "0.002403")]
+    [InlineData(42 * 0.0254, Dimension.Length, UnitSystem.SI, "1.0668")]
+    [InlineData(0, Dimension.Length, UnitSystem.USCustomary, "0")]
+    public void Write_Value_HasTheDigitsThatMatter(double value, Dimension dimension, UnitSystem system, string text) =>
+        Assert.Equal(text, QuantityText.Write(value, dimension, system));
+
     [Fact]
     public void Read_PercentForARatio_IsAHundredth()
     {

@@ -78,7 +78,7 @@ public sealed partial class QuantityField : IDisposable
 
     private string InputMode => Field.Dimension == Dimension.Count ? "numeric" : "text";
 
-    private string? Placeholder => Default is { } value ? Calculation.Units.FormatInput(value, Field.Dimension, Units) : EmptyText;
+    private string? Placeholder => Default is { } value ? QuantityText.Write(value, Field.Dimension, Units) : EmptyText;
 
     private bool CanReset => Default is { } value && Value is { } current && current != value;
 
@@ -211,7 +211,7 @@ public sealed partial class QuantityField : IDisposable
 
     private void ShowValue()
     {
-        text = shownValue is { } value ? Calculation.Units.FormatInput(value, Field.Dimension, Units) : "";
+        text = shownValue is { } value ? QuantityText.Write(value, Field.Dimension, Units) : "";
         refusal = null;
         Settle();
     }

@@ -1,3 +1,4 @@
+using System.Globalization;
 using System.Text.RegularExpressions;
 using FloodPanel.Calculation;
 
@@ -47,6 +48,24 @@ public static partial class QuantityText
         }
 
         return Sum(terms, negative, Units.Of(dimension, system).InSI);
+    }
+
+    /// <summary>
+    /// A value as it stands in a field: all digits of what was typed in this unit, but four decimals of what comes
+    /// out of a conversion, which is hundredths of a millimetre for lengths. The value itself stays what it is.
+    /// </summary>
+    public static string Write(double value, Dimension dimension, UnitSystem system)
+    {
+        var text = Units.FormatInput(value, dimension, system);
+        var number = double.Parse(text, CultureInfo.InvariantCulture);
+        var isTyped = Math.Abs(Units.ToSI(number, dimension, system) - value) <= 1e-12 * Math.Abs(value);
+        if (isTyped || number == 0)
+        {
+            return text;
+        }
+
+        var leadingZeros = Math.Max(0, -(int)Math.Floor(Math.Log10(Math.Abs(number))) - 1);
+        return number.ToString("0." + new string('#', 4 + leadingZeros), CultureInfo.InvariantCulture);
     }
 
     private static QuantityReading Sum(List<(double Number, double? Size)> terms, bool negative, double shownSize)

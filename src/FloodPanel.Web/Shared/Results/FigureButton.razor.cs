@@ -30,9 +30,9 @@ public sealed partial class FigureButton
     [Parameter]
     public bool WithUnit { get; set; }
 
-    /// <summary>Unseen digits behind the number, see <see cref="FigureColumn"/>.</summary>
+    /// <summary>The number as its column shows it; null for a number that stands by itself.</summary>
     [Parameter]
-    public string Pad { get; set; } = "";
+    public string? InColumn { get; set; }
 
     /// <summary>Name for tests.</summary>
     [Parameter]
@@ -50,14 +50,14 @@ public sealed partial class FigureButton
 
     private string UnitSymbol => Calculation.Units.Of(Dimension, Units).Symbol;
 
-    private string Number => Calculation.Units.FormatNumber(Value, Dimension, Units);
+    private string Number => InColumn ?? Calculation.Units.FormatNumber(Value, Dimension, Units);
 
     private string Spoken => $"{What}, {Calculation.Units.Format(Value, Dimension, Units)}, show the working";
 
     // A ladder holds hundreds of these; only those that look different are drawn again.
     protected override bool ShouldRender()
     {
-        var now = (What, Number, UnitSymbol, IsOpen, Opens is null, Pad);
+        var now = (What, Number, UnitSymbol, IsOpen, Opens is null);
         var same = now.Equals(lastRendered);
         lastRendered = now;
         return !same;

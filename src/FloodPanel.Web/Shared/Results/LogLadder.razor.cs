@@ -32,8 +32,8 @@ public sealed partial class LogLadder
     protected override void OnParametersSet() =>
         Rows = [.. Case.Logs.Where(log => log.Bay == Bay).OrderByDescending(log => log.Index)];
 
-    private IReadOnlyList<string> Pads(Func<LogResult, double> figure, Dimension dimension) =>
-        FigureColumn.Pads(Rows.Select(figure), dimension, Units);
+    private IReadOnlyList<string> Column(Func<LogResult, double> figure, Dimension dimension) =>
+        Calculation.Units.FormatColumn([.. Rows.Select(figure)], dimension, Units);
 
     private FigureKey Key(string name, string symbol, LogResult log) => new(name, symbol, Case.Name, log.Index, log.Bay);
 

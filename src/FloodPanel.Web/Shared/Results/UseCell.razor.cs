@@ -22,9 +22,9 @@ public sealed partial class UseCell
     [Parameter, EditorRequired]
     public Func<Check, FigureKey> Key { get; set; } = null!;
 
-    /// <summary>Unseen digits behind the number, see <see cref="FigureColumn"/>.</summary>
-    [Parameter]
-    public string Pad { get; set; } = "";
+    /// <summary>The utilisation as its column shows it.</summary>
+    [Parameter, EditorRequired]
+    public string InColumn { get; set; } = "";
 
     /// <summary>The figure that governs the opening.</summary>
     [Parameter]
