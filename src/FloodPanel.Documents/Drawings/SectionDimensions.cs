@@ -54,8 +54,7 @@ internal static class SectionDimensions
             [
                 Sketch.Stroke(view.OriginX, view.SillY, view.OriginX, top, LineRole.Extension),
                 new Text(
-                    figure, new((view.OriginX + layout.BarrierRight) / 2, top - 0.5 * sheet.TextSize), sheet.TextSize,
-                    TextAnchor.Middle, TextRole.Normal),
+                    figure, new(layout.BarrierRight, top - 0.5 * sheet.TextSize), sheet.TextSize, TextAnchor.End, TextRole.Normal),
             ]));
     }
 }

@@ -63,8 +63,9 @@ internal sealed record SectionLayout
         var dimensions = 0.9 * u + 2 * sheet.Row;
         var figure = pressures is null ? 0 : 1.6 * u + PressureFigure.Width(sheet, input, pressures);
         var roomWide = sheet.Width - 2 * sheet.Margin - levelColumn - floodSide - protectedSide - dimensions - figure;
-        var roomHigh = sheet.Height - head - foot;
-        var scale = DrawingScale.Fit(stack.Right - stack.Left, high - low, roomWide, roomHigh);
+        int Scale() => DrawingScale.Fit(stack.Right - stack.Left, high - low, roomWide, sheet.Height - head - foot);
+        head += FreeboardAbove(input, sheet, DrawingScale.PerMetre(Scale()) * (high - input.RequiredHeight));
+        var scale = Scale();
 
         var perMetre = DrawingScale.PerMetre(scale);
         var content = Math.Max((high - low) * perMetre, 5 * 1.32 * u);
@@ -91,6 +92,13 @@ internal sealed record SectionLayout
             Bottom = top + (high - low) * perMetre,
             FigureRight = pressures is null ? right + dimensions : sheet.Width - sheet.Margin,
         };
+    }
+
+    /// <summary>Room [mm] for the figure of a freeboard too small to hold it: it stands above.</summary>
+    private static double FreeboardAbove(DrawingInput input, Sheet sheet, double alreadyThere)
+    {
+        var figure = Sketch.Width(input.Length(input.Project.Site.Freeboard), sheet.TextSize, TextRole.Normal);
+        return Math.Max(0, figure + 2.4 - 2.2 * sheet.TextSize - Math.Max(0, alreadyThere));
     }
 }
 

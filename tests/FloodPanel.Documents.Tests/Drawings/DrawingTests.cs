@@ -41,12 +41,14 @@ public class DrawingTests
     [MemberData(nameof(Cases))]
     public void Draw_AnyOpening_NothingLeavesTheSheet(string name, UnitSystem units)
     {
+        // The frame stands at 0.25 mm, and words do not touch it.
+        const double clear = 0.7;
         foreach (var (view, scene) in Scenes(name, units))
         {
             foreach (var box in TextBox.Of(scene))
             {
                 Assert.True(
-                    box.Left >= 0 && box.Right <= scene.Width && box.Top >= 0 && box.Bottom <= scene.Height,
+                    box.Left >= clear && box.Right <= scene.Width - clear && box.Top >= clear && box.Bottom <= scene.Height - clear,
                     $"{view}: {box} leaves {scene.Width} x {scene.Height}");
             }
 
@@ -68,6 +70,7 @@ public class DrawingTests
             yield return ($"section without pressures {sheet.Width}", SectionDrawing.Draw(input, "design-flood", sheet, withPressures: false));
         }
 
+        yield return ("owner's sheet", OpeningSheet.Draw(input, new Sheet(174, 61, 2.25)));
         yield return ("section", SectionDrawing.Draw(input, "design-flood"));
         yield return ("section brim-full", SectionDrawing.Draw(input, "brim-full"));
     }
