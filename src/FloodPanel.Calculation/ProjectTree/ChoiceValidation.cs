@@ -44,13 +44,13 @@ internal static class ChoiceValidation
                 break;
             case RectangularTube tube:
                 problems.Check(Fields.Wall, tube.Wall, path);
-                Fits(2 * tube.Wall, Math.Min(tube.Height, tube.Depth), $"{path}.wall", "Two walls", "the smaller side", problems);
+                Fits(2 * tube.Wall, Math.Min(tube.Height, tube.Depth), $"{path}.wall", "Two walls together are", "the smaller side", problems);
                 break;
             case ISection section:
                 problems.Check(Fields.Flange, section.Flange, path);
                 problems.Check(Fields.Web, section.Web, path);
-                Fits(2 * section.Flange, section.Depth, $"{path}.flange", "Two flanges", "the depth", problems);
-                Fits(section.Web, section.Height, $"{path}.web", "The web", "the height", problems);
+                Fits(2 * section.Flange, section.Depth, $"{path}.flange", "Two flanges together are", "the depth", problems);
+                Fits(section.Web, section.Height, $"{path}.web", "The web is", "the height", problems);
                 break;
             case GivenProperties given:
                 problems.Check(Fields.Area, given.Area, path);
@@ -67,16 +67,16 @@ internal static class ChoiceValidation
         problems.Check(Fields.Face, hollow.Face, path);
         problems.Check(Fields.Web, hollow.Web, path);
         problems.Check(Fields.Webs, hollow.Webs, path);
-        Fits(2 * hollow.Face, hollow.Depth, $"{path}.face", "Two faces", "the depth", problems);
-        Fits(hollow.Webs * hollow.Web, hollow.Height, $"{path}.web", "The webs", "the height", problems);
+        Fits(2 * hollow.Face, hollow.Depth, $"{path}.face", "Two faces together are", "the depth", problems);
+        Fits(hollow.Webs * hollow.Web, hollow.Height, $"{path}.web", "The webs together are", "the height", problems);
     }
 
     private static void Fits(
-        double parts, double whole, string path, string partsName, string wholeName, ProblemList problems)
+        double parts, double whole, string path, string partsAre, string wholeName, ProblemList problems)
     {
         if (!(parts < whole) && whole > 0)
         {
-            problems.Add(path, $"{partsName} together are {Section(parts)}; allowed is less than {wholeName}, {Section(whole)}.");
+            problems.Add(path, $"{partsAre} {Section(parts)}; allowed is less than {wholeName}, {Section(whole)}.");
         }
     }
 
