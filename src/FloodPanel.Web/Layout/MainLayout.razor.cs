@@ -20,7 +20,7 @@ public sealed partial class MainLayout : IAsyncDisposable
     public required IJSRuntime JS { get; init; }
 
     // With a base address in the page, "#main" alone would lead to the first page.
-    private string SkipTarget => Navigation.Uri.Split('#')[0] + "#main";
+    private string SkipTarget => $"/{Navigation.ToBaseRelativePath(Navigation.Uri).Split('#')[0]}#main";
 
     protected override void OnInitialized()
     {

@@ -5,7 +5,7 @@ namespace FloodPanel.Web.Tests.Files;
 public sealed class RememberedSettingsTests(WebApp app) : IClassFixture<WebApp>
 {
     [Theory]
-    [InlineData("", "fp-theme-light")]
+    [InlineData("other=1", "fp-theme-light")]
     [InlineData("fp-theme=dark", "fp-theme-dark")]
     [InlineData("fp-theme=system; fp-system=dark", "fp-theme-dark")]
     [InlineData("fp-theme=light; fp-system=dark", "fp-theme-light")]
