@@ -65,6 +65,10 @@ internal static class Examples
         Openings = [Garage, Door],
     };
 
+    public static Library Library { get; } = new(
+        [new("alloy", "Test alloy", Aluminium, "Invented for tests", "invented")],
+        [new("log", "Test log", (Profile)Garage.Barrier.Logs.Profile, "Invented for tests", "invented")]);
+
     public static OpeningResult Result(Opening opening) =>
         Design.Evaluate(Mill with { Openings = [opening] }, opening, Library.Empty);
 
