@@ -83,7 +83,8 @@ public class LogLadderTests : BunitContext
         var ladder = Show(result, loadCase);
 
         Assert.Equal($"log-{governing.Index}", Assert.Single(ladder.FindAll("tr.governing")).GetAttribute("data-testid"));
-        Assert.Contains("bending, governs", ladder.Find("tr.governing").TextContent);
+        Assert.Equal("governs", ladder.Find("tr.governing .use-check b").TextContent);
+        Assert.Contains("bending", ladder.Find("tr.governing .use-check").TextContent);
     }
 
     [Fact]

@@ -79,6 +79,20 @@ public class WorkingPanelTests : BunitContext
         JSInterop.VerifyFocusAsyncInvoke();
     }
 
+    [Fact]
+    public void Render_FigureThatGoesAndComesBack_LeavesTheFocusAlone()
+    {
+        var panel = Show(Examples.Result(Examples.Garage));
+        var key = Moment with { Index = 4 };
+        panel.Render(p => p.Add(w => w.Key, key));
+        panel.Render(p => p.Add(w => w.Result, Examples.Result(Examples.Garage.WithLogs(logs => logs with { Count = 2 }))));
+
+        panel.Render(p => p.Add(w => w.Result, Examples.Result(Examples.Garage)));
+
+        Assert.NotNull(panel.Find(".step.asked"));
+        JSInterop.VerifyFocusAsyncInvoke(calledTimes: 2);
+    }
+
     private IRenderedComponent<WorkingPanel> Show(OpeningResult result) => Render<WorkingPanel>(p => p
         .Add(w => w.Key, Moment).Add(w => w.Result, result).Add(w => w.OnClose, () => closed++));
 }

@@ -9,7 +9,6 @@ namespace FloodPanel.Web.Shared.Results;
 public sealed partial class WorkingPanel
 {
     private readonly string titleId = ControlIds.Next();
-    private ElementReference close;
     private FigureKey? focused;
 
     /// <summary>The figure that is open; null when none is.</summary>
@@ -30,19 +29,8 @@ public sealed partial class WorkingPanel
 
     private FigureWorking? Working => Key is { } key && Result is { } result ? Figures.Find(result, key) : null;
 
-    protected override async Task OnAfterRenderAsync(bool firstRender)
-    {
-        if (Key == focused)
-        {
-            return;
-        }
-
-        focused = Key;
-        if (Working is not null)
-        {
-            await close.FocusAsync(preventScroll: true);
-        }
-    }
+    // Once for each figure: one that goes and comes back while a number is typed must not take the keyboard away.
+    protected override void OnAfterRender(bool firstRender) => focused = Key;
 
     private async Task OnKey(KeyboardEventArgs key)
     {
@@ -51,12 +39,6 @@ public sealed partial class WorkingPanel
             await OnClose.InvokeAsync();
         }
     }
-
-    private string StepClass(CalculationStep step) => step.Symbol == Key?.Symbol ? "step asked" : "step";
-
-    private string Number(CalculationStep step) => Calculation.Units.FormatNumber(step.Value, step.Dimension, Units);
-
-    private string Symbol(CalculationStep step) => Calculation.Units.Of(step.Dimension, Units).Symbol;
 
     private string Outcome(Check check)
     {
