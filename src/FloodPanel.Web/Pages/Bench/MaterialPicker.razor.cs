@@ -86,7 +86,9 @@ public sealed partial class MaterialPicker
         }
     }
 
-    private string Shown(double value, Dimension dimension) => Calculation.Units.Format(value, dimension, Units);
+    // Number and unit stay on one line.
+    private string Shown(double value, Dimension dimension) =>
+        Calculation.Units.Format(value, dimension, Units).Replace(' ', '\u00A0');
 
     private static string SourceOf(LibraryEntry<Material> entry) => entry.Evidence switch
     {

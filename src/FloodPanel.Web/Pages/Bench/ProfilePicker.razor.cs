@@ -102,5 +102,7 @@ public sealed partial class ProfilePicker
 
     private Task Edit(Profile own) => OnChange.InvokeAsync(own);
 
-    private string Shown(double value, Dimension dimension) => Calculation.Units.Format(value, dimension, Units);
+    // Number and unit stay on one line.
+    private string Shown(double value, Dimension dimension) =>
+        Calculation.Units.Format(value, dimension, Units).Replace(' ', '\u00A0');
 }
