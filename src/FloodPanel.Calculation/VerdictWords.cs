@@ -23,7 +23,6 @@ internal static class VerdictWords
         var words = names.Select(NeededChecks.Title).ToArray();
         return words.Length switch
         {
-            0 => "other parts",
             1 => words[0],
             _ => $"{string.Join(", ", words[..^1])} and {words[^1]}",
         };
@@ -34,6 +33,11 @@ internal static class VerdictWords
         if (governing is null)
         {
             return "No member has a result yet.";
+        }
+
+        if (governing.Check == NeededChecks.Freeboard)
+        {
+            return $"Freeboard governs: the barrier should be {Shown(governing.Utilisation)} times as high.";
         }
 
         var check = Capitalised(governing.Check);
@@ -53,7 +57,6 @@ internal static class VerdictWords
     /// <summary>Two decimals, or words where rounding would hide that it stands above 1.</summary>
     private static string Shown(double utilisation) => utilisation switch
     {
-        double.PositiveInfinity => "more than any multiple",
         > 1 and < 1.005 => "just over 1.00",
         _ => utilisation.ToString("0.00", CultureInfo.InvariantCulture),
     };

@@ -68,5 +68,9 @@ internal static class SampleProject
         Openings = [Dock],
     };
 
+    /// <summary>Every check that may be, declared designed by somebody with a name and a reference.</summary>
+    public static ValueList<DesignedByOthers> AllByOthers { get; } =
+        NeededChecks.MayBeByOthers.Select(c => new DesignedByOthers(c, "A. Designer", "D-1")).ToValueList();
+
     public static OpeningResult Result(Project project) => Design.Run(project, Library.Empty).Openings[0];
 }

@@ -9,7 +9,13 @@ public class ValidationFieldTests
 
     private static readonly GivenProperties Given = new()
     {
-        Height = 0.2, Depth = 0.1, Area = 1e-3, Inertia = 1e-6, Modulus = 2e-5, PlasticModulus = 3e-5, ShearArea = 1e-3,
+        Height = 0.2,
+        Depth = 0.1,
+        Area = 1e-3,
+        Inertia = 1e-6,
+        Modulus = 2e-5,
+        PlasticModulus = 3e-5,
+        ShearArea = 1e-3,
     };
 
     private static readonly (string Path, Field Field, Func<double, Project> With)[] Inputs =
