@@ -4,6 +4,7 @@ using FloodPanel.Web;
 using FloodPanel.Web.Editing;
 using FloodPanel.Web.Files;
 using FloodPanel.Web.Startup;
+using Microsoft.AspNetCore.Connections;
 
 var builder = WebApplication.CreateBuilder(new WebApplicationOptions { Args = args, ContentRootPath = AppContext.BaseDirectory });
 builder.WebHost.UseStaticWebAssets();
@@ -24,6 +25,7 @@ try
     app.UseAntiforgery();
     app.MapStaticAssets();
     app.MapProjectFiles();
+    app.MapOwnerSummary();
     app.MapRazorComponents<App>().AddInteractiveServerRenderMode(options => options.ContentSecurityFrameAncestorsPolicy = null);
     app.Lifetime.ApplicationStopping.Register(app.Services.GetRequiredService<OpenEditors>().SaveAll);
     app.SayWhereItListens(office.DataFolder);
@@ -33,5 +35,10 @@ try
 catch (Exception e) when (e is StoreException or LibraryFileException)
 {
     await Console.Error.WriteLineAsync(e.Message);
+    return 1;
+}
+catch (IOException e) when (e.InnerException is AddressInUseException)
+{
+    await Console.Error.WriteLineAsync($"{e.Message.TrimEnd('.')}. Is FloodPanel running already? Stop it, or start this one with --urls and another address.");
     return 1;
 }

@@ -1,4 +1,5 @@
 using System.Net;
+using System.Text;
 using FloodPanel.Storage.ProjectFile;
 using FloodPanel.Web.Tests.Bench;
 
@@ -19,7 +20,7 @@ public sealed class ServerTests(WebApp app) : IClassFixture<WebApp>
     [Fact]
     public async Task FirstPage_Answer_AllowsNothingFromElsewhere()
     {
-        var answer = await app.CreateClient().GetAsync(new Uri("/", UriKind.Relative), Token);
+        var answer = await GetAsync("/");
 
         var policy = Assert.Single(answer.Headers.GetValues("Content-Security-Policy"));
         Assert.StartsWith("default-src 'self'; script-src 'self';", policy, StringComparison.Ordinal);
@@ -39,7 +40,7 @@ public sealed class ServerTests(WebApp app) : IClassFixture<WebApp>
     [Fact]
     public async Task UnknownAddress_IsNotFoundInOurOwnWords()
     {
-        var answer = await app.CreateClient().GetAsync(new Uri("/nowhere", UriKind.Relative), Token);
+        var answer = await GetAsync("/nowhere");
 
         Assert.Equal(HttpStatusCode.NotFound, answer.StatusCode);
         Assert.Contains("This page is not here", await answer.Content.ReadAsStringAsync(Token), StringComparison.Ordinal);
@@ -50,7 +51,7 @@ public sealed class ServerTests(WebApp app) : IClassFixture<WebApp>
     {
         var stored = await app.Store.CreateAsync(Examples.Mill with { Name = "Mill: 4" }, Token);
 
-        var answer = await app.CreateClient().GetAsync(new Uri($"/projects/{stored.Id}/export", UriKind.Relative), Token);
+        var answer = await GetAsync($"/projects/{stored.Id}/export");
 
         var read = ProjectFileReader.Read(await answer.Content.ReadAsByteArrayAsync(Token));
         Assert.Equal(stored.Project, read.Project);
@@ -64,10 +65,57 @@ public sealed class ServerTests(WebApp app) : IClassFixture<WebApp>
         var stored = await app.Store.CreateAsync(Examples.Mill, Token);
         await app.Store.DeleteAsync(stored.Id, Token);
 
-        var answer = await app.CreateClient().GetAsync(new Uri($"/projects/{stored.Id}/export", UriKind.Relative), Token);
+        var answer = await GetAsync($"/projects/{stored.Id}/export");
 
         Assert.Equal(HttpStatusCode.NotFound, answer.StatusCode);
         Assert.StartsWith("This project is not here", await answer.Content.ReadAsStringAsync(Token), StringComparison.Ordinal);
+    }
+
+    [Theory]
+    [InlineData("si")]
+    [InlineData("us")]
+    public async Task OwnerSummary_Project_IsAPdfNamedWithItsRevision(string units)
+    {
+        var stored = await app.Store.CreateAsync(Examples.Mill, Token);
+
+        var answer = await GetAsync($"/projects/{stored.Id}/owner-summary.pdf?units={units}");
+
+        Assert.Equal("application/pdf", answer.Content.Headers.ContentType!.MediaType);
+        Assert.Equal("Mill Lane 4 owner summary revision 1.pdf", answer.Content.Headers.ContentDisposition!.FileNameStar);
+        Assert.StartsWith("%PDF-", Encoding.Latin1.GetString(await answer.Content.ReadAsByteArrayAsync(Token)), StringComparison.Ordinal);
+    }
+
+    [Fact]
+    public async Task OwnerSummary_ProjectWithAProblem_IsRefusedWithItsSentence()
+    {
+        var stored = await app.Store.CreateAsync(Examples.Mill with { Openings = [Examples.Door with { ClearHeight = 0 }] }, Token);
+
+        var answer = await GetAsync($"/projects/{stored.Id}/owner-summary.pdf");
+
+        Assert.Equal(HttpStatusCode.UnprocessableEntity, answer.StatusCode);
+        Assert.Contains("Clear height is 0 m; allowed is", await answer.Content.ReadAsStringAsync(Token), StringComparison.Ordinal);
+    }
+
+    [Fact]
+    public async Task OwnerSummary_NoOpenings_IsRefused()
+    {
+        var stored = await app.Store.CreateAsync(Examples.Mill with { Openings = [] }, Token);
+
+        var answer = await GetAsync($"/projects/{stored.Id}/owner-summary.pdf");
+
+        Assert.Equal(HttpStatusCode.UnprocessableEntity, answer.StatusCode);
+        Assert.Contains("no openings yet", await answer.Content.ReadAsStringAsync(Token), StringComparison.Ordinal);
+    }
+
+    [Fact]
+    public async Task OwnerSummary_UnknownUnits_IsRefused()
+    {
+        var stored = await app.Store.CreateAsync(Examples.Mill, Token);
+
+        var answer = await GetAsync($"/projects/{stored.Id}/owner-summary.pdf?units=cubits");
+
+        Assert.Equal(HttpStatusCode.BadRequest, answer.StatusCode);
+        Assert.Equal("Units are “cubits”; allowed is si or us.", await answer.Content.ReadAsStringAsync(Token));
     }
 
     [Theory]
@@ -77,9 +125,12 @@ public sealed class ServerTests(WebApp app) : IClassFixture<WebApp>
     [InlineData("/_framework/blazor.web.js", "text/javascript")]
     public async Task OwnFiles_AreServed(string address, string type)
     {
-        var answer = await app.CreateClient().GetAsync(new Uri(address, UriKind.Relative), Token);
+        var answer = await GetAsync(address);
 
         Assert.Equal(HttpStatusCode.OK, answer.StatusCode);
         Assert.Equal(type, answer.Content.Headers.ContentType!.MediaType);
     }
+
+    private Task<HttpResponseMessage> GetAsync(string address) =>
+        app.CreateClient().GetAsync(new Uri(address, UriKind.Relative), Token);
 }
