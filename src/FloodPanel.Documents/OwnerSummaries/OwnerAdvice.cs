@@ -39,8 +39,13 @@ internal static class OwnerAdvice
     public static VerdictLine Verdict(OpeningResult result, UnitSystem units)
     {
         var verdict = result.Verdict;
+        var others = result.Opening.Barrier.ByOthers
+            .Where(d => !string.IsNullOrWhiteSpace(d.Name) && !string.IsNullOrWhiteSpace(d.Reference))
+            .Select(d => $"{NeededChecks.Title(d.Check)} ({Wording.OneLine(d.Name)}, {Wording.OneLine(d.Reference)})")
+            .ToArray();
         var lead = verdict.Kind switch
         {
+            VerdictKind.Adequate when others.Length > 0 => "Every check made here has passed; the rest is designed by others, who are named.",
             VerdictKind.Adequate => "Every check that this barrier needs has passed.",
             VerdictKind.Inadequate => "This barrier must not be built as it stands: a check fails.",
             _ => "This barrier must not be built from this summary yet: checks are still to be made.",
@@ -51,10 +56,6 @@ internal static class OwnerAdvice
             words.Add($"Not yet checked are {List(verdict.Missing.Select(NeededChecks.Title))}.");
         }
 
-        var others = result.Opening.Barrier.ByOthers
-            .Where(d => !string.IsNullOrWhiteSpace(d.Name) && !string.IsNullOrWhiteSpace(d.Reference))
-            .Select(d => $"{NeededChecks.Title(d.Check)} ({Wording.OneLine(d.Name)}, {Wording.OneLine(d.Reference)})")
-            .ToArray();
         if (others.Length > 0)
         {
             words.Add($"Designed by others: {List(others)}.");

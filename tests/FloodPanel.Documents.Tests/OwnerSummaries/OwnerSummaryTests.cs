@@ -14,6 +14,8 @@ public class OwnerSummaryTests
         Assert.Null(report.Band);
         var verdict = Assert.Single(All(report).OfType<VerdictLine>());
         Assert.Equal(VerdictKind.Adequate, verdict.Kind);
+        Assert.Equal("Every check made here has passed; the rest is designed by others, who are named.", verdict.Lead);
+        Assert.Contains("Designed by others: logs (Ostrey Anchors, D-12)", verdict.Words, StringComparison.Ordinal);
     }
 
     [Theory]

@@ -30,6 +30,7 @@ public abstract class PageContext : BunitContext
         Services.AddSingleton(s => ProjectAccess.To(s.GetRequiredService<ProjectStore>()));
         Services.AddSingleton<ScreenSettings>();
         Services.AddSingleton<ProjectEditor>();
+        SetRendererInfo(new RendererInfo("Server", isInteractive: true));
     }
 
     protected ManualTime Time { get; } = new();
