@@ -46,7 +46,7 @@ public sealed class CaseEvaluation
 
     /// <summary>Calculates a load case.</summary>
     /// <param name="model">An opening with as many logs and bays as this object has room for.</param>
-    /// <param name="kind">The case.</param>
+    /// <param name="kind">The case, one of the model's.</param>
     /// <exception cref="ArgumentException">The opening has other counts of logs or bays.</exception>
     public void Fill(OpeningModel model, CaseKind kind)
     {
@@ -56,17 +56,20 @@ public sealed class CaseEvaluation
         }
 
         CaseDiagram.Fill(Diagram, model, kind);
-        FillLogs(model);
+        FillLoads(model, kind);
+        FillLogs(model, kind);
         for (var post = 0; post < posts.Length; post++)
         {
-            posts[post] = Cantilever.Respond(Diagram, model.Post!, model.PostTributary(post), model.FaceLength, model.CosRake);
+            posts[post] = Cantilever.Respond(
+                Diagram, model.Post!, model.PostTributary(post), model.FaceLength, model.CosRake,
+                CaseForces.OnPost(model, kind, post), CaseForces.JudgesDeflection(kind));
         }
 
-        LeftGuide = GuideReaction.Of(logLoads, model.GuideTributary(0), model.Log.Section.Height);
-        RightGuide = GuideReaction.Of(logLoads, model.GuideTributary(model.Bays.Count - 1), model.Log.Section.Height);
+        LeftGuide = Guide(model, kind, 0);
+        RightGuide = Guide(model, kind, model.Bays.Count - 1);
     }
 
-    private void FillLogs(OpeningModel model)
+    private void FillLoads(OpeningModel model, CaseKind kind)
     {
         var perSlope = 1 / model.CosRake;
         var bottom = 0.0;
@@ -78,14 +81,28 @@ public sealed class CaseEvaluation
             bottom = top;
         }
 
+        if (CaseForces.LineLoad(model, kind) is { } line)
+        {
+            ref var load = ref logLoads[model.LogAt(line.Height)];
+            load = new(load.Characteristic + line.Characteristic, load.Design + line.Design);
+        }
+    }
+
+    private void FillLogs(OpeningModel model, CaseKind kind)
+    {
+        var judgesDeflection = CaseForces.JudgesDeflection(kind);
         for (var bay = 0; bay < model.Bays.Count; bay++)
         {
             var span = model.Span(bay);
             var responses = logs.AsSpan(bay * logLoads.Length, logLoads.Length);
             for (var index = 0; index < responses.Length; index++)
             {
-                responses[index] = LogResponse.Of(logLoads[index], span, model.Log);
+                responses[index] = LogResponse.Of(
+                    logLoads[index], span, model.Log, CaseForces.OnLog(model, kind, bay, index), judgesDeflection);
             }
         }
     }
+
+    private GuideResponse Guide(OpeningModel model, CaseKind kind, int bay) => GuideReaction.Of(
+        logLoads, model.GuideTributary(bay), model.Log.Section.Height, CaseForces.OnGuide(model, kind, bay));
 }

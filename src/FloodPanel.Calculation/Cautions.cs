@@ -1,4 +1,5 @@
 using FloodPanel.Calculation.Actions;
+using FloodPanel.Calculation.Actions.Waves;
 using FloodPanel.Calculation.Handling;
 using FloodPanel.Calculation.ProjectTree;
 using FloodPanel.Calculation.Water;
@@ -6,7 +7,7 @@ using FloodPanel.Calculation.Water;
 namespace FloodPanel.Calculation;
 
 /// <summary>Cautions and results not covered, each only where it applies.</summary>
-internal static class Cautions
+public static class Cautions
 {
     /// <summary>USACE, MP SL-85-5 (1985): unreinforced masonry carries about 3 ft (0.9 m) of water.</summary>
     private const double MasonryDepth = 0.9;
@@ -18,16 +19,15 @@ internal static class Cautions
     public static Note CalculationAid { get; } = new("calculation-aid", new(
         $"This is a calculation aid. It must be checked by a licensed engineer and follow local codes. A barrier can fail or be overtopped: people leave when told to."));
 
-    public static List<Note> Of(
-        Site site, Opening opening, OpeningModel model, IReadOnlyList<LogSchedule> schedule, IReadOnlyList<string> uncomputed)
+    internal static List<Note> Of(
+        Site site, Opening opening, OpeningModel model, IReadOnlyList<LogSchedule> schedule)
     {
         var notes = new List<Note>();
         Levels(notes, site, opening, model);
         Flowing(notes, model);
-        foreach (var action in uncomputed.Where(a => a != "flow"))
+        if (model.Wave is { } wave)
         {
-            notes.Add(new("action-not-computed", new(
-                $"The {action} action in the file is not yet part of the calculation: its load is not in these figures.")));
+            notes.AddRange(WaveNotes.Of(wave, model.Rake));
         }
 
         Strengths(notes, NeededChecks.Logs, model.Log);

@@ -24,8 +24,8 @@ public static class Design
     public static OpeningResult Evaluate(Project project, Opening opening, Library library)
     {
         var site = project.Site;
-        RefuseProblems(Validation.Problems(site, opening, library), nameof(opening));
-        var model = new OpeningModel(site, opening, DesignBases.Of(project.DesignBasis), library);
+        RefuseProblems(Validation.Problems(project, opening, library), nameof(opening));
+        var model = new OpeningModel(site, opening, library.BasisOf(project), library);
         var cases = Cases(model);
         var freeboard = FloodLevels.Freeboard(model.RetainedDepth, site.Freeboard, model.Height);
         var schedule = new LogSchedule[model.Bays.Count];
@@ -34,7 +34,7 @@ public static class Design
             schedule[bay] = LogHandling.Schedule(bay + 1, model.Bays[bay], opening.Barrier.Logs, model.Log);
         }
 
-        var uncomputed = Uncomputed(opening.Actions);
+        var uncovered = Uncovered(model);
         return new()
         {
             Opening = opening,
@@ -46,8 +46,8 @@ public static class Design
             Cases = cases,
             Freeboard = freeboard,
             Schedule = schedule,
-            Verdict = VerdictRules.Of(opening, model, cases, freeboard, uncomputed),
-            Notes = Cautions.Of(site, opening, model, schedule, uncomputed),
+            Verdict = VerdictRules.Of(opening, model, cases, freeboard, uncovered),
+            Notes = Cautions.Of(site, opening, model, schedule),
         };
     }
 
@@ -62,33 +62,30 @@ public static class Design
     private static CaseResult[] Cases(OpeningModel model)
     {
         var numbers = new CaseEvaluation(model.LogCount, model.Bays.Count);
-        var results = new CaseResult[CaseDiagram.All.Count];
+        var results = new CaseResult[model.Cases.Count];
         for (var i = 0; i < results.Length; i++)
         {
-            numbers.Fill(model, CaseDiagram.All[i]);
-            results[i] = CaseReport.Of(model, CaseDiagram.All[i], numbers);
+            numbers.Fill(model, model.Cases[i]);
+            results[i] = CaseReport.Of(model, model.Cases[i], numbers);
         }
 
         return results;
     }
 
-    /// <summary>Actions whose load is not, or not wholly, in the figures: by name.</summary>
-    private static List<string> Uncomputed(ActionSet actions)
+    /// <summary>Actions whose load no method here covers, or not wholly: by name.</summary>
+    private static List<string> Uncovered(OpeningModel model)
     {
         var names = new List<string>();
-        Add(actions.Flow is { Velocity: > Flow.SurchargeVelocityLimit }, "flow");
-        Add(actions.Wave is not null, "wave");
-        Add(actions.Debris is not null, "debris");
-        Add(actions.Wind is not null, "wind");
-        Add(actions.Line is not null, "line");
-        return names;
-
-        void Add(bool applies, string name)
+        if (model.Flow is { Velocity: > Flow.SurchargeVelocityLimit })
         {
-            if (applies)
-            {
-                names.Add(name);
-            }
+            names.Add("flow");
         }
+
+        if (model.Wave is { IsCovered: false })
+        {
+            names.Add("wave");
+        }
+
+        return names;
     }
 }

@@ -42,6 +42,9 @@ public enum Dimension
     /// <summary>Time: s.</summary>
     Time,
 
+    /// <summary>Wave number: rad/m / rad/ft.</summary>
+    WaveNumber,
+
     /// <summary>Mass: kg / lb.</summary>
     Mass,
 

@@ -1,4 +1,5 @@
 using System.Collections.Frozen;
+using FloodPanel.Calculation.Cases;
 using FloodPanel.Calculation.ProjectTree;
 
 namespace FloodPanel.Calculation;
@@ -12,13 +13,24 @@ namespace FloodPanel.Calculation;
 /// <param name="Evidence">How the figures are known: "read", "derived", "memory" or "invented".</param>
 public sealed record LibraryEntry<T>(string Id, string Title, T Item, string Source, string Evidence);
 
-/// <summary>Materials and profiles that a project may name by id. Read from data files by the caller.</summary>
+/// <summary>Materials and profiles that a project may name by id, and the design bases. Read from data files by the caller.</summary>
 /// <param name="materials">The materials.</param>
 /// <param name="profiles">The profiles.</param>
-public sealed class Library(IEnumerable<LibraryEntry<Material>> materials, IEnumerable<LibraryEntry<Profile>> profiles)
+/// <param name="bases">The design bases, one of each kind.</param>
+public sealed class Library(
+    IEnumerable<LibraryEntry<Material>> materials,
+    IEnumerable<LibraryEntry<Profile>> profiles,
+    IEnumerable<DesignBasis> bases)
 {
-    /// <summary>A library without entries: only inline materials and profiles resolve.</summary>
-    public static Library Empty { get; } = new([], []);
+    /// <summary>A library without entries: only inline materials and profiles resolve, under the standard bases.</summary>
+    public static Library Empty { get; } = new([], [], DesignBases.Standard);
+
+    /// <summary>The design bases by kind.</summary>
+    public FrozenDictionary<DesignBasisKind, DesignBasis> Bases { get; } = bases.ToFrozenDictionary(b => b.Kind);
+
+    /// <summary>The design basis of a project: its own copy, or else the one it names.</summary>
+    /// <param name="project">The project.</param>
+    public DesignBasis BasisOf(Project project) => project.OwnBasis ?? Bases[project.DesignBasis];
 
     /// <summary>Materials by id.</summary>
     public FrozenDictionary<string, LibraryEntry<Material>> Materials { get; } = materials.ToFrozenDictionary(m => m.Id);

@@ -1,4 +1,3 @@
-using FloodPanel.Calculation.Cases;
 using FloodPanel.Calculation.Materials;
 using FloodPanel.Calculation.ProjectTree;
 using FloodPanel.Calculation.Sections;

@@ -1,4 +1,6 @@
 using FloodPanel.Calculation.Actions;
+using FloodPanel.Calculation.Actions.Debris;
+using FloodPanel.Calculation.Actions.Waves;
 using FloodPanel.Calculation.Cases;
 using FloodPanel.Calculation.ProjectTree;
 using FloodPanel.Calculation.Water;
@@ -22,6 +24,8 @@ public sealed class OpeningModel
         ProtectedDepth = Math.Max(0, FloodLevels.Depth(opening.ProtectedSideLevel ?? opening.SillLevel, opening.SillLevel));
         ClearWidth = opening.ClearWidth;
         Flow = opening.Actions.Flow;
+        Wind = opening.Actions.Wind;
+        Line = opening.Actions.Line;
         Rake = double.DegreesToRadians(opening.RakeDegrees);
         CosRake = Math.Cos(Rake);
         Log = Member.Of(logs.Material, logs.Profile, logs.DeflectionLimit, basis, library);
@@ -33,7 +37,16 @@ public sealed class OpeningModel
             Post = Member.Of(posts.Material, posts.Profile, posts.DeflectionLimit, basis, library);
             PostWidth = posts.Width;
         }
+
+        var groundDepth = FloodLevels.Depth(site.DesignFloodLevel, opening.GroundLevel ?? opening.SillLevel);
+        Wave = WaveModel.Of(opening.Actions.Wave, UnitWeight, RetainedDepth, groundDepth, Height);
+        Debris = DebrisModel.Of(
+            opening.Actions.Debris, Log, UnitWeight, RetainedDepth, Height, [.. Bays.Select(bay => bay + EndBearing)]);
+        Cases = CaseDiagram.CasesOf(this);
     }
+
+    /// <summary>The load cases of the opening, in the order in which they are shown.</summary>
+    public ValueList<CaseKind> Cases { get; }
 
     /// <summary>Load factors of the basis in the flood zone.</summary>
     public LoadFactors Factors { get; }
@@ -52,6 +65,18 @@ public sealed class OpeningModel
 
     /// <summary>Moving water, or null.</summary>
     public FlowInput? Flow { get; }
+
+    /// <summary>Waves, or null.</summary>
+    public WaveModel? Wave { get; }
+
+    /// <summary>Floating debris, or null.</summary>
+    public DebrisModel? Debris { get; }
+
+    /// <summary>Wind on the dry barrier, or null.</summary>
+    public WindInput? Wind { get; }
+
+    /// <summary>A line load on the dry barrier, or null.</summary>
+    public LineInput? Line { get; }
 
     /// <summary>θ, angle of the face from the vertical [rad].</summary>
     public double Rake { get; }
@@ -89,6 +114,19 @@ public sealed class OpeningModel
     /// <summary>Height z of the lower edge of a log [m].</summary>
     /// <param name="index">Position in the stack from 0; the count of logs gives the top of the barrier.</param>
     public double EdgeHeight(int index) => index * Log.Section.Height * CosRake;
+
+    /// <summary>The log that stands at a height, from 0: bottom ≤ z below its top; the top log at the top of the barrier.</summary>
+    /// <param name="z">Height above the sill [m], 0 to <see cref="Height"/>.</param>
+    public int LogAt(double z)
+    {
+        var index = 0;
+        while (index < LogCount - 1 && z >= EdgeHeight(index + 1))
+        {
+            index++;
+        }
+
+        return index;
+    }
 
     /// <summary>L, effective span of a bay: clear bay and one end bearing [m].</summary>
     /// <param name="bay">Bay from 0.</param>

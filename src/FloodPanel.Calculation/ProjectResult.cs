@@ -1,4 +1,5 @@
 using FloodPanel.Calculation.Actions;
+using FloodPanel.Calculation.Cases;
 using FloodPanel.Calculation.ProjectTree;
 
 namespace FloodPanel.Calculation;
@@ -80,8 +81,14 @@ public sealed record OpeningResult
 /// <summary>One load case of an opening.</summary>
 public sealed record CaseResult
 {
+    /// <summary>Which case.</summary>
+    public required CaseKind Kind { get; init; }
+
     /// <summary>Fixed name, "design-flood".</summary>
-    public required string Name { get; init; }
+    public string Name => CaseNames.InFiles(Kind);
+
+    /// <summary>Load factor of the design basis on the flood side, or on the case's own action [-].</summary>
+    public required double Factor { get; init; }
 
     /// <summary>Unfactored resultant [N per metre of width], normal to the face.</summary>
     public required double Resultant { get; init; }
@@ -108,17 +115,21 @@ public sealed record CaseResult
 /// <summary>One action in a case.</summary>
 /// <param name="Kind">The action.</param>
 /// <param name="Pieces">Its unfactored pressure over height; pieces that overlap add up.</param>
-/// <param name="Resultant">Unfactored resultant [N per metre of width].</param>
+/// <param name="Resultant">Unfactored resultant [N per metre of width]; 0 for debris, which is a force by itself.</param>
 /// <param name="CentreOfPressure">Height z of the resultant [m]; null when there is none.</param>
 /// <param name="Factor">Load factor of the design basis on the flood side [-].</param>
-/// <param name="Working">How the pressures came about.</param>
+/// <param name="Working">How the pressures, or the force, came about.</param>
+/// <param name="ResultantWorking">How the resultant and its height came about.</param>
+/// <param name="Impact">Debris: the force [N] and the height at which posts and guides take it; else null.</param>
 public sealed record ActionResult(
     ActionKind Kind,
     IReadOnlyList<PressurePiece> Pieces,
     double Resultant,
     double? CentreOfPressure,
     double Factor,
-    Working Working);
+    Working Working,
+    Working ResultantWorking,
+    ConcentratedForce? Impact = null);
 
 /// <summary>One log in one bay under one case. A check is null where its inputs are missing.</summary>
 public sealed record LogResult
@@ -138,6 +149,9 @@ public sealed record LogResult
     /// <summary>w, design line load [N/m].</summary>
     public required double LineLoad { get; init; }
 
+    /// <summary>P, design share of a debris impact [N]; 0 where none strikes.</summary>
+    public required double PointLoad { get; init; }
+
     /// <summary>M, design moment [N·m].</summary>
     public required double Moment { get; init; }
 
@@ -156,8 +170,17 @@ public sealed record LogResult
     /// <summary>Shear check, or null.</summary>
     public Check? ShearCheck { get; init; }
 
-    /// <summary>Deflection check.</summary>
-    public required Check DeflectionCheck { get; init; }
+    /// <summary>Deflection check, or null where the deflection is reported and not judged.</summary>
+    public Check? DeflectionCheck { get; init; }
+
+    /// <summary>How the moment came about; null where the bending check tells it.</summary>
+    public Working? MomentWorking { get; init; }
+
+    /// <summary>How the shear force came about; null where the shear check tells it.</summary>
+    public Working? ShearWorking { get; init; }
+
+    /// <summary>How the deflection came about; null where the deflection check tells it.</summary>
+    public Working? DeflectionWorking { get; init; }
 }
 
 /// <summary>One post under one case. A check is null where its inputs are missing.</summary>
@@ -181,8 +204,17 @@ public sealed record PostResult
     /// <summary>Shear check, or null.</summary>
     public Check? ShearCheck { get; init; }
 
-    /// <summary>Deflection check.</summary>
-    public required Check DeflectionCheck { get; init; }
+    /// <summary>Deflection check, or null where the deflection is reported and not judged.</summary>
+    public Check? DeflectionCheck { get; init; }
+
+    /// <summary>How the moment came about; null where the bending check tells it.</summary>
+    public Working? MomentWorking { get; init; }
+
+    /// <summary>How the shear force came about; null where the shear check tells it.</summary>
+    public Working? ShearWorking { get; init; }
+
+    /// <summary>How the deflection came about; null where the deflection check tells it.</summary>
+    public Working? DeflectionWorking { get; init; }
 }
 
 /// <summary>One guide under one case.</summary>

@@ -15,6 +15,14 @@ internal readonly ref struct StepList(int capacity)
     public void Add(string symbol, string formula, double value, Dimension dimension) =>
         steps.Add(new(symbol, formula, value, dimension));
 
+    /// <summary>ρ, g and γ = ρ·g, unit weight of water.</summary>
+    public void UnitWeight(double unitWeight)
+    {
+        Given("ρ", unitWeight / Physics.Gravity, Dimension.Density);
+        Given("g", Physics.Gravity, Dimension.Acceleration);
+        Add("γ", "ρ·g", unitWeight, Dimension.UnitWeight);
+    }
+
     /// <summary>b, e and L = b + e, the effective span of a log.</summary>
     public void Span(double clearBay, double endBearing)
     {

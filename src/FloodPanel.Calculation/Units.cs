@@ -41,6 +41,7 @@ public static class Units
             [Dimension.Velocity] = (new("m/s", 1), new("ft/s", Foot)),
             [Dimension.Acceleration] = (new("m/s²", 1), new("ft/s²", Foot)),
             [Dimension.Time] = (new("s", 1), new("s", 1)),
+            [Dimension.WaveNumber] = (new("rad/m", 1), new("rad/ft", 1 / Foot)),
             [Dimension.Mass] = (new("kg", 1), new("lb", Pound)),
             [Dimension.LineMass] = (new("kg/m", 1), new("lb/ft", Pound / Foot)),
             [Dimension.Density] = (new("kg/m³", 1, 0), new("lb/ft³", Pound / (Foot * Foot * Foot), 1)),

@@ -20,6 +20,7 @@ public static class Validation
             problems.Add("name", $"Project name is empty; give the project a name.");
         }
 
+        BasisValidation.Validate(project, problems);
         ValidateSite(project.Site, problems);
         var ids = new HashSet<string>(StringComparer.Ordinal);
         for (var i = 0; i < project.Openings.Count; i++)
@@ -40,15 +41,16 @@ public static class Validation
         return problems.Problems;
     }
 
-    /// <summary>Problems of one opening and its site, with the paths that they have in a project of their own.</summary>
-    /// <param name="site">Levels and water.</param>
+    /// <summary>Problems of one opening, its site and its basis, with the paths that they have in a project of their own.</summary>
+    /// <param name="project">The project: site and design basis.</param>
     /// <param name="opening">The opening.</param>
     /// <param name="library">The materials and profiles it may name.</param>
-    internal static IReadOnlyList<InputProblem> Problems(Site site, Opening opening, Library library)
+    internal static IReadOnlyList<InputProblem> Problems(Project project, Opening opening, Library library)
     {
         var problems = new ProblemList();
-        ValidateSite(site, problems);
-        ValidateOpening(site, opening, "openings[0]", problems, library);
+        BasisValidation.Validate(project, problems);
+        ValidateSite(project.Site, problems);
+        ValidateOpening(project.Site, opening, "openings[0]", problems, library);
         return problems.Problems;
     }
 

@@ -10,10 +10,10 @@ namespace FloodPanel.Calculation;
 internal static class VerdictRules
 {
     public static Verdict Of(
-        Opening opening, OpeningModel model, IReadOnlyList<CaseResult> cases, Check freeboard, IReadOnlyList<string> uncomputed)
+        Opening opening, OpeningModel model, IReadOnlyList<CaseResult> cases, Check freeboard, IReadOnlyList<string> uncovered)
     {
         var governing = Governing(cases, freeboard);
-        var missing = Missing(opening, model, uncomputed);
+        var missing = Missing(opening, model, uncovered);
         var fails = !freeboard.Passes || Checks(cases).Any(c => !c.Check.Passes);
         var kind = fails ? VerdictKind.Inadequate
             : missing.Count > 0 ? VerdictKind.Incomplete
@@ -28,7 +28,7 @@ internal static class VerdictRules
     public static bool IsNamed(DesignedByOthers declaration) =>
         !string.IsNullOrWhiteSpace(declaration.Name) && !string.IsNullOrWhiteSpace(declaration.Reference);
 
-    private static List<string> Missing(Opening opening, OpeningModel model, IReadOnlyList<string> uncomputed)
+    private static List<string> Missing(Opening opening, OpeningModel model, IReadOnlyList<string> uncovered)
     {
         var missing = new List<string>();
         foreach (var check in NeededChecks.MayBeByOthers)
@@ -46,7 +46,7 @@ internal static class VerdictRules
             }
         }
 
-        missing.AddRange(uncomputed);
+        missing.AddRange(uncovered);
         return missing;
     }
 

@@ -12,6 +12,7 @@ internal static class VerdictWords
         return kind switch
         {
             VerdictKind.Adequate => new($"Adequate. {governs}"),
+            VerdictKind.Inadequate when missing.Count > 0 => new($"Inadequate. {governs} Not yet checked are {List(missing)}."),
             VerdictKind.Inadequate => new($"Inadequate. {governs}"),
             _ => new($"Incomplete: not yet checked are {List(missing)}. {governs}"),
         };

@@ -20,6 +20,12 @@ internal static class CaseWriter
             json.WriteString("kind", Word(action.Kind));
             json.WriteFigure("resultant", action.Resultant);
             json.WriteFigure("centreOfPressure", action.CentreOfPressure);
+            if (action.Impact is { } impact)
+            {
+                json.WriteFigure("force", impact.Characteristic);
+                json.WriteFigure("height", impact.Height);
+            }
+
             json.WriteEndObject();
         }
 

@@ -13,7 +13,7 @@ public class OpeningBenchmarks
     private readonly OpeningModel model = new(
         BenchmarkOpening.Project.Site,
         BenchmarkOpening.Project.Openings[0],
-        DesignBases.Of(BenchmarkOpening.Project.DesignBasis),
+        Library.Empty.BasisOf(BenchmarkOpening.Project),
         Library.Empty);
 
     private readonly HandInlined byHand;

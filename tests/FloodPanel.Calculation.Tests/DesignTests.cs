@@ -1,3 +1,4 @@
+using FloodPanel.Calculation.Cases;
 using FloodPanel.Calculation.ProjectTree;
 using FloodPanel.Calculation.Tests.Generated;
 using FsCheck.Xunit;
@@ -74,7 +75,8 @@ public class DesignTests
         var logs = SampleProject.Dock.Barrier.Logs;
         var library = new Library(
             [new("alloy", "Alloy", SampleProject.Aluminium, "invented", "invented")],
-            [new("plank", "Plank", (Profile)logs.Profile, "invented", "invented")]);
+            [new("plank", "Plank", (Profile)logs.Profile, "invented", "invented")],
+            DesignBases.Standard);
         var named = SampleProject.Dock with
         {
             Barrier = SampleProject.Dock.Barrier with

@@ -32,6 +32,7 @@ public class UnitsTests
         { Dimension.Velocity, "m/s", 1, "ft/s", Speed.FromFeetPerSecond(1).MetersPerSecond },
         { Dimension.Acceleration, "m/s²", 1, "ft/s²", Acceleration.FromFeetPerSecondSquared(1).MetersPerSecondSquared },
         { Dimension.Time, "s", 1, "s", 1 },
+        { Dimension.WaveNumber, "rad/m", 1, "rad/ft", 1 / 0.3048 },
         { Dimension.Mass, "kg", 1, "lb", Mass.FromPounds(1).Kilograms },
         { Dimension.LineMass, "kg/m", 1, "lb/ft", LinearDensity.FromPoundsPerFoot(1).KilogramsPerMeter },
         { Dimension.Density, "kg/m³", 1, "lb/ft³", Density.FromPoundsPerCubicFoot(1).KilogramsPerCubicMeter },

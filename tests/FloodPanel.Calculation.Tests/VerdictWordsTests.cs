@@ -34,7 +34,7 @@ public class VerdictWordsTests
     /// <summary>A barrier of 1.2 m, counted as 1.201 m, where 1.81 m is wanted.</summary>
     [Fact]
     public void Sentence_FreeboardMissed_SaysHowMuchHigher() => Assert.Equal(
-        "Inadequate. Freeboard governs: the barrier should be 1.51 times as high.",
+        "Inadequate. Freeboard governs: the barrier should be 1.51 times as high. Not yet checked are base plates, anchors, guides and supporting wall.",
         SampleProject.Result(Refused.With((Site s) => s with { Freeboard = 0.96 })).Verdict.Sentence.ToString());
 
     /// <summary>Between 1 and 1.005 two decimals would print 1.00 and look like a pass.</summary>
@@ -49,7 +49,7 @@ public class VerdictWordsTests
 
         Assert.Equal(1.0001, verdict.Governing!.Utilisation, tolerance: 1e-9);
         Assert.Equal(
-            "Inadequate. Log bending in the brim-full case governs, at just over 1.00 of the allowable.",
+            "Inadequate. Log bending in the brim-full case governs, at just over 1.00 of the allowable. Not yet checked are base plates, anchors, guides and supporting wall.",
             verdict.Sentence.ToString());
     }
 }

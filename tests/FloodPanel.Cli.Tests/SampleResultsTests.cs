@@ -8,12 +8,15 @@ public class SampleResultsTests
 {
     private const double Tolerance = 0.001;
 
-    private static readonly string[] CasesOfThisVersion = ["design-flood", "brim-full"];
-
     [Theory]
     [InlineData("dock", "design-flood", 118)]
+    [InlineData("dock", "wave", 118)]
+    [InlineData("dock", "debris", 118)]
     [InlineData("dock", "brim-full", 118)]
+    [InlineData("dock", "wind", 118)]
+    [InlineData("dock", "line", 118)]
     [InlineData("side", "design-flood", 69)]
+    [InlineData("side", "wave", 69)]
     [InlineData("side", "brim-full", 69)]
     public void Check_SampleProject_AgreesWithin1In1000(string opening, string loadCase, int figures)
     {
@@ -40,15 +43,18 @@ public class SampleResultsTests
         }
     }
 
-    [Fact]
-    public void Check_SampleProject_HasTheCasesOfThisVersion()
+    [Theory]
+    [InlineData("dock")]
+    [InlineData("side")]
+    public void Check_SampleProject_HasTheSameCases(string opening)
     {
         var result = Invocation.Of("check", Invocation.Sample("sample-project.json")).Result;
 
-        Assert.All(
-            result["openings"]!.AsArray(),
-            o => Assert.Equal(CasesOfThisVersion, o!["cases"]!.AsArray().Select(c => c!["name"]!.GetValue<string>())));
+        Assert.Equal(CaseNames(Opening(Expected(), opening)), CaseNames(Opening(result, opening)));
     }
+
+    private static IEnumerable<string> CaseNames(JsonNode opening) =>
+        opening["cases"]!.AsArray().Select(c => c!["name"]!.GetValue<string>());
 
     private static JsonObject Expected() => JsonNode.Parse(File.ReadAllText(Invocation.Sample("sample-results.json")))!.AsObject();
 

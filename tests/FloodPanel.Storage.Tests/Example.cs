@@ -1,4 +1,5 @@
 using System.Text.Json.Nodes;
+using FloodPanel.Calculation.Cases;
 using FloodPanel.Storage.ProjectFile;
 
 namespace FloodPanel.Storage.Tests;
@@ -14,6 +15,7 @@ internal static class Example
         Address = "1 Weir Lane\nLower Tarn",
         Engineer = "P. Holm",
         DesignBasis = DesignBasisKind.Eurocode,
+        OwnBasis = DesignBases.Eurocode with { Title = "Eurocode with the national annex", Inland = new(1.4, 0.9, 1.2, 1.1, 1.3, 1.6) },
         Site = new Site
         {
             Datum = "ordnance",

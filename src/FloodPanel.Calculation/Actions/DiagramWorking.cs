@@ -23,9 +23,29 @@ internal static class DiagramWorking
         return new(title, Source, steps);
     }
 
+    /// <summary>Working of a line load as a resultant: the force itself, at its height.</summary>
+    public static Working Resultant(string title, ConcentratedForce line) => new(title, "The line load itself",
+    [
+        new("R", "", line.Characteristic, Dimension.LineForce),
+        new("z_R", "", line.Height, Dimension.Length),
+    ]);
+
     /// <summary>Working of the line load on a log between two heights.</summary>
+    /// <param name="title">Title of the working.</param>
+    /// <param name="pieces">The pressure of the case.</param>
+    /// <param name="bottom">Lower edge of the log [m].</param>
+    /// <param name="top">Upper edge of the log [m].</param>
+    /// <param name="rake">θ [rad].</param>
+    /// <param name="load">The line load that the steps must end in.</param>
+    /// <param name="line">A line load that the log takes besides; null for none.</param>
     public static Working LineLoad(
-        string title, ReadOnlySpan<PressurePiece> pieces, double bottom, double top, double rake, FactoredLoad load)
+        string title,
+        ReadOnlySpan<PressurePiece> pieces,
+        double bottom,
+        double top,
+        double rake,
+        FactoredLoad load,
+        ConcentratedForce? line)
     {
         Span<PressurePiece> parts = stackalloc PressurePiece[pieces.Length];
         var count = 0;
@@ -40,10 +60,21 @@ internal static class DiagramWorking
         var steps = new List<CalculationStep>(6 * count + 3);
         AddRake(steps, rake);
         AddForces(steps, parts[..count], rake, withArms: false, withFactors: true);
-        steps.Add(new("w_k", PieceSymbols.SumOfForces(count), load.Characteristic, Dimension.LineForce));
-        steps.Add(new("w", PieceSymbols.SumOfDesignForces(count), load.Design, Dimension.LineForce));
+        if (line is { } force)
+        {
+            steps.Add(new("w_L", "", force.Characteristic, Dimension.LineForce));
+            steps.Add(new("γ_L", "", force.Factor, Dimension.Ratio));
+        }
+
+        var (own, ownDesign) = line is null ? ("", "") : ("w_L", "γ_L·w_L");
+        steps.Add(new("w_k", Joined(PieceSymbols.SumOfForces(count), own), load.Characteristic, Dimension.LineForce));
+        steps.Add(new("w", Joined(PieceSymbols.SumOfDesignForces(count), ownDesign), load.Design, Dimension.LineForce));
         return new(title, Source, steps);
     }
+
+    /// <summary>Two terms with a plus sign between them, or the one that is there.</summary>
+    public static string Joined(string first, string second) =>
+        first.Length > 0 && second.Length > 0 ? $"{first} + {second}" : first + second;
 
     /// <summary>θ as a given value, where the face is raked.</summary>
     public static void AddRake(List<CalculationStep> steps, double rake)

@@ -8,44 +8,64 @@ namespace FloodPanel.Calculation.Cases;
 /// <summary>Turns the numbers of a load case into a result with checks and working.</summary>
 internal static class CaseReport
 {
-    public static CaseResult Of(OpeningModel model, CaseKind kind, CaseEvaluation numbers) => new()
+    public static CaseResult Of(OpeningModel model, CaseKind kind, CaseEvaluation numbers)
     {
-        Name = CaseNames.InFiles(kind),
-        Resultant = numbers.Diagram.Force / model.CosRake,
-        CentreOfPressure = numbers.Diagram.CentreOfPressure,
-        ResultantWorking = DiagramWorking.Resultant("Unfactored resultant", numbers.Diagram, model.Rake),
-        Actions = ActionReport.Of(model, kind),
-        Logs = Logs(model, numbers),
-        Posts = Posts(model, numbers),
-        Guides = Guides(model, numbers),
-    };
+        const string title = "Unfactored resultant";
+        var line = CaseForces.LineLoad(model, kind);
+        return new()
+        {
+            Kind = kind,
+            Factor = CaseDiagram.Factor(model.Factors, kind),
+            Resultant = line?.Characteristic ?? numbers.Diagram.Force / model.CosRake,
+            CentreOfPressure = line?.Height ?? numbers.Diagram.CentreOfPressure,
+            ResultantWorking = line is { } force
+                ? DiagramWorking.Resultant(title, force)
+                : DiagramWorking.Resultant(title, numbers.Diagram, model.Rake),
+            Actions = ActionReport.Of(model, kind),
+            Logs = Logs(model, kind, numbers),
+            Posts = Posts(model, kind, numbers),
+            Guides = Guides(model, kind, numbers),
+        };
+    }
 
-    private static LogResult[] Logs(OpeningModel model, CaseEvaluation numbers)
+    private static LogResult[] Logs(OpeningModel model, CaseKind kind, CaseEvaluation numbers)
     {
         var count = model.LogCount;
         var results = new LogResult[numbers.Logs.Length];
         for (var index = 0; index < count; index++)
         {
-            var (bottom, top) = (model.EdgeHeight(index), model.EdgeHeight(index + 1));
-            var load = numbers.LogLoads[index];
-            var working = DiagramWorking.LineLoad("Line load on the log", numbers.Diagram.Pieces, bottom, top, model.Rake, load);
+            var working = LineLoad(model, kind, numbers, index);
             for (var bay = 0; bay < model.Bays.Count; bay++)
             {
                 // Checks are immutable: a bay as wide as an earlier one shares them.
                 var twin = FirstBayAsWide(model.Bays, bay);
                 results[bay * count + index] = twin < bay
                     ? results[twin * count + index] with { Bay = bay + 1 }
-                    : Log(model, numbers.Logs[bay * count + index], load, index, bay, working);
+                    : Log(model, kind, numbers.Logs[bay * count + index], index, bay, working);
             }
         }
 
         return results;
     }
 
-    private static LogResult Log(
-        OpeningModel model, in LogResponse response, FactoredLoad load, int index, int bay, Working lineLoad)
+    private static Working LineLoad(OpeningModel model, CaseKind kind, CaseEvaluation numbers, int index)
     {
-        var (clear, bearing) = (model.Bays[bay], model.EndBearing);
+        var line = CaseForces.LineLoad(model, kind);
+        return DiagramWorking.LineLoad(
+            "Line load on the log",
+            numbers.Diagram.Pieces,
+            model.EdgeHeight(index),
+            model.EdgeHeight(index + 1),
+            model.Rake,
+            numbers.LogLoads[index],
+            line is { } force && model.LogAt(force.Height) == index ? force : null);
+    }
+
+    private static LogResult Log(
+        OpeningModel model, CaseKind kind, in LogResponse response, int index, int bay, Working lineLoad)
+    {
+        var (clear, bearing, log) = (model.Bays[bay], model.EndBearing, model.Log);
+        var judged = CaseForces.JudgesDeflection(kind);
         return new()
         {
             Index = index + 1,
@@ -53,24 +73,30 @@ internal static class CaseReport
             Bottom = model.EdgeHeight(index),
             Top = model.EdgeHeight(index + 1),
             LineLoad = response.LineLoad,
+            PointLoad = response.Point.Design,
             Moment = response.Moment,
             Shear = response.Shear,
             Deflection = response.Deflection,
             LineLoadWorking = lineLoad,
-            BendingCheck = LogChecks.Bending(response, clear, bearing, model.Log),
-            ShearCheck = LogChecks.Shear(response, clear, bearing, model.Log),
-            DeflectionCheck = LogChecks.Deflection(response, load.Characteristic, clear, bearing, model.Log),
+            BendingCheck = LogChecks.Bending(response, clear, bearing, log),
+            ShearCheck = LogChecks.Shear(response, clear, bearing, log),
+            DeflectionCheck = judged ? LogChecks.Deflection(response, clear, bearing, log) : null,
+            MomentWorking = log.Bending is null ? LogChecks.Moment(response, clear, bearing) : null,
+            ShearWorking = log.Shear is null ? LogChecks.ShearForce(response, clear, bearing) : null,
+            DeflectionWorking = judged ? null : LogChecks.DeflectionOnly(response, clear, bearing, log),
         };
     }
 
-    private static PostResult[] Posts(OpeningModel model, CaseEvaluation numbers)
+    private static PostResult[] Posts(OpeningModel model, CaseKind kind, CaseEvaluation numbers)
     {
         var results = new PostResult[numbers.Posts.Length];
+        var judged = CaseForces.JudgesDeflection(kind);
         for (var post = 0; post < results.Length; post++)
         {
             var response = numbers.Posts[post];
             var setting = new PostChecks.Setting(
-                numbers.Diagram, model.Post!, model.PostTributary(post), model.FaceLength, model.Rake);
+                numbers.Diagram, model.Post!, model.PostTributary(post), model.FaceLength, model.Rake,
+                CaseForces.OnPost(model, kind, post));
             results[post] = new()
             {
                 Index = post + 1,
@@ -79,26 +105,32 @@ internal static class CaseReport
                 TipDeflection = response.TipDeflection,
                 BendingCheck = PostChecks.Bending(response, setting),
                 ShearCheck = PostChecks.Shear(response, setting),
-                DeflectionCheck = PostChecks.Deflection(response, setting),
+                DeflectionCheck = judged ? PostChecks.Deflection(response, setting) : null,
+                MomentWorking = model.Post!.Bending is null ? PostChecks.Moment(response, setting) : null,
+                ShearWorking = model.Post.Shear is null ? PostChecks.ShearForce(response, setting) : null,
+                DeflectionWorking = judged ? null : PostChecks.DeflectionOnly(response, setting),
             };
         }
 
         return results;
     }
 
-    private static GuideResult[] Guides(OpeningModel model, CaseEvaluation numbers)
+    private static GuideResult[] Guides(OpeningModel model, CaseKind kind, CaseEvaluation numbers)
     {
+        var last = model.Bays.Count - 1;
         return
         [
-            Guide("left", numbers.LeftGuide, model.Bays[0]),
-            Guide("right", numbers.RightGuide, model.Bays[^1]),
+            Guide("left", numbers.LeftGuide, 0, numbers.LogLoads),
+            Guide("right", numbers.RightGuide, last, numbers.LogLoads),
         ];
 
-        GuideResult Guide(string side, GuideResponse response, double clearBay) => new(
+        GuideResult Guide(string side, GuideResponse response, int bay, ReadOnlySpan<FactoredLoad> loads) => new(
             side,
             response.Reaction,
             response.PeakLineReaction,
-            GuideReaction.Explain(response, numbers.LogLoads, clearBay, model.EndBearing, model.Log.Section.Height));
+            GuideReaction.Explain(
+                response, loads, model.Bays[bay], model.EndBearing, model.Log.Section.Height,
+                CaseForces.OnGuide(model, kind, bay)));
     }
 
     private static int FirstBayAsWide(ValueList<double> bays, int bay)

@@ -1,6 +1,6 @@
 namespace FloodPanel.Calculation.Logs;
 
-/// <summary>A simply supported beam of span L under a uniform line load w.</summary>
+/// <summary>A simply supported beam of span L under a uniform line load w or a force P.</summary>
 public static class SimpleBeam
 {
     /// <summary>Source of the formulas, as printed.</summary>
@@ -22,4 +22,16 @@ public static class SimpleBeam
     /// <param name="stiffness">E·I [N·m²], > 0.</param>
     public static double Deflection(double lineLoad, double span, double stiffness) =>
         5 * lineLoad * span * span * span * span / (384 * stiffness);
+
+    /// <summary>M = P·L/4, moment at mid-span under a force there [N·m].</summary>
+    /// <param name="force">P [N].</param>
+    /// <param name="span">L [m].</param>
+    public static double PointMoment(double force, double span) => force * span / 4;
+
+    /// <summary>δ = P·L³/(48·E·I), deflection at mid-span under a force there [m]; shear deformation not included.</summary>
+    /// <param name="force">P [N].</param>
+    /// <param name="span">L [m].</param>
+    /// <param name="stiffness">E·I [N·m²], > 0.</param>
+    public static double PointDeflection(double force, double span, double stiffness) =>
+        force * span * span * span / (48 * stiffness);
 }

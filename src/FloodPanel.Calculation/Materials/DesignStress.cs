@@ -1,4 +1,3 @@
-using FloodPanel.Calculation.Cases;
 using FloodPanel.Calculation.ProjectTree;
 
 namespace FloodPanel.Calculation.Materials;

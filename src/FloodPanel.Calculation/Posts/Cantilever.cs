@@ -8,11 +8,13 @@ namespace FloodPanel.Calculation.Posts;
 /// <param name="TipDeflection">δ, unfactored deflection of the tip [m].</param>
 /// <param name="Bending">Utilisation in bending [-]; 0 when the stress is missing, see <see cref="Member.IsComplete"/>.</param>
 /// <param name="ShearUse">Utilisation in shear [-]; 0 when the stress is missing.</param>
-/// <param name="DeflectionUse">Utilisation of the deflection limit [-].</param>
+/// <param name="DeflectionUse">Utilisation of the deflection limit [-]; 0 when deflection is not judged.</param>
 public readonly record struct PostResponse(
     double BaseShear, double BaseMoment, double TipDeflection, double Bending, double ShearUse, double DeflectionUse);
 
-/// <summary>A post fixed at its base and free at its top, loaded by the pressure diagram over a tributary width.</summary>
+/// <summary>
+/// A post fixed at its base and free at its top, loaded by the pressure diagram over a tributary width and by a force.
+/// </summary>
 public static class Cantilever
 {
     /// <summary>Source of the formulas, as printed.</summary>
@@ -24,12 +26,20 @@ public static class Cantilever
     /// <param name="tributary">b_t, width of face that loads the post [m], > 0.</param>
     /// <param name="length">ℓ, length of the post along the face [m], > 0.</param>
     /// <param name="cosRake">cos θ, so that a point at slope distance s stands at z = s·cos θ [-].</param>
+    /// <param name="force">F, a force on the post [N], normal to the face at its height.</param>
+    /// <param name="judgesDeflection">False where the deflection is reported and not judged.</param>
     /// <remarks>
-    /// q(s) = p(z)·b_t. V = ∫q ds, M = ∫q·s ds, δ = ∫q·s²·(3ℓ − s) ds/(6·E·I), each exact for the straight pieces
-    /// of the diagram. Source: beam statics (unit-load theorem). Limits: fixed base, bending deformation only.
+    /// q(s) = p(z)·b_t. V = ∫q ds + F, M = ∫q·s ds + F·s_F, δ = (∫q·s²·(3ℓ − s) ds + F·s_F²·(3ℓ − s_F))/(6·E·I), each
+    /// exact for the straight pieces of the diagram. Source: beam statics (unit-load theorem). Limits: fixed base, bending deformation only.
     /// </remarks>
     public static PostResponse Respond(
-        PressureDiagram diagram, Member post, double tributary, double length, double cosRake)
+        PressureDiagram diagram,
+        Member post,
+        double tributary,
+        double length,
+        double cosRake,
+        ConcentratedForce force = default,
+        bool judgesDeflection = true)
     {
         var (shear, moment, deflection) = (0.0, 0.0, 0.0);
         var toSlope = 1 / cosRake;
@@ -40,16 +50,27 @@ public static class Cantilever
             deflection += TipIntegral(piece, length, toSlope);
         }
 
-        shear *= tributary * toSlope;
-        moment *= tributary * toSlope * toSlope;
-        deflection *= tributary / (6 * post.Stiffness);
+        var arm = force.Height * toSlope;
+        shear = shear * tributary * toSlope + force.Design;
+        moment = moment * tributary * toSlope * toSlope + force.Design * arm;
+        deflection = (deflection * tributary + TipTerm(force, length, toSlope)) / (6 * post.Stiffness);
         return new(
             shear,
             moment,
             deflection,
             moment / post.MomentResistance,
             shear / post.ShearResistance,
-            deflection / (length / post.DeflectionLimit));
+            judgesDeflection ? deflection / (length / post.DeflectionLimit) : 0);
+    }
+
+    /// <summary>K = F·s_F²·(3ℓ − s_F) of a force [N·m³], s_F = z_F/cos θ.</summary>
+    /// <param name="force">The force.</param>
+    /// <param name="length">ℓ, length of the post [m].</param>
+    /// <param name="toSlope">1/cos θ [-].</param>
+    internal static double TipTerm(ConcentratedForce force, double length, double toSlope)
+    {
+        var arm = force.Height * toSlope;
+        return force.Characteristic * arm * arm * (3 * length - arm);
     }
 
     /// <summary>J = ∫p·s²·(3ℓ − s) ds over one piece [N·m²], s = z/cos θ.</summary>

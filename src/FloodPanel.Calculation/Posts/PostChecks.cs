@@ -2,19 +2,25 @@ using FloodPanel.Calculation.Actions;
 
 namespace FloodPanel.Calculation.Posts;
 
-/// <summary>The checks of a post as a cantilever from its base.</summary>
+/// <summary>The checks of a post as a cantilever from its base, and the same working where there is nothing to check against.</summary>
 internal static class PostChecks
 {
+    private const string UnitLoad = "Beam statics (unit-load theorem)";
+
     /// <summary>What a post stands in.</summary>
     /// <param name="Diagram">Pressure normal to the face.</param>
     /// <param name="Post">The post.</param>
     /// <param name="Tributary">b_t, width of face that loads the post [m].</param>
     /// <param name="Length">ℓ, length of the post [m].</param>
     /// <param name="Rake">θ [rad].</param>
+    /// <param name="Force">F, a force on the post [N].</param>
     internal readonly record struct Setting(
-        PressureDiagram Diagram, Member Post, double Tributary, double Length, double Rake);
+        PressureDiagram Diagram, Member Post, double Tributary, double Length, double Rake, ConcentratedForce Force)
+    {
+        public bool HasForce => Force.Characteristic != 0;
+    }
 
-    /// <summary>Bending: M = b_t·Σγ·w·z/cos θ against M_R = f_b·W; null without a design bending stress.</summary>
+    /// <summary>Bending: M = b_t·Σγ·w·z/cos θ + γ_F·F·z_F/cos θ against M_R = f_b·W; null without a design bending stress.</summary>
     public static Check? Bending(in PostResponse response, Setting setting)
     {
         if (setting.Post.Bending is not { } stress)
@@ -22,11 +28,7 @@ internal static class PostChecks
             return null;
         }
 
-        var steps = Forces(setting, withArms: true);
-        var count = setting.Diagram.Pieces.Length;
-        var terms = PieceSymbols.Sum(count, n => $"γ_{n}·w_{n}·z_{n}");
-        var formula = count == 0 ? "" : setting.Rake == 0 ? $"b_t·({terms})" : $"b_t·({terms})/cos(θ)";
-        steps.Add("M", formula, response.BaseMoment, Dimension.Moment);
+        var steps = MomentSteps(response, setting);
         steps.Stress("f_b", stress);
         steps.Given("W", setting.Post.Section.Modulus, Dimension.SectionModulus);
         steps.Add("M_R", "f_b·W", setting.Post.MomentResistance, Dimension.Moment);
@@ -36,7 +38,7 @@ internal static class PostChecks
             response.BaseMoment, setting.Post.MomentResistance, steps.Done());
     }
 
-    /// <summary>Shear: V = b_t·Σγ·w against V_R = f_v·A_v; null without a design shear stress.</summary>
+    /// <summary>Shear: V = b_t·Σγ·w + γ_F·F against V_R = f_v·A_v; null without a design shear stress.</summary>
     public static Check? Shear(in PostResponse response, Setting setting)
     {
         if (setting.Post.Shear is not { } stress)
@@ -44,10 +46,7 @@ internal static class PostChecks
             return null;
         }
 
-        var steps = Forces(setting, withArms: false);
-        var count = setting.Diagram.Pieces.Length;
-        var formula = count == 0 ? "" : $"b_t·({PieceSymbols.SumOfDesignForces(count)})";
-        steps.Add("V", formula, response.BaseShear, Dimension.Force);
+        var steps = ShearSteps(response, setting);
         steps.Stress("f_v", stress);
         steps.Given("A_v", setting.Post.Section.ShearArea, Dimension.SectionArea);
         steps.Add("V_R", "f_v·A_v", setting.Post.ShearResistance, Dimension.Force);
@@ -60,29 +59,74 @@ internal static class PostChecks
     /// <summary>Deflection of the tip, unfactored, against ℓ/n.</summary>
     public static Check Deflection(in PostResponse response, Setting setting)
     {
-        var (post, length) = (setting.Post, setting.Length);
+        var limit = setting.Length / setting.Post.DeflectionLimit;
+        var steps = DeflectionSteps(response, setting);
+        steps.Given("n", setting.Post.DeflectionLimit, Dimension.Count);
+        steps.Add("δ_lim", "ℓ/n", limit, Dimension.Deflection);
+        steps.Add("u", "δ/δ_lim", response.DeflectionUse, Dimension.Ratio);
+        return new(
+            "post-deflection", "Post deflection", $"{UnitLoad}; limit chosen by the user",
+            Dimension.Deflection, response.TipDeflection, limit, steps.Done());
+    }
+
+    /// <summary>How the moment came about, where no bending check tells it.</summary>
+    public static Working Moment(in PostResponse response, Setting setting) =>
+        new("Moment at the base of the post", Cantilever.Source, MomentSteps(response, setting).Done());
+
+    /// <summary>How the shear force came about, where no shear check tells it.</summary>
+    public static Working ShearForce(in PostResponse response, Setting setting) =>
+        new("Shear force at the base of the post", Cantilever.Source, ShearSteps(response, setting).Done());
+
+    /// <summary>How the deflection came about, where it is not judged.</summary>
+    public static Working DeflectionOnly(in PostResponse response, Setting setting) =>
+        new("Deflection of the tip of the post", UnitLoad, DeflectionSteps(response, setting).Done());
+
+    private static StepList MomentSteps(in PostResponse response, Setting setting)
+    {
+        var steps = Forces(setting, withArms: true);
+        var count = setting.Diagram.Pieces.Length;
+        var toSlope = setting.Rake == 0 ? "" : "/cos(θ)";
+        var distributed = count == 0 ? "" : $"b_t·({PieceSymbols.Sum(count, n => $"γ_{n}·w_{n}·z_{n}")}){toSlope}";
+        AddForce(steps, setting, withFactor: true);
+        steps.Add("M", DiagramWorking.Joined(distributed, setting.HasForce ? $"γ_F·F·z_F{toSlope}" : ""), response.BaseMoment, Dimension.Moment);
+        return steps;
+    }
+
+    private static StepList ShearSteps(in PostResponse response, Setting setting)
+    {
+        var steps = Forces(setting, withArms: false);
+        var count = setting.Diagram.Pieces.Length;
+        AddForce(steps, setting, withFactor: true);
+        var distributed = count == 0 ? "" : $"b_t·({PieceSymbols.SumOfDesignForces(count)})";
+        steps.Add("V", DiagramWorking.Joined(distributed, setting.HasForce ? "γ_F·F" : ""), response.BaseShear, Dimension.Force);
+        return steps;
+    }
+
+    private static StepList DeflectionSteps(in PostResponse response, Setting setting)
+    {
         var toSlope = 1 / Math.Cos(setting.Rake);
         var steps = new StepList(40);
         DiagramWorking.AddRake(steps.Steps, setting.Rake);
         steps.Given("b_t", setting.Tributary, Dimension.Length);
-        steps.Given("ℓ", length, Dimension.Length);
+        steps.Given("ℓ", setting.Length, Dimension.Length);
         var pieces = setting.Diagram.Pieces;
         for (var i = 0; i < pieces.Length; i++)
         {
-            AddTip(steps, PieceSymbols.At(i), pieces[i], setting.Rake, Cantilever.TipIntegral(pieces[i], length, toSlope));
+            AddTip(steps, PieceSymbols.At(i), pieces[i], setting.Rake, Cantilever.TipIntegral(pieces[i], setting.Length, toSlope));
         }
 
-        var formula = pieces.Length == 0 ? "" : $"b_t·({PieceSymbols.Sum(pieces.Length, n => $"J_{n}")})/(6·E·I)";
-        var limit = length / post.DeflectionLimit;
-        steps.Given("E", post.Material.ElasticModulus, Dimension.ElasticModulus);
-        steps.Given("I", post.Section.Inertia, Dimension.SecondMoment);
-        steps.Add("δ", formula, response.TipDeflection, Dimension.Deflection);
-        steps.Given("n", post.DeflectionLimit, Dimension.Count);
-        steps.Add("δ_lim", "ℓ/n", limit, Dimension.Deflection);
-        steps.Add("u", "δ/δ_lim", response.DeflectionUse, Dimension.Ratio);
-        return new(
-            "post-deflection", "Post deflection", "Beam statics (unit-load theorem); limit chosen by the user",
-            Dimension.Deflection, response.TipDeflection, limit, steps.Done());
+        var tip = pieces.Length == 0 ? "" : $"b_t·({PieceSymbols.Sum(pieces.Length, n => $"J_{n}")})";
+        if (setting.HasForce)
+        {
+            AddForce(steps, setting, withFactor: false);
+            steps.Add("s_F", setting.Rake == 0 ? "z_F" : "z_F/cos(θ)", setting.Force.Height * toSlope, Dimension.Length);
+            tip = DiagramWorking.Joined(tip, "F·s_F²·(3·ℓ − s_F)");
+        }
+
+        steps.Given("E", setting.Post.Material.ElasticModulus, Dimension.ElasticModulus);
+        steps.Given("I", setting.Post.Section.Inertia, Dimension.SecondMoment);
+        steps.Add("δ", tip.Length == 0 ? "" : $"({tip})/(6·E·I)", response.TipDeflection, Dimension.Deflection);
+        return steps;
     }
 
     private static StepList Forces(Setting setting, bool withArms)
@@ -92,6 +136,22 @@ internal static class PostChecks
         steps.Given("b_t", setting.Tributary, Dimension.Length);
         DiagramWorking.AddForces(steps.Steps, setting.Diagram.Pieces, setting.Rake, withArms, withFactors: true);
         return steps;
+    }
+
+    /// <summary>F and its height, and its factor where that matters.</summary>
+    private static void AddForce(StepList steps, Setting setting, bool withFactor)
+    {
+        if (!setting.HasForce)
+        {
+            return;
+        }
+
+        steps.Given("F", setting.Force.Characteristic, Dimension.Force);
+        steps.Given("z_F", setting.Force.Height, Dimension.Length);
+        if (withFactor)
+        {
+            steps.Given("γ_F", setting.Force.Factor, Dimension.Ratio);
+        }
     }
 
     private static void AddTip(

@@ -45,7 +45,7 @@ public sealed record NonBreakingWaveInput : WaveInput
     /// <summary>H_max, design wave height [m], > 0.</summary>
     public double Height { get; init; }
 
-    /// <summary>T, wave period [s], > 0.</summary>
+    /// <summary>T, wave period [s], at least 0.5.</summary>
     public double Period { get; init; }
 
     /// <summary>β, angle between wave direction and the normal to the wall [degrees], 0 to 90.</summary>

@@ -72,7 +72,7 @@ public static class Fields
     public static Field WaveHeight { get; } = new("height", "Wave height", Dimension.Length, 0, 20, "Design wave height.", true);
 
     /// <summary>NonBreakingWaveInput.Period.</summary>
-    public static Field WavePeriod { get; } = new("period", "Wave period", Dimension.Time, 0, 60, "Wave period.", true);
+    public static Field WavePeriod { get; } = new("period", "Wave period", Dimension.Time, 0.5, 60, "Wave period.");
 
     /// <summary>NonBreakingWaveInput.AngleDegrees.</summary>
     public static Field WaveAngle { get; } = new("angle", "Wave angle", Dimension.Degrees, 0, 90, "Between wave direction and the normal to the wall.");
@@ -100,6 +100,12 @@ public static class Fields
 
     /// <summary>LineInput.Height.</summary>
     public static Field LineLoadHeight { get; } = new("height", "Line load height", Dimension.Length, 0, 30, "Above the sill.");
+
+    /// <summary>LoadFactors, each of them.</summary>
+    public static Field LoadFactor { get; } = new("factor", "Load factor", Dimension.Ratio, 0.1, 5, "On the load, for strength checks; deflections are not factored.");
+
+    /// <summary>StrengthRule.Multiplier and StrengthRule.Divisor.</summary>
+    public static Field StrengthFactor { get; } = new("factor", "Strength factor", Dimension.Ratio, 0.1, 10, "Multiplies or divides the characteristic strength.");
 
     /// <summary>LogStack.Count.</summary>
     public static Field LogCount { get; } = new("count", "Number of logs", Dimension.Count, 1, 100, "Logs in the stack.");

@@ -21,6 +21,9 @@ public sealed record Project
     /// <summary>The rule set for factors on loads and strengths.</summary>
     public DesignBasisKind DesignBasis { get; init; } = DesignBasisKind.AllowableStress;
 
+    /// <summary>A copy of a design basis, edited for this project; null where the standard one applies.</summary>
+    public DesignBasis? OwnBasis { get; init; }
+
     /// <summary>Levels and water.</summary>
     public Site Site { get; init; } = new();
 

@@ -51,11 +51,6 @@ internal static class OwnerAdvice
             _ => "This barrier must not be built from this summary yet: checks are still to be made.",
         };
         List<string> words = [verdict.Sentence.In(units)];
-        if (verdict.Kind == VerdictKind.Inadequate && verdict.Missing.Count > 0)
-        {
-            words.Add($"Not yet checked are {List(verdict.Missing.Select(NeededChecks.Title))}.");
-        }
-
         if (others.Length > 0)
         {
             words.Add($"Designed by others: {List(others)}.");

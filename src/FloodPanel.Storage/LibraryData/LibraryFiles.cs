@@ -2,7 +2,7 @@ using FloodPanel.Storage.ProjectFile;
 
 namespace FloodPanel.Storage.LibraryData;
 
-/// <summary>Reads materials and profiles from the data folder. Every row is checked; one bad row refuses the library.</summary>
+/// <summary>Reads materials, profiles and design bases from the data folder. Every row is checked; one bad row refuses the library.</summary>
 public static class LibraryFiles
 {
     private static readonly string[] MaterialColumns =
@@ -30,7 +30,7 @@ public static class LibraryFiles
     /// <summary>The data folder that is delivered beside the program.</summary>
     public static string DeliveredFolder => Path.Combine(AppContext.BaseDirectory, "data");
 
-    /// <summary>Reads materials.csv and profiles.csv.</summary>
+    /// <summary>Reads materials.csv, profiles.csv and design-bases.json.</summary>
     /// <exception cref="LibraryFileException">A file is missing, or a row is wrong.</exception>
     public static Library Load(string folder)
     {
@@ -39,7 +39,8 @@ public static class LibraryFiles
             .Select(m => m with { Item = m.Item with { Name = m.Title } });
         var profiles = new LibraryTable(folder, "profiles.csv", ProfileColumns, problems)
             .Read(row => row.Word("shape", Shapes)?.Invoke(row));
-        return problems.Count == 0 ? new Library(materials, profiles) : throw new LibraryFileException(problems);
+        var bases = BasisFile.Read(folder, problems);
+        return problems.Count == 0 ? new Library(materials, profiles, bases) : throw new LibraryFileException(problems);
     }
 
     private static Material ReadMaterial(LibraryRow row) => new()

@@ -84,6 +84,7 @@ public static class ProjectFileReader
     private static Project ReadProject(FileObject file)
     {
         var blank = new Project();
+        var kind = file.Word("designBasis", FileWords.DesignBasis, blank.DesignBasis);
         var project = new Project
         {
             Name = file.Text("name"),
@@ -91,7 +92,8 @@ public static class ProjectFileReader
             Client = file.Text("client", blank.Client),
             Address = file.Text("address", blank.Address),
             Engineer = file.Text("engineer", blank.Engineer),
-            DesignBasis = file.Word("designBasis", FileWords.DesignBasis, blank.DesignBasis),
+            DesignBasis = kind,
+            OwnBasis = file.Object("ownBasis") is { } basis ? BasisReader.Read(basis, kind) : null,
             Site = file.NeededObject("site") is { } site ? ReadSite(site) : blank.Site,
             Openings = file.List("openings").Select(OpeningReader.Read).ToValueList(),
         };

@@ -48,6 +48,11 @@ public static class ProjectFileWriter
         json.WriteString("address", project.Address);
         json.WriteString("engineer", project.Engineer);
         json.WriteString("designBasis", FileWords.DesignBasis.Of(project.DesignBasis));
+        if (project.OwnBasis is { } basis)
+        {
+            BasisWriter.Write(json, basis);
+        }
+
         WriteSite(json, project.Site);
         json.WriteStartArray("openings");
         foreach (var opening in project.Openings)

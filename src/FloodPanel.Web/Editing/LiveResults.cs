@@ -27,22 +27,23 @@ public sealed class LiveResults(Library library)
                 var opening = project.Openings[i];
                 results[opening.Id] = kept.TryGetValue(opening.Id, out var old) && ReferenceEquals(old.Result.Opening, opening)
                     ? old
-                    : new Calculated(project.Site, project.DesignBasis, Design.Evaluate(project, opening, library));
+                    : new Calculated(project.Site, project.DesignBasis, project.OwnBasis, Design.Evaluate(project, opening, library));
             }
         }
     }
 
     private static bool IsCurrent(Calculated calculated, Project project) =>
-        calculated.DesignBasis == project.DesignBasis && calculated.Site == project.Site;
+        calculated.DesignBasis == project.DesignBasis && calculated.OwnBasis == project.OwnBasis && calculated.Site == project.Site;
 
     // Names and addresses are not calculated with; levels and the opening's own figures are.
     private bool MayCalculate(int opening) => !Problems.Any(p =>
         p.Path.StartsWith("site", StringComparison.Ordinal)
         || p.Path.StartsWith("designBasis", StringComparison.Ordinal)
+        || p.Path.StartsWith("ownBasis", StringComparison.Ordinal)
         || p.Path.StartsWith(PathOf(opening), StringComparison.Ordinal));
 
     /// <summary>Path of an opening in the project file, "openings[0]".</summary>
     public static string PathOf(int opening) => FormattableString.Invariant($"openings[{opening}]");
 
-    private sealed record Calculated(Site Site, DesignBasisKind DesignBasis, OpeningResult Result);
+    private sealed record Calculated(Site Site, DesignBasisKind DesignBasis, DesignBasis? OwnBasis, OpeningResult Result);
 }

@@ -92,12 +92,12 @@ public class PressureDiagramTests
     [Property(MaxTest = 200, Arbitrary = [typeof(Scenarios)])]
     public void Force_AnyOpening_AgreesWithQuadrature(Scenario scenario)
     {
-        Assert.All(scenario.Result.Cases, @case =>
+        Assert.All(scenario.Result.Cases.Where(c => c.Name is not ("wave" or "line")), @case =>
         {
             var water = new HandWater(scenario, @case.Name);
             var height = scenario.Result.BarrierHeight;
             var cosRake = Math.Cos(scenario.Opening.RakeDegrees * Math.PI / 180);
-            var terms = water.Integral(z => water.FloodSide(z) + water.ProtectedSide(z) + water.Flow(z), 0, height) / cosRake;
+            var terms = water.Integral(z => water.FloodSide(z) + water.ProtectedSide(z) + water.Flow(z) + water.Wind(z), 0, height) / cosRake;
 
             var resultant = water.Integral(water.Pressure, 0, height) / cosRake;
             var moment = water.Integral(z => water.Pressure(z) * z, 0, height) / cosRake;

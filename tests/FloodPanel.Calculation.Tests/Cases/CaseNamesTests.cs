@@ -6,11 +6,15 @@ public class CaseNamesTests
 {
     [Fact]
     public void InFiles_Cases_AsInTheProjectFile() =>
-        Assert.Equal(["design-flood", "brim-full"], CaseDiagram.All.Select(CaseNames.InFiles));
+        Assert.Equal(
+            ["design-flood", "wave", "debris", "brim-full", "wind", "line"],
+            Enum.GetValues<CaseKind>().Select(CaseNames.InFiles));
 
     [Theory]
     [InlineData("design-flood", "design flood")]
     [InlineData("brim-full", "brim-full")]
+    [InlineData("wave", "wave")]
+    [InlineData("line", "line load")]
     public void InWords_Name_AsInASentence(string name, string words) => Assert.Equal(words, CaseNames.InWords(name));
 
     [Fact]

@@ -10,8 +10,17 @@ internal sealed class HandWater(Scenario scenario, string caseName)
 {
     private readonly double unitWeight = scenario.Site.WaterDensity * 9.80665;
     private readonly double height = scenario.Result.BarrierHeight;
-    private readonly double flood = caseName == "brim-full" ? scenario.Result.BarrierHeight : scenario.Result.RetainedDepth;
-    private readonly double behind = caseName == "brim-full" ? 0 : scenario.Result.ProtectedDepth;
+    private readonly double flood = caseName switch
+    {
+        "brim-full" => scenario.Result.BarrierHeight,
+        "wind" or "line" => 0,
+        _ => scenario.Result.RetainedDepth,
+    };
+
+    private readonly double behind = caseName is "brim-full" or "wind" or "line" ? 0 : scenario.Result.ProtectedDepth;
+
+    /// <summary>True for the cases whose pressure is written out here.</summary>
+    public bool Knows => caseName is not ("wave" or "line");
 
     public double FloodSide(double z) => unitWeight * Math.Max(0, flood - z);
 
@@ -20,7 +29,7 @@ internal sealed class HandWater(Scenario scenario, string caseName)
     public double Flow(double z)
     {
         var wetted = Math.Min(flood, height);
-        if (caseName == "brim-full" || scenario.Opening.Actions.Flow is not { } flow || z > wetted)
+        if (caseName is "brim-full" or "wind" || scenario.Opening.Actions.Flow is not { } flow || z > wetted)
         {
             return 0;
         }
@@ -32,15 +41,23 @@ internal sealed class HandWater(Scenario scenario, string caseName)
             : Math.Max(surcharge, Drag(scenario.Opening.ClearWidth / wetted) * scenario.Site.WaterDensity * square / 2);
     }
 
+    public double Wind(double z) => caseName == "wind" && z <= height ? scenario.Opening.Actions.Wind!.Pressure : 0;
+
     /// <summary>Unfactored pressure.</summary>
-    public double Pressure(double z) => FloodSide(z) - ProtectedSide(z) + Flow(z);
+    public double Pressure(double z) => FloodSide(z) - ProtectedSide(z) + Flow(z) + Wind(z);
 
     /// <summary>Factored pressure.</summary>
     public double Design(double z)
     {
-        var (floodSide, protectedSide, brimFull) = HandFactors.Of(scenario.Project.DesignBasis, scenario.Site.FloodZone);
-        var factor = caseName == "brim-full" ? brimFull : floodSide;
-        return factor * (FloodSide(z) + Flow(z)) - protectedSide * ProtectedSide(z);
+        var factors = HandFactors.Of(scenario.Project.DesignBasis, scenario.Site.FloodZone);
+        var factor = caseName switch
+        {
+            "brim-full" => factors.BrimFull,
+            "debris" => factors.Debris,
+            "wind" => factors.Wind,
+            _ => factors.FloodSide,
+        };
+        return factor * (FloodSide(z) + Flow(z) + Wind(z)) - factors.ProtectedSide * ProtectedSide(z);
     }
 
     /// <summary>∫ f dz over a band of height.</summary>

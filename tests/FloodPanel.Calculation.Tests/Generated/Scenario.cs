@@ -1,4 +1,3 @@
-using FloodPanel.Calculation.Cases;
 using FloodPanel.Calculation.ProjectTree;
 
 namespace FloodPanel.Calculation.Tests.Generated;
@@ -12,7 +11,7 @@ public sealed record Scenario(Project Project)
 
     internal OpeningResult Result => Design.Evaluate(Project, Opening, Library.Empty);
 
-    internal OpeningModel Model => new(Site, Opening, DesignBases.Of(Project.DesignBasis), Library.Empty);
+    internal OpeningModel Model => new(Site, Opening, Library.Empty.BasisOf(Project), Library.Empty);
 
     internal CaseResult DesignFlood => Result.Cases.Single(c => c.Name == "design-flood");
 

@@ -45,7 +45,7 @@ public class LogChecksTests
     [Fact]
     public void Deflection_Plank_ByHand()
     {
-        var check = LogChecks.Deflection(Response, 1_600, 1.75, 0.05, Plank);
+        var check = LogChecks.Deflection(Response, 1.75, 0.05, Plank);
 
         Hand.Equal(0.006075, check.Demand);
         Hand.Equal(0.009, check.Capacity);

@@ -1,3 +1,4 @@
+using FloodPanel.Calculation.Cases;
 using FloodPanel.Calculation.ProjectTree;
 
 namespace FloodPanel.Calculation.Tests.ProjectTree;
@@ -25,7 +26,8 @@ public class ChoiceValidationTests
     {
         var library = new Library(
             [new("oak", "Oak", SampleProject.Aluminium, "", "invented")],
-            [new("h100", "H", new Rectangle { Height = 0.1, Depth = 0.1 }, "", "invented")]);
+            [new("h100", "H", new Rectangle { Height = 0.1, Depth = 0.1 }, "", "invented")],
+            DesignBases.Standard);
         var project = Refused.With((LogStack l) => l with { Material = new LibraryMaterial("oak"), Profile = new LibraryProfile("h100") });
 
         Assert.Empty(project.Validate(library));

@@ -17,6 +17,7 @@ internal readonly record struct Exponents(int Metre, int Kilogram, int Second)
         Dimension.Velocity => new(1, 0, -1),
         Dimension.Acceleration => new(1, 0, -2),
         Dimension.Time => new(0, 0, 1),
+        Dimension.WaveNumber => new(-1, 0, 0),
         Dimension.Mass => new(0, 1, 0),
         Dimension.LineMass => new(-1, 1, 0),
         Dimension.Density => new(-3, 1, 0),

@@ -4,7 +4,7 @@ namespace FloodPanel.Calculation.Tests.Steps;
 
 /// <summary>
 /// Reads and works out the formula of a step by recursive descent, in the language that <see cref="CalculationStep"/>
-/// allows: symbols, numbers, + − · / ( ) ² ³ ⁴ √, π and min, max, cos. Anything else is refused.
+/// allows: symbols, numbers, + − · / ( ) ² ³ ⁴ ^ √, π and min, max, cos, sin, tan, sinh, cosh, tanh, exp. Anything else is refused.
 /// </summary>
 internal sealed class FormulaReader
 {
@@ -72,6 +72,11 @@ internal sealed class FormulaReader
     private Measured Power()
     {
         var value = Primary();
+        if (Took('^'))
+        {
+            return value.Function(x => Math.Pow(x, Primary().Value));
+        }
+
         var power = Took('²') ? 2 : Took('³') ? 3 : Took('⁴') ? 4 : 1;
         return power == 1 ? value : value.Power(power);
     }
@@ -98,7 +103,13 @@ internal sealed class FormulaReader
         {
             "" => throw Refusal(),
             "π" => Measured.Number(Math.PI),
-            "cos" => Call(1)[0].Cosine(),
+            "cos" => Call(1)[0].Function(Math.Cos),
+            "sin" => Call(1)[0].Function(Math.Sin),
+            "tan" => Call(1)[0].Function(Math.Tan),
+            "sinh" => Call(1)[0].Function(Math.Sinh),
+            "cosh" => Call(1)[0].Function(Math.Cosh),
+            "tanh" => Call(1)[0].Function(Math.Tanh),
+            "exp" => Call(1)[0].Function(Math.Exp),
             "min" => Call(2) is var pair ? Measured.Least(pair[0], pair[1]) : default,
             "max" => Call(2) is var pair ? Measured.Greatest(pair[0], pair[1]) : default,
             _ => known.TryGetValue(word, out var value) ? value : throw new FormatException($"'{word}' is not known in '{formula}'"),

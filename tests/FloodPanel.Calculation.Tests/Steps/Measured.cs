@@ -30,9 +30,14 @@ internal readonly record struct Measured(double Value, double Terms, Exponents U
 
     public Measured Root() => new(Math.Sqrt(Value), Math.Sqrt(Terms), Unit.Half());
 
-    public Measured Cosine() => Unit == Exponents.None
-        ? new(Math.Cos(Value), 1, Exponents.None)
-        : throw new FormatException($"cosine of a number with the unit {Unit}");
+    /// <summary>A function of a pure number.</summary>
+    public Measured Function(Func<double, double> function)
+    {
+        var value = function(Value);
+        return Unit == Exponents.None
+            ? new(value, Math.Max(1, Math.Abs(value)), Exponents.None)
+            : throw new FormatException($"a function of a number with the unit {Unit}");
+    }
 
     /// <summary>Zero has any unit: max(0, h).</summary>
     private static Exponents SameUnit(Measured a, Measured b) =>

@@ -64,5 +64,5 @@ public class PressureStackTests
     }
 
     private static ActionResult Action(ActionKind kind, params PressurePiece[] pieces) =>
-        new(kind, pieces, pieces.Sum(p => p.Force), null, 1, NoWorking);
+        new(kind, pieces, pieces.Sum(p => p.Force), null, 1, NoWorking, NoWorking);
 }

@@ -8,7 +8,7 @@ public sealed class LibraryFilesTests : IDisposable
 
     public LibraryFilesTests()
     {
-        foreach (var file in Directory.GetFiles(LibraryFiles.DeliveredFolder, "*.csv"))
+        foreach (var file in Directory.GetFiles(LibraryFiles.DeliveredFolder))
         {
             File.Copy(file, Path.Combine(folder, Path.GetFileName(file)));
         }

@@ -20,6 +20,8 @@ public class RefusalTests
     [InlineData("openings[1]", "7", "openings[1]: The value is 7; allowed is an object in braces.")]
     [InlineData("name", "false", "name: The value is false; allowed is text in double quotes.")]
     [InlineData("designBasis", "\"lrfd\"", "designBasis: The value is \"lrfd\"; allowed is \"allowable-stress\", \"us-strength\" or \"eurocode\".")]
+    [InlineData("ownBasis.inland.debris", "true", "ownBasis.inland.debris: The value is true; allowed is a finite number.")]
+    [InlineData("ownBasis.strengths[0].family", "\"gold\"", "ownBasis.strengths[0].family: The value is \"gold\"; allowed is \"aluminium\", \"steel\", \"timber\" or \"composite\".")]
     [InlineData("site.floodZone", "\"v\"", "site.floodZone: The value is \"v\"; allowed is \"inland\", \"coastal-a\" or \"coastal-high-hazard\".")]
     [InlineData("openings[0].actions.wave.kind", "\"big\"", "openings[0].actions.wave.kind: The value is \"big\"; allowed is \"breaking\" or \"non-breaking\".")]
     [InlineData("openings[0].barrier.logs.material", "5", "openings[0].barrier.logs.material: The value is 5; allowed is a library id or a material with its own figures.")]
@@ -36,6 +38,10 @@ public class RefusalTests
     [InlineData("name")]
     [InlineData("site")]
     [InlineData("site.designStillWaterLevel")]
+    [InlineData("ownBasis.title")]
+    [InlineData("ownBasis.coastal")]
+    [InlineData("ownBasis.coastal.line")]
+    [InlineData("ownBasis.strengths[1].divisor")]
     [InlineData("openings[0].id")]
     [InlineData("openings[0].sillLevel")]
     [InlineData("openings[0].clearWidth")]
@@ -171,11 +177,11 @@ public class RefusalTests
     {
         string[] nullable =
         [
-            "openings", "levels", "wall", "actions", "flow", "wave", "debris", "coefficients", "wind", "line", "posts", "byOthers", "groundLevel",
+            "ownBasis", "strengths", "openings", "levels", "wall", "actions", "flow", "wave", "debris", "coefficients", "wind", "line", "posts", "byOthers", "groundLevel",
             "protectedSideLevel", "response", "bendingStrength", "shearStrength", "allowableBending", "allowableShear",
         ];
         string[] whole = ["count", "webs", "riskCategory"];
-        string[] emptyAllowed = ["openings", "levels", "bays", "byOthers", "wall", "actions", "coefficients"];
+        string[] emptyAllowed = ["strengths", "openings", "levels", "bays", "byOthers", "wall", "actions", "coefficients"];
         string[] libraryId = ["material", "profile"];
         string[] words = ["format", "designBasis", "floodZone", "kind", "family", "shape"];
         var name = place.Name;

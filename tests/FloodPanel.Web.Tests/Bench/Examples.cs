@@ -1,4 +1,5 @@
 using FloodPanel.Calculation;
+using FloodPanel.Calculation.Cases;
 using FloodPanel.Calculation.ProjectTree;
 using Barrier = FloodPanel.Calculation.ProjectTree.Barrier;
 
@@ -67,7 +68,8 @@ internal static class Examples
 
     public static Library Library { get; } = new(
         [new("alloy", "Test alloy", Aluminium, "Invented for tests", "invented")],
-        [new("log", "Test log", (Profile)Garage.Barrier.Logs.Profile, "Invented for tests", "invented")]);
+        [new("log", "Test log", (Profile)Garage.Barrier.Logs.Profile, "Invented for tests", "invented")],
+        DesignBases.Standard);
 
     public static OpeningResult Result(Opening opening) =>
         Design.Evaluate(Mill with { Openings = [opening] }, opening, Library.Empty);

@@ -49,5 +49,5 @@ public class LadderFaceTests
     [Fact]
     public void Strips_NoPressure_AreNone() => Assert.Empty(LadderFace.Strips([Action(ActionKind.Hydrostatic)], height: 1));
 
-    private static ActionResult Action(ActionKind kind, params PressurePiece[] pieces) => new(kind, pieces, 0, null, 1, None);
+    private static ActionResult Action(ActionKind kind, params PressurePiece[] pieces) => new(kind, pieces, 0, null, 1, None, None);
 }

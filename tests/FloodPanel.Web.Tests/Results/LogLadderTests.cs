@@ -51,7 +51,7 @@ public class LogLadderTests : BunitContext
     {
         var result = Examples.Result(Examples.Garage);
         var log = result.Cases[0].Logs[0];
-        var worst = new[] { log.BendingCheck!, log.ShearCheck!, log.DeflectionCheck }.MaxBy(check => check.Utilisation)!;
+        var worst = new[] { log.BendingCheck!, log.ShearCheck!, log.DeflectionCheck! }.MaxBy(check => check.Utilisation)!;
 
         var ladder = Show(result);
 

@@ -92,10 +92,16 @@ public static class Figures
             LineLoad when log is not null => Of(log.LineLoadWorking, $"{LogName(log)}, {inCase}"),
             LogBending when log?.BendingCheck is { } check => Of(check, $"{LogName(log)}, {inCase}"),
             LogShear when log?.ShearCheck is { } check => Of(check, $"{LogName(log)}, {inCase}"),
-            LogDeflection when log is not null => Of(log.DeflectionCheck, $"{LogName(log)}, {inCase}"),
+            LogBending when log?.MomentWorking is { } working => Of(working, $"{LogName(log)}, {inCase}"),
+            LogShear when log?.ShearWorking is { } working => Of(working, $"{LogName(log)}, {inCase}"),
+            LogDeflection when log?.DeflectionCheck is { } check => Of(check, $"{LogName(log)}, {inCase}"),
+            LogDeflection when log?.DeflectionWorking is { } working => Of(working, $"{LogName(log)}, {inCase}"),
             PostBending when post?.BendingCheck is { } check => Of(check, $"{PostName(post)}, {inCase}"),
             PostShear when post?.ShearCheck is { } check => Of(check, $"{PostName(post)}, {inCase}"),
-            PostDeflection when post is not null => Of(post.DeflectionCheck, $"{PostName(post)}, {inCase}"),
+            PostBending when post?.MomentWorking is { } working => Of(working, $"{PostName(post)}, {inCase}"),
+            PostShear when post?.ShearWorking is { } working => Of(working, $"{PostName(post)}, {inCase}"),
+            PostDeflection when post?.DeflectionCheck is { } check => Of(check, $"{PostName(post)}, {inCase}"),
+            PostDeflection when post?.DeflectionWorking is { } working => Of(working, $"{PostName(post)}, {inCase}"),
             _ => null,
         };
     }
