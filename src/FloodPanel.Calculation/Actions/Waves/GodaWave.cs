@@ -1,3 +1,5 @@
+using MathNet.Numerics.RootFinding;
+
 namespace FloodPanel.Calculation.Actions.Waves;
 
 /// <summary>Depths at a wall under waves [m].</summary>
@@ -24,6 +26,19 @@ public readonly record struct GodaWave(
     /// <summary>H_max/H_s, design over significant wave height [-].</summary>
     public const double DesignHeightRatio = 1.8;
 
+    /// <summary>H_b/L_0, steepest wave before it breaks in deep water [-], in Goda's breaker formula.</summary>
+    private const double HighestSteepness = 0.17;
+
+    /// <summary>Of the greatest height [m].</summary>
+    private const double Accuracy = 1e-10;
+
+    /// <summary>
+    /// Steepest bed, rise over run [-], 1 in 10. The data behind the breaker formula end there (Y. Goda, Reanalysis of
+    /// regular and random breaking wave statistics, Coastal Engineering Journal 52, 2010, abstract), and on steeper beds
+    /// waves plunge onto the wall with impulses that the pressure formula does not hold (from memory).
+    /// </summary>
+    public const double SteepestBed = 0.1;
+
     /// <summary>The pressures of a wave.</summary>
     /// <param name="height">H_max, design wave height [m], > 0.</param>
     /// <param name="period">T, wave period [s], > 0.</param>
@@ -34,7 +49,8 @@ public readonly record struct GodaWave(
     /// <remarks>
     /// η* = 0.75·(1 + cos β)·H_max; α_1 = 0.6 + (2kh/sinh 2kh)²/2; α_2 = min((h_b − d)/(3h_b)·(H_max/d)², 2d/H_max);
     /// α_3 = 1 − h′/h·(1 − 1/cosh kh); p_1 = (1 + cos β)/2·(α_1 + α_2·cos²β)·γ·H_max; p_3 = α_3·p_1. Linear between.
-    /// Limits: vertical wall without a caisson's modification factors; waves up to <see cref="GreatestHeight"/>.
+    /// Limits: vertical wall without a caisson's modification factors; waves up to <see cref="DepthLimit"/> on beds
+    /// up to <see cref="SteepestBed"/>.
     /// </remarks>
     public static GodaWave Of(double height, double period, double angle, double unitWeight, WaveDepths depths)
     {
@@ -64,19 +80,38 @@ public readonly record struct GodaWave(
     public static double SeawardDepth(double depth, double height, double bedSlope) =>
         depth + 5 * height / DesignHeightRatio * bedSlope;
 
-    /// <summary>H_b, greatest wave height that the depth lets through [m].</summary>
+    /// <summary>H_b, wave height that a depth seaward lets through [m].</summary>
     /// <param name="period">T, wave period [s], > 0.</param>
     /// <param name="seawardDepth">h_b, depth five significant wave heights seaward [m], > 0.</param>
     /// <param name="bedSlope">m, slope of the bed, rise over run [-], ≥ 0.</param>
     /// <exception cref="ArgumentOutOfRangeException">An argument is out of range or not finite.</exception>
     /// <remarks>Source: Goda (from memory): H_b = 0.17·L_0·(1 − exp(−1.5·π·h_b/L_0·(1 + 15·m^(4/3)))).</remarks>
-    public static double GreatestHeight(double period, double seawardDepth, double bedSlope)
+    public static double DepthLimit(double period, double seawardDepth, double bedSlope)
     {
         Guard.Positive(seawardDepth);
         Guard.NonNegative(bedSlope);
 
         var length = Dispersion.DeepWaterLength(period);
-        return 0.17 * length * (1 - Math.Exp(-1.5 * Math.PI * seawardDepth / length * (1 + 15 * Math.Pow(bedSlope, 4.0 / 3))));
+        return HighestSteepness * length
+            * (1 - Math.Exp(-1.5 * Math.PI * seawardDepth / length * (1 + 15 * Math.Pow(bedSlope, 4.0 / 3))));
+    }
+
+    /// <summary>Greatest wave height at a wall: the one that is as high as its own depth limit [m].</summary>
+    /// <param name="period">T, wave period [s], > 0.</param>
+    /// <param name="depth">h, depth in front of the wall [m], > 0.</param>
+    /// <param name="bedSlope">m, slope of the bed, rise over run [-], ≥ 0.</param>
+    /// <exception cref="ArgumentOutOfRangeException">An argument is out of range or not finite.</exception>
+    /// <remarks>
+    /// On a slope a higher wave is measured in deeper water, h_b, so that its limit is higher too. The limit less the
+    /// height is concave in the height, positive for none and not positive at 0.17·L_0: it crosses zero once. A wave is
+    /// below its own limit exactly when it is below this height.
+    /// </remarks>
+    public static double GreatestHeight(double period, double depth, double bedSlope)
+    {
+        var highest = HighestSteepness * Dispersion.DeepWaterLength(period);
+        var scale = DepthLimit(period, depth, bedSlope);
+        return Brent.FindRoot(
+            height => (DepthLimit(period, SeawardDepth(depth, height, bedSlope), bedSlope) - height) / scale, 0, highest, Accuracy);
     }
 
     /// <summary>p_4, pressure at a height above still water [Pa]; 0 above η*.</summary>

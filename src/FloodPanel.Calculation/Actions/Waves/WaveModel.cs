@@ -25,8 +25,14 @@ public sealed class WaveModel
     /// <summary>Greatest wave height that the method takes here [m]; null where the depth itself sets the wave.</summary>
     public double? GreatestHeight { get; }
 
-    /// <summary>False when the wave is higher than the depth allows: then there is no wave load, and no case.</summary>
-    public bool IsCovered => Input is not NonBreakingWaveInput wave || !(wave.Height > GreatestHeight);
+    /// <summary>
+    /// False when the wave is higher than the depth allows, or the bed steeper than the method's: then there is no wave
+    /// load, and no case.
+    /// </summary>
+    public bool IsCovered => !(Input is NonBreakingWaveInput wave && (wave.Height > GreatestHeight || IsTooSteep));
+
+    /// <summary>True when the bed is steeper than the method of non-breaking waves allows.</summary>
+    public bool IsTooSteep => Input is NonBreakingWaveInput { BedSlope: > GodaWave.SteepestBed } && !IsDry;
 
     /// <summary>True when outside ground stays dry, so that no wave reaches the opening.</summary>
     public bool IsDry => !(Setting.GroundDepth > 0);
@@ -83,12 +89,11 @@ public sealed class WaveModel
     {
         var (depth, still) = (setting.GroundDepth, setting.RetainedDepth);
         var goda = setting.Goda(wave);
-        var seaward = GodaWave.SeawardDepth(depth, wave.Height, wave.BedSlope);
         return new(
             wave,
             setting,
             still + goda.Crest,
-            GodaWave.GreatestHeight(wave.Period, seaward, wave.BedSlope),
+            GodaWave.GreatestHeight(wave.Period, depth, wave.BedSlope),
             Below(setting, goda.AtFoot),
             new(setting.Ground, still, goda.AtFoot, goda.AtStillWater, 1),
             new(still, still + goda.Crest, goda.AtStillWater, 0, 1));

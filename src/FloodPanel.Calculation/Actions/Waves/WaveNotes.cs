@@ -1,4 +1,5 @@
 using FloodPanel.Calculation.ProjectTree;
+using FloodPanel.Calculation.Water;
 
 namespace FloodPanel.Calculation.Actions.Waves;
 
@@ -14,6 +15,13 @@ internal static class WaveNotes
             yield break;
         }
 
+        if (wave is { IsTooSteep: true, Input: NonBreakingWaveInput steep })
+        {
+            yield return new("wave-not-covered", new(
+                $"The bed rises by {new Quantity(steep.BedSlope, Dimension.Ratio)}, and the method covers no more than {new Quantity(GodaWave.SteepestBed, Dimension.Ratio)}: on a steeper bed waves may break on the barrier. Take the waves as breaking."));
+            yield break;
+        }
+
         if (wave is { IsCovered: false, Input: NonBreakingWaveInput high, GreatestHeight: { } limit })
         {
             yield return new("wave-not-covered", new(
@@ -21,7 +29,7 @@ internal static class WaveNotes
             yield break;
         }
 
-        if (wave.CrestHeight > wave.Setting.Height)
+        if (wave.CrestHeight > wave.Setting.Height + FloodLevels.HeightTolerance)
         {
             yield return new("wave-overtopping", new(
                 $"Wave crests reach {Length(wave.CrestHeight - wave.Setting.Height)} above the top of the barrier: water comes over it. What passes over does not load it."));
@@ -31,6 +39,12 @@ internal static class WaveNotes
         {
             yield return new("wave-raked-face", new(
                 $"The wave load is that on a vertical face; on the raked face it is not reduced, which is safe."));
+        }
+
+        if (wave.Input is BreakingWaveInput)
+        {
+            yield return new("wave-head-on", new(
+                $"Breaking waves are taken to meet the barrier head-on, whatever their direction, which is safe; flow is not added to them."));
         }
     }
 

@@ -73,7 +73,7 @@ internal static class WaveWorking
         steps.Add("h_b", "h_g + 5·H_max/1.8·m", seaward, Dimension.Length);
         steps.Add(
             "H_lim", "0.17·L_0·(1 − 1/exp(1.5·π·h_b/L_0·(1 + 15·m^(4/3))))",
-            GodaWave.GreatestHeight(wave.Period, seaward, wave.BedSlope), Dimension.Length);
+            GodaWave.DepthLimit(wave.Period, seaward, wave.BedSlope), Dimension.Length);
     }
 
     private static void Compare(StepList steps, NonBreakingWaveInput wave, WaveSetting setting, GodaWave goda)
