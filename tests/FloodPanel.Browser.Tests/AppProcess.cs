@@ -1,3 +1,4 @@
+using System.Collections.Concurrent;
 using System.Diagnostics;
 using System.Net;
 using System.Net.Sockets;
@@ -8,18 +9,26 @@ namespace FloodPanel.Browser.Tests;
 internal sealed class AppProcess : IDisposable
 {
     private readonly Process process;
+    private readonly ConcurrentQueue<string> output = [];
 
-    private AppProcess(Process process, Uri address, TimeSpan toFirstPage)
+    private AppProcess(Process process, Uri address)
     {
         this.process = process;
         Address = address;
-        ToFirstPage = toFirstPage;
+        process.OutputDataReceived += Keep;
+        process.ErrorDataReceived += Keep;
+        process.BeginOutputReadLine();
+        process.BeginErrorReadLine();
     }
 
     public Uri Address { get; }
 
     /// <summary>From the start of the process to the last byte of the first page.</summary>
-    public TimeSpan ToFirstPage { get; }
+    public TimeSpan ToFirstPage { get; private set; }
+
+    /// <summary>Lines in which the app's log tells of an error.</summary>
+    public IEnumerable<string> Faults => output.Where(line =>
+        line.StartsWith("fail:", StringComparison.Ordinal) || line.StartsWith("crit:", StringComparison.Ordinal));
 
     /// <summary>Starts the app and waits until it answers.</summary>
     /// <exception cref="InvalidOperationException">It ended, or did not answer within a minute.</exception>
@@ -33,24 +42,21 @@ internal sealed class AppProcess : IDisposable
             Environment = { ["FloodPanel__DataFolder"] = dataFolder },
         };
         var clock = Stopwatch.StartNew();
-        var process = Process.Start(start)!;
-        process.OutputDataReceived += (_, _) => { };
-        process.ErrorDataReceived += (_, _) => { };
-        process.BeginOutputReadLine();
-        process.BeginErrorReadLine();
+        var app = new AppProcess(Process.Start(start)!, address);
         using var client = new HttpClient { BaseAddress = address };
-        while (clock.Elapsed < TimeSpan.FromMinutes(1) && !process.HasExited)
+        while (clock.Elapsed < TimeSpan.FromMinutes(1) && !app.process.HasExited)
         {
             if (await AnswersAsync(client))
             {
-                return new(process, address, clock.Elapsed);
+                app.ToFirstPage = clock.Elapsed;
+                return app;
             }
 
             await Task.Delay(20);
         }
 
-        process.Kill();
-        throw new InvalidOperationException($"The app did not answer at {address}.");
+        app.Dispose();
+        throw new InvalidOperationException($"The app did not answer at {address}; it said: {string.Join('\n', app.output)}");
     }
 
     /// <summary>SIGKILL: the process gets no chance to save anything.</summary>
@@ -90,6 +96,14 @@ internal sealed class AppProcess : IDisposable
         catch (HttpRequestException)
         {
             return false;
+        }
+    }
+
+    private void Keep(object sender, DataReceivedEventArgs line)
+    {
+        if (line.Data is not null)
+        {
+            output.Enqueue(line.Data);
         }
     }
 

@@ -6,6 +6,9 @@ namespace FloodPanel.Browser.Tests;
 [Collection(Chromium.OneAtATime)]
 public sealed class NarrowScreenTests : IDisposable
 {
+    /// <summary>Each page of the project, and what shows that its content has come.</summary>
+    private static readonly (string Tab, string Landmark)[] Tabs = [("Site", "level-sum"), ("Openings", "openings"), ("Garage entrance", "ladder")];
+
     private readonly string dataFolder = Directory.CreateTempSubdirectory("floodpanel-narrow-").FullName;
 
     public void Dispose() => Directory.Delete(dataFolder, recursive: true);
@@ -26,19 +29,23 @@ public sealed class NarrowScreenTests : IDisposable
         await desk.OpenProjectsAsync();
         await AssertFitsAsync(page, "Projects");
         await desk.OpenProjectAsync("Sallow Reach boat workshop");
-        foreach (var tab in new[] { "Site", "Openings", "Garage entrance" })
+        foreach (var (tab, landmark) in Tabs)
         {
             await desk.TabAsync(tab);
+            await page.GetByTestId(landmark).WaitForAsync();
             await AssertFitsAsync(page, tab);
         }
 
         Assert.Empty(watch.Complaints);
+        Assert.Empty(app.Faults);
     }
 
+    // The screen as a whole, and the part of it below the bars, which scrolls by itself.
     private static async Task AssertFitsAsync(IPage page, string name)
     {
-        var width = await page.EvaluateAsync<int>("document.scrollingElement.scrollWidth");
+        var excess = await page.EvaluateAsync<int[]>(
+            "() => [document.scrollingElement, document.querySelector('main')].map(e => e.scrollWidth - e.clientWidth)");
 
-        Assert.True(width <= 400, $"{name} is {width} pixels wide on a screen of 400.");
+        Assert.True(excess is [0, 0], $"{name} is wider than a screen of 400 pixels: the page by {excess[0]}, its main part by {excess[1]}.");
     }
 }

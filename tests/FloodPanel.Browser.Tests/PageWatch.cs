@@ -1,3 +1,4 @@
+using System.Collections.Concurrent;
 using Microsoft.Playwright;
 
 namespace FloodPanel.Browser.Tests;
@@ -6,7 +7,7 @@ namespace FloodPanel.Browser.Tests;
 internal sealed class PageWatch
 {
     private readonly Uri own;
-    private readonly List<string> complaints = [];
+    private readonly ConcurrentQueue<string> complaints = [];
 
     public PageWatch(IPage page, Uri own)
     {
@@ -14,16 +15,17 @@ internal sealed class PageWatch
         page.Console += (_, message) => Note(message.Type == "error", $"console: {message.Text}");
         page.PageError += (_, error) => Note(true, $"error: {error}");
         page.Request += (_, request) => Note(IsForeign(request.Url), $"request to {request.Url}");
+        page.WebSocket += (_, socket) => Note(IsForeign(socket.Url), $"connection to {socket.Url}");
         page.Response += (_, response) => Note(response.Status >= 400, $"{response.Status} from {response.Url}");
     }
 
-    public IReadOnlyList<string> Complaints => complaints;
+    public IReadOnlyCollection<string> Complaints => complaints;
 
     private void Note(bool applies, string complaint)
     {
         if (applies)
         {
-            complaints.Add(complaint);
+            complaints.Enqueue(complaint);
         }
     }
 
