@@ -181,6 +181,9 @@ public sealed record LogResult
 
     /// <summary>How the deflection came about; null where the deflection check tells it.</summary>
     public Working? DeflectionWorking { get; init; }
+
+    /// <summary>The checks that have a result.</summary>
+    public IEnumerable<Check> Checks => new[] { BendingCheck, ShearCheck, DeflectionCheck }.OfType<Check>();
 }
 
 /// <summary>One post under one case. A check is null where its inputs are missing.</summary>
@@ -215,6 +218,9 @@ public sealed record PostResult
 
     /// <summary>How the deflection came about; null where the deflection check tells it.</summary>
     public Working? DeflectionWorking { get; init; }
+
+    /// <summary>The checks that have a result.</summary>
+    public IEnumerable<Check> Checks => new[] { BendingCheck, ShearCheck, DeflectionCheck }.OfType<Check>();
 }
 
 /// <summary>One guide under one case.</summary>

@@ -74,7 +74,7 @@ internal static class VerdictRules
         {
             foreach (var log in result.Logs)
             {
-                foreach (var check in Present(log.BendingCheck, log.ShearCheck, log.DeflectionCheck))
+                foreach (var check in log.Checks)
                 {
                     yield return (check, result.Name, "log", log.Index, log.Bay);
                 }
@@ -82,13 +82,11 @@ internal static class VerdictRules
 
             foreach (var post in result.Posts)
             {
-                foreach (var check in Present(post.BendingCheck, post.ShearCheck, post.DeflectionCheck))
+                foreach (var check in post.Checks)
                 {
                     yield return (check, result.Name, "post", post.Index, 0);
                 }
             }
         }
     }
-
-    private static IEnumerable<Check> Present(params Check?[] checks) => checks.OfType<Check>();
 }

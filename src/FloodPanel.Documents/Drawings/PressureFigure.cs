@@ -33,7 +33,7 @@ internal static class PressureFigure
 
     public static IEnumerable<Shape> Draw(Sheet sheet, DrawingInput input, CaseResult loadCase, Projection view, double right)
     {
-        var axis = right - RightOfAxis(sheet, input, loadCase);
+        var (_, axis) = Reach(sheet, input, loadCase, right);
         var bands = PressureStack.Of(loadCase.Actions);
         var greatest = bands.SelectMany(b => b.Points).Select(p => Math.Max(p.Sum, p.Below)).DefaultIfEmpty(0).Max();
         var top = view.Y(input.Result.BarrierHeight);
@@ -52,13 +52,28 @@ internal static class PressureFigure
         {
             shapes.Add(Resultant(sheet, input, loadCase, view, axis, centre, isSpread: greatest > 0));
         }
-        else
+        else if (loadCase.Actions.All(a => a.Impact is null))
         {
             shapes.Add(new Text(
                 "no load in this case", new(axis - 1, view.SillY - sheet.TextSize), sheet.SmallText, TextAnchor.End, TextRole.Muted));
         }
 
+        foreach (var action in loadCase.Actions)
+        {
+            if (action.Impact is { } impact)
+            {
+                shapes.Add(Impact(sheet, input, action, view.Y(impact.Height), axis));
+            }
+        }
+
         return shapes;
+    }
+
+    /// <summary>Sheet x of the axis, and of the left edge of the pressures [mm].</summary>
+    public static (double Left, double Axis) Reach(Sheet sheet, DrawingInput input, CaseResult loadCase, double right)
+    {
+        var axis = right - RightOfAxis(sheet, input, loadCase);
+        return (axis - Breadth * sheet.TextSize, axis);
     }
 
     private static double RightOfAxis(Sheet sheet, DrawingInput input, CaseResult loadCase) => Math.Max(
@@ -97,8 +112,27 @@ internal static class PressureFigure
     }
 
     /// <summary>Debris is a single force, everything else a force along the width.</summary>
-    private static string Figure(DrawingInput input, ActionResult action) =>
-        input.Format(action.Resultant, action.Kind == ActionKind.Debris ? Dimension.Force : Dimension.LineForce);
+    private static string Figure(DrawingInput input, ActionResult action) => action.Impact is { } impact
+        ? input.Format(impact.Characteristic, Dimension.Force)
+        : input.Format(action.Resultant, Dimension.LineForce);
+
+    /// <summary>An impact as a broad arrow in the colour of its action, to tell it from the resultant of the pressures.</summary>
+    private static Mark Impact(Sheet sheet, DrawingInput input, ActionResult action, double y, double axis)
+    {
+        var (tail, neck, half) = (axis - Breadth * sheet.TextSize, axis - 3.4, 0.55);
+        var words = $"{Name(action.Kind)} {Figure(input, action)}";
+        return new Mark(
+            MarkKind.Action, $"{words} at this height on posts and guides", null, $"action-{Name(action.Kind)}",
+            [
+                new Polygon(
+                    [
+                        new(tail, y - half), new(neck, y - half), new(neck, y - 1.5), new(axis, y),
+                        new(neck, y + 1.5), new(neck, y + half), new(tail, y + half),
+                    ],
+                    Hatching.Fill(action.Kind), LineRole.Dimension),
+                new Text(words, new(tail, y - 1.4), sheet.SmallText, TextAnchor.Start, TextRole.Strong),
+            ]);
+    }
 
     private static Mark Band(
         DrawingInput input, StackBand band, CaseResult loadCase, Projection view, double axis, double perPascal)

@@ -100,6 +100,9 @@ public enum MarkKind
 
     /// <summary>The resultant: arrow, figure.</summary>
     Resultant,
+
+    /// <summary>Height and pressure of one strip of the diagram, seen only under the pointer.</summary>
+    Reading,
 }
 
 /// <summary>Shapes that belong together and can be pointed at.</summary>

@@ -12,14 +12,17 @@ public static class SectionDrawing
     /// <param name="caseName">The load case, "design-flood".</param>
     /// <param name="sheet">The sheet; <see cref="Sheet.Bench"/> when null.</param>
     /// <param name="withPressures">False leaves the pressure diagram out.</param>
-    public static Scene Draw(DrawingInput input, string caseName, Sheet? sheet = null, bool withPressures = true)
+    /// <param name="withReadings">True for a screen: the diagram reads out height and pressure under the pointer.</param>
+    public static Scene Draw(
+        DrawingInput input, string caseName, Sheet? sheet = null, bool withPressures = true, bool withReadings = false)
     {
         var paper = sheet ?? Sheet.Bench;
         ActionKind[] legend = withPressures ? [.. Case(input, caseName).Actions.Select(a => a.Kind)] : [];
-        return View(input, caseName, paper, withPressures).On(paper, input, legend);
+        return View(input, caseName, paper, withPressures, withReadings).On(paper, input, legend);
     }
 
-    internal static DrawnView View(DrawingInput input, string caseName, Sheet paper, bool withPressures)
+    internal static DrawnView View(
+        DrawingInput input, string caseName, Sheet paper, bool withPressures, bool withReadings = false)
     {
         var loadCase = Case(input, caseName);
         var water = SectionWater.In(input, caseName);
@@ -43,6 +46,10 @@ public static class SectionDrawing
         if (withPressures)
         {
             sketch.Add(PressureFigure.Draw(paper, input, loadCase, layout.Projection, layout.FigureRight));
+            if (withReadings)
+            {
+                sketch.Add(PressureReadings.Draw(paper, input, loadCase, layout.Projection, layout.FigureRight));
+            }
         }
 
         var title = $"Section, {CaseNames.InWords(caseName)}";

@@ -1,38 +1,14 @@
 using System.Globalization;
 using Bunit;
 using FloodPanel.Calculation.ProjectTree;
-using FloodPanel.Web.Editing;
-using FloodPanel.Web.Pages.Bench;
-using FloodPanel.Web.Tests.Editing;
 using Microsoft.AspNetCore.Components.Web;
 using Microsoft.Extensions.DependencyInjection;
-using MudBlazor.Services;
 
 namespace FloodPanel.Web.Tests.Bench;
 
 /// <summary>The Bench with the editor and the real calculation behind it.</summary>
-public class BenchPageTests : BunitContext
+public class BenchPageTests : BenchContext
 {
-    private readonly Guid id;
-
-    public BenchPageTests()
-    {
-        var time = new ManualTime();
-        var store = new MemoryStore(time);
-        id = store.Put(Examples.Mill);
-        Services.AddMudServices();
-        Services.AddSingleton<TimeProvider>(time);
-        Services.AddSingleton(store.Access);
-        Services.AddSingleton(Examples.Library);
-        Services.AddSingleton<OpenEditors>();
-        Services.AddScoped<ScreenSettings>();
-        Services.AddScoped<ProjectEditor>();
-        JSInterop.Mode = JSRuntimeMode.Loose;
-        JSInterop.SetupModule(invocation => invocation.Identifier == "import").SetupModule("listen", _ => true);
-    }
-
-    private ProjectEditor Editor => Services.GetRequiredService<ProjectEditor>();
-
     [Fact]
     public void Render_Opening_ShowsFormDrawingsLadderAndVerdict()
     {
@@ -123,22 +99,6 @@ public class BenchPageTests : BunitContext
 
         Assert.Equal(1.2, Editor.Project.Openings[0].Actions.Flow!.Velocity);
         Assert.Single(page.FindAll("[data-testid=resultant-flow]"));
-    }
-
-    [Fact]
-    public void ActionOfTheFile_ThatIsNotComputed_IsNamedAndCanBeRemoved()
-    {
-        var page = Open("garage");
-        page.InvokeAsync(() => Editor.Change("wave", p => p with
-        {
-            Openings = p.Openings.SetItem(0, p.Openings[0] with { Actions = p.Openings[0].Actions with { Wave = new BreakingWaveInput() } }),
-        }));
-        Assert.Contains("not yet computed", page.Find("[data-testid=not-computed-wave]").TextContent);
-
-        page.Find("[data-testid=not-computed-wave] button").Click();
-
-        Assert.Null(Editor.Project.Openings[0].Actions.Wave);
-        Assert.Empty(page.FindAll("[data-testid=not-computed-wave]"));
     }
 
     [Fact]
@@ -258,7 +218,7 @@ public class BenchPageTests : BunitContext
         var page = Open("shed");
 
         Assert.Contains("This opening is not here", page.Markup);
-        Assert.Contains($"/projects/{id}/openings", page.Find("a").GetAttribute("href"));
+        Assert.Contains($"/projects/{Id}/openings", page.Find("a").GetAttribute("href"));
     }
 
     [Fact]
@@ -272,21 +232,4 @@ public class BenchPageTests : BunitContext
 
         Assert.Equal("false", page.Find("[data-testid=form-toggle]").GetAttribute("aria-expanded"));
     }
-
-    private IRenderedComponent<BenchPage> Open(string opening) =>
-        Render<BenchPage>(p => p.Add(b => b.Id, id).Add(b => b.OpeningId, opening));
-
-    private static AngleSharp.Dom.IElement Field(IRenderedComponent<BenchPage> page, string key) =>
-        page.Find($"[data-testid='field-{key}']");
-
-    private static void Choose(IRenderedComponent<BenchPage> page, string key, string words)
-    {
-        var option = Field(page, key).QuerySelectorAll("option").First(o => o.TextContent == words);
-        Field(page, key).Change(option.GetAttribute("value"));
-    }
-
-    private static string Text(IRenderedComponent<BenchPage> page, string name) => page.Find($"[data-testid={name}]").TextContent;
-
-    private static double Number(IRenderedComponent<BenchPage> page, string name) =>
-        double.Parse(Text(page, name), CultureInfo.InvariantCulture);
 }

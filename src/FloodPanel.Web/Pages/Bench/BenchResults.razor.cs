@@ -1,4 +1,5 @@
 using FloodPanel.Calculation;
+using FloodPanel.Calculation.Cases;
 using FloodPanel.Web.Shared.Results;
 using Microsoft.AspNetCore.Components;
 
@@ -41,6 +42,13 @@ public sealed partial class BenchResults
     private int ShownBay => Bays.Contains(FirstAsWide(chosenBay)) ? FirstAsWide(chosenBay) : 1;
 
     private string BaysInWords => Widths.Count > 1 ? $"the same in each of {Widths.Count} bays" : "";
+
+    private string LadderWords => CaseWords + (Case.Kind == CaseKind.Debris
+        ? " Each log with its share of the impact, one log at a time; deflection is reported, not judged."
+        : "");
+
+    private string CaseWords =>
+        $"Design values, {Calculation.Units.FormatNumber(Case.Factor, Dimension.Ratio, Units)} × the actions; deflection unfactored.";
 
     protected override void OnParametersSet() => chosenBay = AskedBay ?? chosenBay;
 

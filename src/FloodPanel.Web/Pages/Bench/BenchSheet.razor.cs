@@ -35,7 +35,7 @@ public sealed partial class BenchSheet
 
         if (!same || drawn.Item2 != Case)
         {
-            section = new MarkupString(SvgWriter.WriteText(SectionDrawing.Draw(Input, Case)));
+            section = new MarkupString(SvgWriter.WriteText(SectionDrawing.Draw(Input, Case, withReadings: true)));
         }
 
         drawn = (Input, Case, Stale);

@@ -36,6 +36,7 @@ public static class Figures
     public const string Guide = "guide";
     public const string Resultant = "resultant";
     public const string Action = "action";
+    public const string ActionResultant = "action-resultant";
     public const string Levels = "levels";
     public const string Freeboard = "freeboard";
     public const string Schedule = "schedule";
@@ -80,6 +81,8 @@ public static class Figures
             case Action:
                 var action = loadCase.Actions.ElementAtOrDefault(key.Index - 1);
                 return action is null ? null : Of(action.Working, Sentence(inCase));
+            case ActionResultant:
+                return loadCase.Actions.ElementAtOrDefault(key.Index - 1) is { } acting ? Of(acting.ResultantWorking, Sentence(inCase)) : null;
             case Guide:
                 var guide = loadCase.Guides.FirstOrDefault(g => g.Side == key.Side);
                 return guide is null ? null : Of(guide.Working, $"{Words.FromName(guide.Side)} guide, {inCase}");

@@ -37,13 +37,11 @@ public sealed partial class LogLadder
 
     private FigureKey Key(string name, string symbol, LogResult log) => new(name, symbol, Case.Name, log.Index, log.Bay);
 
-    private static Check?[] ChecksOf(LogResult log) => [log.BendingCheck, log.ShearCheck, log.DeflectionCheck];
-
     private string UnitOf(Dimension dimension) => Calculation.Units.Of(dimension, Units).Symbol;
 
     private string? RowClass(LogResult log)
     {
-        var fails = ChecksOf(log).Any(check => check is { Passes: false });
+        var fails = log.Checks.Any(check => check is { Passes: false });
         var governs = Governing is { } key && key.Case == Case.Name && key.Bay == log.Bay && key.Index == log.Index
             && key.Name.StartsWith("log", StringComparison.Ordinal);
         return fails && governs ? "fails governing" : fails ? "fails" : governs ? "governing" : null;

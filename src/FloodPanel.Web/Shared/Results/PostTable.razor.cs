@@ -23,7 +23,5 @@ public sealed partial class PostTable
     private IReadOnlyList<string> Column(Func<PostResult, double> figure, Dimension dimension) =>
         Calculation.Units.FormatColumn([.. Case.Posts.Select(figure)], dimension, Units);
 
-    private static Check?[] ChecksOf(PostResult post) => [post.BendingCheck, post.ShearCheck, post.DeflectionCheck];
-
     private string UnitOf(Dimension dimension) => Calculation.Units.Of(dimension, Units).Symbol;
 }

@@ -14,9 +14,9 @@ public sealed partial class UseCell
     [Parameter, EditorRequired]
     public string Name { get; set; } = "";
 
-    /// <summary>Its checks; null for one without inputs.</summary>
+    /// <summary>Its checks.</summary>
     [Parameter, EditorRequired]
-    public IReadOnlyList<Check?> Checks { get; set; } = [];
+    public IEnumerable<Check> Checks { get; set; } = [];
 
     /// <summary>The figure that a check of the member is.</summary>
     [Parameter, EditorRequired]
@@ -33,7 +33,7 @@ public sealed partial class UseCell
     private Check? Worst => WorstOf(Checks);
 
     /// <summary>The check that is used most; null when there is none.</summary>
-    public static Check? WorstOf(IEnumerable<Check?> checks) => checks.OfType<Check>().MaxBy(check => check.Utilisation);
+    public static Check? WorstOf(IEnumerable<Check> checks) => checks.MaxBy(check => check.Utilisation);
 
     private bool Governs => Worst is { } check && GoverningKey == Key(check);
 }

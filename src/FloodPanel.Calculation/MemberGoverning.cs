@@ -1,0 +1,52 @@
+namespace FloodPanel.Calculation;
+
+/// <summary>What governs one member over all cases.</summary>
+/// <param name="Member">"log", "post" or "guide".</param>
+/// <param name="Number">Log from the bottom or post from the left, from 1; 0 for a guide.</param>
+/// <param name="Bay">Bay from the left, from 1; 0 for posts and guides.</param>
+/// <param name="Side">"left" or "right" for a guide, else empty.</param>
+/// <param name="Case">The load case.</param>
+/// <param name="Check">The check that is used most; null for a guide, which has none yet.</param>
+/// <param name="Reaction">Greatest design reaction of a guide [N]; 0 for others.</param>
+public sealed record MemberGoverning(
+    string Member, int Number, int Bay, string Side, CaseResult Case, Check? Check, double Reaction)
+{
+    /// <summary>The governing case and check of every member: logs bay by bay from the lowest, posts, guides.</summary>
+    /// <param name="result">The result of an opening.</param>
+    /// <remarks>A member without any check, for want of a stress and of a judged deflection, has no row.</remarks>
+    public static IReadOnlyList<MemberGoverning> Of(OpeningResult result)
+    {
+        var rows = new List<MemberGoverning>();
+        for (var i = 0; i < result.Cases[0].Logs.Count; i++)
+        {
+            Add(rows, result.Cases, c => c.Logs[i].Checks, (c, check) => new("log", c.Logs[i].Index, c.Logs[i].Bay, "", c, check, 0));
+        }
+
+        for (var i = 0; i < result.Cases[0].Posts.Count; i++)
+        {
+            Add(rows, result.Cases, c => c.Posts[i].Checks, (c, check) => new("post", c.Posts[i].Index, 0, "", c, check, 0));
+        }
+
+        for (var i = 0; i < result.Cases[0].Guides.Count; i++)
+        {
+            var worst = result.Cases.MaxBy(c => c.Guides[i].Reaction)!;
+            rows.Add(new("guide", 0, 0, worst.Guides[i].Side, worst, null, worst.Guides[i].Reaction));
+        }
+
+        return rows;
+    }
+
+    private static void Add(
+        List<MemberGoverning> rows,
+        IReadOnlyList<CaseResult> cases,
+        Func<CaseResult, IEnumerable<Check>> checks,
+        Func<CaseResult, Check, MemberGoverning> row)
+    {
+        var all = cases.SelectMany(c => checks(c).Select(check => (Case: c, Check: check))).ToArray();
+        if (all.Length > 0)
+        {
+            var (@case, check) = all.MaxBy(pair => pair.Check.Utilisation);
+            rows.Add(row(@case, check));
+        }
+    }
+}
