@@ -88,16 +88,16 @@ public class PressureDiagramTests
         Assert.Null(diagram.CentreOfPressure);
     }
 
-    /// <summary>Resultant, moment and pressure of still water, water behind and flow against Gauss's rule on p(z).</summary>
+    /// <summary>Resultant, moment and pressure of still water, water behind, flow, waves and wind against Gauss's rule on p(z).</summary>
     [Property(MaxTest = 200, Arbitrary = [typeof(Scenarios)])]
     public void Force_AnyOpening_AgreesWithQuadrature(Scenario scenario)
     {
-        Assert.All(scenario.Result.Cases.Where(c => c.Name is not ("wave" or "line")), @case =>
+        Assert.All(scenario.Result.Cases.Where(c => c.Name is not "line"), @case =>
         {
             var water = new HandWater(scenario, @case.Name);
             var height = scenario.Result.BarrierHeight;
             var cosRake = Math.Cos(scenario.Opening.RakeDegrees * Math.PI / 180);
-            var terms = water.Integral(z => water.FloodSide(z) + water.ProtectedSide(z) + water.Flow(z) + water.Wind(z), 0, height) / cosRake;
+            var terms = water.Integral(water.Terms, 0, height) / cosRake;
 
             var resultant = water.Integral(water.Pressure, 0, height) / cosRake;
             var moment = water.Integral(z => water.Pressure(z) * z, 0, height) / cosRake;

@@ -70,7 +70,7 @@ public class DesignBasesTests
             Assert.All(@case.Logs.Where(_ => water.Knows), log =>
             {
                 var design = water.Integral(water.Design, log.Bottom, log.Top) / cos;
-                var terms = water.Integral(z => water.FloodSide(z) + water.ProtectedSide(z) + water.Flow(z) + water.Wind(z), log.Bottom, log.Top) / cos;
+                var terms = water.Integral(water.Terms, log.Bottom, log.Top) / cos;
                 Assert.Equal(design, log.LineLoad, tolerance: 1e-11 * terms);
             });
         });

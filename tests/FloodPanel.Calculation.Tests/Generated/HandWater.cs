@@ -1,3 +1,4 @@
+using FloodPanel.Calculation.ProjectTree;
 using MathNet.Numerics.Integration;
 
 namespace FloodPanel.Calculation.Tests.Generated;
@@ -17,10 +18,12 @@ internal sealed class HandWater(Scenario scenario, string caseName)
         _ => scenario.Result.RetainedDepth,
     };
 
+    private readonly HandWave wave = new(scenario);
+
     private readonly double behind = caseName is "brim-full" or "wind" or "line" ? 0 : scenario.Result.ProtectedDepth;
 
     /// <summary>True for the cases whose pressure is written out here.</summary>
-    public bool Knows => caseName is not ("wave" or "line");
+    public bool Knows => caseName is not "line";
 
     public double FloodSide(double z) => unitWeight * Math.Max(0, flood - z);
 
@@ -29,7 +32,9 @@ internal sealed class HandWater(Scenario scenario, string caseName)
     public double Flow(double z)
     {
         var wetted = Math.Min(flood, height);
-        if (caseName is "brim-full" or "wind" || scenario.Opening.Actions.Flow is not { } flow || z > wetted)
+        if (caseName is "brim-full" or "wind"
+            || (caseName is "wave" && scenario.Opening.Actions.Wave is BreakingWaveInput)
+            || scenario.Opening.Actions.Flow is not { } flow || z > wetted)
         {
             return 0;
         }
@@ -43,8 +48,13 @@ internal sealed class HandWater(Scenario scenario, string caseName)
 
     public double Wind(double z) => caseName == "wind" && z <= height ? scenario.Opening.Actions.Wind!.Pressure : 0;
 
+    public double Wave(double z) => caseName == "wave" ? wave.Pressure(z) : 0;
+
     /// <summary>Unfactored pressure.</summary>
-    public double Pressure(double z) => FloodSide(z) - ProtectedSide(z) + Flow(z) + Wind(z);
+    public double Pressure(double z) => FloodSide(z) - ProtectedSide(z) + Flow(z) + Wave(z) + Wind(z);
+
+    /// <summary>The same with every difference taken as a sum: rounding errors are in proportion to it.</summary>
+    public double Terms(double z) => FloodSide(z) + ProtectedSide(z) + Flow(z) + Wave(z) + Wind(z);
 
     /// <summary>Factored pressure.</summary>
     public double Design(double z)
@@ -57,13 +67,13 @@ internal sealed class HandWater(Scenario scenario, string caseName)
             "wind" => factors.Wind,
             _ => factors.FloodSide,
         };
-        return factor * (FloodSide(z) + Flow(z) + Wind(z)) - factors.ProtectedSide * ProtectedSide(z);
+        return factor * (FloodSide(z) + Flow(z) + Wave(z) + Wind(z)) - factors.ProtectedSide * ProtectedSide(z);
     }
 
     /// <summary>∫ f dz over a band of height.</summary>
     public double Integral(Func<double, double> function, double bottom, double top)
     {
-        double[] ends = [bottom, .. new[] { behind, flood, height }.Where(z => z > bottom && z < top).Order(), top];
+        double[] ends = [bottom, .. new[] { behind, flood, height, wave.Ground, wave.Crest }.Where(z => z > bottom && z < top).Order(), top];
         var sum = 0.0;
         for (var i = 1; i < ends.Length; i++)
         {

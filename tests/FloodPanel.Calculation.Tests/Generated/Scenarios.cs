@@ -68,13 +68,29 @@ public static class Scenarios
         from shape in Numbers.From(1.25, 3, 0.05)
         from others in Gen.Choose(0, 31)
         from height in Numbers.From(0, 1)
+        from wave in Wave
         select new ActionSet
         {
             Flow = velocity is { } v ? new() { Velocity = v, ShapeCoefficient = shape } : null,
-            Wave = others == 1 ? new BreakingWaveInput() : others == 2 ? new NonBreakingWaveInput { Height = 0.3, Period = 3 } : null,
+            Wave = wave,
             Debris = others is 3 or 4 ? new() { Velocity = 1 } : null,
             Wind = others is 4 or 5 ? new() { Pressure = 700 } : null,
             Line = others is 5 or 6 ? new() { Force = 740, Height = height * Height(barrier, rake) } : null,
+        };
+
+    /// <summary>Mostly none; breaking; non-breaking from ripples to waves higher than the depth allows, on level and too steep beds.</summary>
+    private static Gen<WaveInput?> Wave =>
+        from kind in Gen.Choose(0, 7)
+        from category in Gen.Choose(1, 4)
+        from height in Numbers.From(0.02, 0.8, 0.01)
+        from period in Numbers.From(0.5, 20, 0.1)
+        from angle in Numbers.From(0, 90, 1)
+        from slope in Gen.OneOf(Gen.Constant(0.0), Numbers.From(0, 0.12, 0.01))
+        select kind switch
+        {
+            0 => (WaveInput?)new BreakingWaveInput { RiskCategory = category },
+            1 or 2 => new NonBreakingWaveInput { Height = height, Period = period, AngleDegrees = angle, BedSlope = slope },
+            _ => null,
         };
 
     /// <summary>Dry, within the barrier, exactly at its top, and over it.</summary>

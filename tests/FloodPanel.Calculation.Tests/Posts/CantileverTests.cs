@@ -42,7 +42,7 @@ public class CantileverTests
     public void Respond_AnyOpening_AgreesWithQuadrature(Scenario scenario)
     {
         var model = scenario.Model;
-        Assert.All(scenario.Result.Cases.Where(c => c.Name is not ("wave" or "debris" or "line")), @case =>
+        Assert.All(scenario.Result.Cases.Where(c => c.Name is not ("debris" or "line")), @case =>
         {
             var water = new HandWater(scenario, @case.Name);
             Assert.All(@case.Posts, post => Assert.Multiple(() => Compare(post, water, model)));
@@ -60,7 +60,7 @@ public class CantileverTests
         var moment = width / (cos * cos) * water.Integral(z => water.Design(z) * z, 0, height);
         var tip = water.Integral(z => Bending(z / cos) * (length - z / cos), 0, height) / cos / model.Post!.Stiffness;
 
-        var terms = width / cos * water.Integral(z => water.FloodSide(z) + water.ProtectedSide(z) + water.Flow(z) + water.Wind(z), 0, height);
+        var terms = width / cos * water.Integral(water.Terms, 0, height);
         Assert.Equal(shear, post.BaseShear, tolerance: 1e-11 * terms);
         Assert.Equal(moment, post.BaseMoment, tolerance: 1e-11 * terms * length);
         Assert.Equal(tip, post.TipDeflection, tolerance: 1e-11 * terms * Math.Pow(length, 3) / model.Post.Stiffness);
