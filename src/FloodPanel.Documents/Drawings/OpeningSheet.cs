@@ -3,15 +3,15 @@ namespace FloodPanel.Documents.Drawings;
 /// <summary>Elevation and section of an opening side by side on one sheet, as in the owner's summary.</summary>
 public static class OpeningSheet
 {
-    private const double ElevationShare = 0.645;
+    // Widths that the elevation may have. A section that leans, or with water on both sides, needs more than the rest of the usual one.
+    private static readonly double[] ElevationShares = [0.645, 0.6, 0.55, 0.5];
 
     /// <summary>Draws both views. The section shows no pressures: an owner has no use for them.</summary>
     /// <param name="input">What to draw.</param>
     /// <param name="sheet">The sheet; its height is the most that is used.</param>
     public static Scene Draw(DrawingInput input, Sheet sheet)
     {
-        var left = sheet with { Width = ElevationShare * sheet.Width, Trim = true };
-        var right = sheet with { Width = sheet.Width - left.Width, Trim = true };
+        var (left, right) = ElevationShares.Select(share => Split(sheet, share)).MinBy(halves => Smallness(input, halves.Left, halves.Right));
         var height = Math.Max(
             ElevationDrawing.View(input, left).Height, SectionDrawing.View(input, "design-flood", right, false).Height);
         (left, right) = (left with { Height = height, Trim = false }, right with { Height = height, Trim = false });
@@ -30,6 +30,13 @@ public static class OpeningSheet
             ],
             []);
     }
+
+    private static (Sheet Left, Sheet Right) Split(Sheet sheet, double share) =>
+        (sheet with { Width = share * sheet.Width, Trim = true }, sheet with { Width = (1 - share) * sheet.Width, Trim = true });
+
+    /// <summary>How small both views come out: the product of their n in 1:n.</summary>
+    private static double Smallness(DrawingInput input, Sheet left, Sheet right) =>
+        (double)ElevationDrawing.View(input, left).Scale * SectionDrawing.View(input, "design-flood", right, false).Scale;
 
     private static Text Title(Sheet sheet, DrawnView view) =>
         DrawnView.TitleText(sheet, $"{view.Title}, {view.ScaleWords}");

@@ -1,3 +1,5 @@
+using System.Globalization;
+using FloodPanel.Calculation;
 using FloodPanel.Documents.Drawings;
 
 namespace FloodPanel.Documents.Tests.Drawings;
@@ -23,6 +25,16 @@ public class LayoutTests
         var line = width.Parts.OfType<Line>().Single(l => l.Role == LineRole.Dimension);
         Assert.Equal(50, scene.ScaleDenominator);
         Assert.Equal(66, line.To.X - line.From.X, 1e-9);
+    }
+
+    [Fact]
+    public void OwnersSheet_LeaningFaceAndWaterOnBothSides_SectionGetsTheRoomItNeeds()
+    {
+        var scene = OpeningSheet.Draw(Openings.Input("raked", UnitSystem.SI), new Sheet(174, 61, 2.25));
+
+        // About a metre of barrier is 1 cm at 1:100; smaller shows nothing.
+        var title = Assert.Single(scene.Shapes.OfType<Text>(), t => t.Words.StartsWith("Section", StringComparison.Ordinal)).Words;
+        Assert.InRange(int.Parse(title[(title.LastIndexOf(':') + 1)..], CultureInfo.InvariantCulture), 1, 100);
     }
 
     [Fact]
