@@ -45,6 +45,48 @@ public class SitePageTests : PageContext
     }
 
     [Fact]
+    public async Task Basis_CopiedAndAdjusted_ChangesTheDesignLoads()
+    {
+        var page = await ShowAsync(Examples.Mill);
+        Assert.Contains("fk/1.65", page.Find("[data-testid=factors]").TextContent, StringComparison.Ordinal);
+        var before = Editor.ResultFor("garage")!.Cases[0].Logs[0].LineLoad;
+
+        page.Find("[data-testid=copy-basis]").Click();
+        Type(page, "ownBasis.floodSide", "1.3");
+
+        Assert.Equal("Allowable stress, adjusted", Editor.Project.OwnBasis!.Title);
+        Assert.Equal(1.3 * before, Editor.ResultFor("garage")!.Cases[0].Logs[0].LineLoad, tolerance: 1e-9 * before);
+        page.Find("[data-testid=drop-basis]").Click();
+        Assert.Null(Editor.Project.OwnBasis);
+        Assert.Equal(before, Editor.ResultFor("garage")!.Cases[0].Logs[0].LineLoad);
+    }
+
+    [Fact]
+    public async Task Basis_AnotherRuleSet_DropsTheCopyAndUndoBringsItBack()
+    {
+        var page = await ShowAsync(Examples.Mill);
+        page.Find("[data-testid=copy-basis]").Click();
+        Type(page, "ownBasis.debris", "1.2");
+
+        page.FindAll("[data-testid=field-designBasis] input")[2].Change(true);
+        Assert.Equal((DesignBasisKind.Eurocode, null), (Editor.Project.DesignBasis, Editor.Project.OwnBasis));
+        Editor.Undo();
+
+        Assert.Equal(1.2, Editor.Project.OwnBasis!.Inland.Debris);
+    }
+
+    [Fact]
+    public async Task Basis_WithoutATitle_SaysWhatIsWanted()
+    {
+        var page = await ShowAsync(Examples.Mill);
+        page.Find("[data-testid=copy-basis]").Click();
+
+        Type(page, "ownBasis.title", "");
+
+        Assert.NotEmpty(page.Find("[data-testid='problem-ownBasis.title']").TextContent);
+    }
+
+    [Fact]
     public async Task Type_Job_IsKept()
     {
         var page = await ShowAsync(Examples.Mill);
@@ -127,5 +169,5 @@ public class SitePageTests : PageContext
     }
 
     private static void Type(IRenderedComponent<PageHost> page, string field, string text) =>
-        page.Find($"[data-testid=field-{field}]").Input(text);
+        page.Find($"[data-testid='field-{field}']").Input(text);
 }

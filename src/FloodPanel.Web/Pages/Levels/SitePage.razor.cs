@@ -1,10 +1,14 @@
 using FloodPanel.Calculation;
 using FloodPanel.Calculation.ProjectTree;
+using Microsoft.AspNetCore.Components;
 
 namespace FloodPanel.Web.Pages.Levels;
 
 public sealed partial class SitePage
 {
+    [Inject]
+    public required Library Library { get; init; }
+
     private Site Site => Project.Site;
 
     private Sentence? ProblemOf(Field field) => Editor.ProblemAt($"site.{field.Key}");
