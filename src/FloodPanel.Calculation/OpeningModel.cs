@@ -21,7 +21,10 @@ public sealed class OpeningModel
         Factors = basis.For(site.FloodZone);
         UnitWeight = Hydrostatic.UnitWeight(site.WaterDensity);
         RetainedDepth = FloodLevels.Depth(site.DesignFloodLevel, opening.SillLevel);
-        ProtectedDepth = Math.Max(0, FloodLevels.Depth(opening.ProtectedSideLevel ?? opening.SillLevel, opening.SillLevel));
+
+        // The same level on both sides may come with a micrometre of rounding: it must not turn into reverse head.
+        var behind = FloodLevels.Depth(opening.ProtectedSideLevel ?? opening.SillLevel, opening.SillLevel);
+        ProtectedDepth = Math.Max(0, Math.Min(behind, RetainedDepth));
         ClearWidth = opening.ClearWidth;
         Flow = opening.Actions.Flow;
         Wind = opening.Actions.Wind;
@@ -57,7 +60,7 @@ public sealed class OpeningModel
     /// <summary>h, design flood level less sill level [m]; negative when the sill stays dry.</summary>
     public double RetainedDepth { get; }
 
-    /// <summary>h', depth of water on the protected side [m], ≥ 0.</summary>
+    /// <summary>h', depth of water on the protected side [m], ≥ 0, and no more than h where there is any.</summary>
     public double ProtectedDepth { get; }
 
     /// <summary>Clear width of the opening [m].</summary>

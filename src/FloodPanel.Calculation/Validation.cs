@@ -89,7 +89,7 @@ public static class Validation
         problems.Check(Fields.ClearHeight, opening.ClearHeight, path);
         problems.Check(Fields.Rake, opening.RakeDegrees, path);
         problems.Check(Fields.ProtectedSideLevel, opening.ProtectedSideLevel, path);
-        if (opening.ProtectedSideLevel is { } behind && FloodLevels.Depth(behind, site.DesignFloodLevel) > 0)
+        if (opening.ProtectedSideLevel is { } behind && FloodLevels.Depth(behind, site.DesignFloodLevel) > FloodLevels.LevelTolerance)
         {
             problems.Add($"{path}.protectedSideLevel", $"Protected-side water level is {Length(behind):typed}, above the design flood level, {Length(site.DesignFloodLevel):typed}; allowed is up to that level, because reverse head is not covered.");
         }

@@ -20,6 +20,15 @@ public class DesignTests
         Assert.Equal(["base-plates", "anchors", "guides", "supporting-wall"], result.Verdict.Missing);
     }
 
+    /// <summary>The design flood level is 4.45 m; within a micrometre it is the same level.</summary>
+    [Fact]
+    public void Run_WaterBehindAboveTheFloodByRounding_StandsAsHighAsTheFlood()
+    {
+        var project = Refused.With((Opening o) => o with { ProtectedSideLevel = 4.4500009 });
+
+        Assert.Equal(4.45 - SampleProject.Dock.SillLevel, SampleProject.Result(project).ProtectedDepth, 1e-9);
+    }
+
     [Property(MaxTest = 50)]
     public void Run_AnyProject_EvaluatesEachOpening(Scenario scenario)
     {

@@ -56,6 +56,7 @@ public class ValidationTests
     public void Validate_WaterBehindAboveTheFlood_Refused()
     {
         Refused.Not(Refused.With((Opening o) => o with { ProtectedSideLevel = 4.45 }));
+        Refused.Not(Refused.With((Opening o) => o with { ProtectedSideLevel = 4.4500009 }));
         Refused.Once(
             Refused.With((Opening o) => o with { ProtectedSideLevel = 4.4501 }),
             "openings[0].protectedSideLevel",

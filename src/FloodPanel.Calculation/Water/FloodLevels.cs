@@ -8,6 +8,9 @@ public static class FloodLevels
     /// <summary>A barrier lower than required by no more than this is as high as required [m], 1 mm.</summary>
     public const double HeightTolerance = 0.001;
 
+    /// <summary>Levels that differ by no more are the same level [m], 1 µm: sums of lengths in feet, shown with nine figures, are no better.</summary>
+    public const double LevelTolerance = 1e-6;
+
     private const string Source = "Levels in the project's datum";
 
     /// <summary>Depth of water above a sill [m]; negative where the level is below it.</summary>
