@@ -1,4 +1,5 @@
 using System.Text;
+using FloodPanel.Calculation.Verification;
 using FloodPanel.Storage.LibraryData;
 
 namespace FloodPanel.Cli;
@@ -8,9 +9,11 @@ internal static class CommandLine
 {
     private const string Usage = """
         usage: floodpanel check FILE
+               floodpanel verification
 
-          check FILE   calculates every opening of a project file and writes one JSON object to standard output
-          --help       shows this text
+          check FILE     calculates every opening of a project file and writes one JSON object to standard output
+          verification   writes what the calculation is held against, computed anew, as comma-separated values
+          --help         shows this text
 
         exit code: 0 every opening is adequate, 1 one is inadequate or incomplete (or there is none), 2 the file
         cannot be calculated; one line on standard error then names the field and what is wrong with it
@@ -48,6 +51,9 @@ internal static class CommandLine
         {
             case ["check", not "--help" and not "-h" and var file]:
                 return CheckCommand.Run(file, output);
+            case ["verification"]:
+                output.Write(VerificationFile.Write(VerificationTable.Rows()));
+                return ExitCode.Adequate;
             case ["--help" or "-h" or "help"] or ["check", "--help" or "-h"]:
                 output.Write(Encoding.UTF8.GetBytes(Usage));
                 return ExitCode.Adequate;

@@ -26,6 +26,7 @@ try
     app.MapStaticAssets();
     app.MapProjectFiles();
     app.MapOwnerSummary();
+    app.MapVerification();
     app.MapRazorComponents<App>().AddInteractiveServerRenderMode(options => options.ContentSecurityFrameAncestorsPolicy = null);
     app.Lifetime.ApplicationStopping.Register(app.Services.GetRequiredService<OpenEditors>().SaveAll);
     app.SayWhereItListens(office.DataFolder);
