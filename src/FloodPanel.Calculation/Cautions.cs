@@ -23,6 +23,7 @@ public static class Cautions
         Site site, Opening opening, OpeningModel model, IReadOnlyList<LogSchedule> schedule)
     {
         var notes = new List<Note>();
+        notes.AddRange(LevelNotes.Of(site));
         Levels(notes, site, opening, model);
         Flowing(notes, model);
         if (model.Wave is { } wave)

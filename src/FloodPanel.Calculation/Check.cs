@@ -2,7 +2,7 @@ namespace FloodPanel.Calculation;
 
 /// <summary>
 /// One written line, symbol = formula = value. The formula is empty for a given value; else it uses only symbols
-/// of earlier steps, numbers, + − · / ( ) ² ³ ⁴ ^ √, π and min, max, cos, sin, tan, sinh, cosh, tanh, exp. All values are base SI, so that the
+/// of earlier steps, numbers, + − · / ( ) ² ³ ⁴ ^ √, π and min, max, cos, sin, tan, sinh, cosh, tanh, exp, ln. All values are base SI, so that the
 /// formula holds as it stands.
 /// </summary>
 /// <param name="Symbol">The symbol, unique among the steps.</param>

@@ -9,6 +9,15 @@ public enum Dimension
     /// <summary>A pure number that counts.</summary>
     Count,
 
+    /// <summary>Chance in a year, 0 to 1.</summary>
+    Probability,
+
+    /// <summary>Number of years.</summary>
+    Years,
+
+    /// <summary>Rise of a level in a year [m per year]: mm/year / in/year.</summary>
+    LengthPerYear,
+
     /// <summary>Angle in degrees, as in the project file.</summary>
     Degrees,
 

@@ -30,6 +30,9 @@ public static class Units
         {
             [Dimension.Ratio] = (new("", 1), new("", 1)),
             [Dimension.Count] = (new("", 1, 0), new("", 1, 0)),
+            [Dimension.Probability] = (new("", 1), new("", 1)),
+            [Dimension.Years] = (new("years", 1, 0), new("years", 1, 0)),
+            [Dimension.LengthPerYear] = (new("mm/year", 1e-3), new("in/year", Inch)),
             [Dimension.Degrees] = (new("°", 1, 1), new("°", 1, 1)),
             [Dimension.Angle] = (new("°", Degree, 1), new("°", Degree, 1)),
             [Dimension.Length] = (new("m", 1, 3), new("ft", Foot, 2)),

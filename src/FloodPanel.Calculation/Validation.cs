@@ -67,13 +67,46 @@ public static class Validation
         problems.Check(Fields.DesignStillWaterLevel, site.DesignStillWaterLevel, path);
         problems.Check(Fields.Surge, site.Surge, path);
         problems.Check(Fields.ClimateAllowance, site.ClimateAllowance, path);
+        problems.Check(Fields.ClimateRate, site.ClimateRatePerYear, path);
+        problems.Check(Fields.DesignLife, site.DesignLifeYears, path);
         problems.Check(Fields.Freeboard, site.Freeboard, path);
         for (var i = 0; i < site.Levels.Count; i++)
         {
-            problems.Check(Fields.LevelProbability, site.Levels[i].AnnualProbability, $"{path}.levels[{i}]");
-            problems.Check(Fields.LevelValue, site.Levels[i].Level, $"{path}.levels[{i}]");
+            ValidateLevel(site.Levels, i, $"{path}.levels[{i}]", problems);
         }
     }
+
+    /// <summary>A level against its own limits and against the levels before it: rarer water stands no lower.</summary>
+    private static void ValidateLevel(ValueList<LevelPoint> levels, int index, string path, ProblemList problems)
+    {
+        var level = levels[index];
+        if (!problems.Check(Fields.LevelProbability, level.AnnualProbability, path) | !problems.Check(Fields.LevelValue, level.Level, path))
+        {
+            return;
+        }
+
+        for (var i = 0; i < index; i++)
+        {
+            var earlier = levels[i];
+            if (!Fields.LevelProbability.Allows(earlier.AnnualProbability) || !Fields.LevelValue.Allows(earlier.Level))
+            {
+                // A row that is refused itself says nothing about this one.
+                continue;
+            }
+
+            if (earlier.AnnualProbability == level.AnnualProbability)
+            {
+                problems.Add($"{path}.annualProbability", $"Probability of level {index + 1} is {Chance(level.AnnualProbability):typed}, as of level {i + 1}; each probability takes one level.");
+            }
+            else if (earlier.AnnualProbability > level.AnnualProbability ? earlier.Level > level.Level : earlier.Level < level.Level)
+            {
+                var (rare, frequent) = earlier.AnnualProbability < level.AnnualProbability ? (earlier, level) : (level, earlier);
+                problems.Add($"{path}.level", $"Level {index + 1} is {Length(level.Level):typed}; the rarer level, {Length(rare.Level):typed} at {Chance(rare.AnnualProbability):typed}, must not stand below the more frequent one, {Length(frequent.Level):typed} at {Chance(frequent.AnnualProbability):typed}.");
+            }
+        }
+    }
+
+    private static Quantity Chance(double value) => new(value, Dimension.Probability);
 
     private static void ValidateOpening(Site site, Opening opening, string path, ProblemList problems, Library library)
     {

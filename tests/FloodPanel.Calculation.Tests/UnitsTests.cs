@@ -18,6 +18,9 @@ public class UnitsTests
     {
         { Dimension.Ratio, "", 1, "", 1 },
         { Dimension.Count, "", 1, "", 1 },
+        { Dimension.Probability, "", 1, "", 1 },
+        { Dimension.Years, "years", 1, "years", 1 },
+        { Dimension.LengthPerYear, "mm/year", Length.FromMillimeters(1).Meters, "in/year", Length.FromInches(1).Meters },
         { Dimension.Degrees, "°", 1, "°", 1 },
         { Dimension.Angle, "°", Angle.FromDegrees(1).Radians, "°", Angle.FromDegrees(1).Radians },
         { Dimension.Length, "m", 1, "ft", Length.FromFeet(1).Meters },

@@ -24,6 +24,8 @@ internal static class Example
             DesignStillWaterLevel = 12.35,
             Surge = 0.1,
             ClimateAllowance = 1.0 / 3,
+            ClimateRatePerYear = 0.0042,
+            DesignLifeYears = 45,
             Freeboard = 0.25,
             FloodZone = FloodZone.CoastalA,
             Levels = [new LevelPoint(0.01, 12.2), new LevelPoint(0.005, 12.35)],

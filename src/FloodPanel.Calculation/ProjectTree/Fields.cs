@@ -11,7 +11,7 @@ public static class Fields
 
     /// <summary>Site.AnnualProbability.</summary>
     public static Field AnnualProbability { get; } = new("annualProbability", "Annual exceedance probability",
-        Dimension.Ratio, 1e-6, 0.999, "Chance that the still-water level is exceeded in a year; 0.01 is once in 100 years on average.");
+        Dimension.Probability, 1e-6, 0.999, "Chance that the still-water level is exceeded in a year; 0.01, 1 % or 1 in 100 is once in 100 years on average.");
 
     /// <summary>Site.DesignStillWaterLevel.</summary>
     public static Field DesignStillWaterLevel { get; } = new("designStillWaterLevel", "Design still-water level",
@@ -23,6 +23,13 @@ public static class Fields
     /// <summary>Site.ClimateAllowance.</summary>
     public static Field ClimateAllowance { get; } = new("climateAllowance", "Climate allowance", Dimension.Length, 0, 10,
         "Added to the still-water level for the years to come.");
+
+    /// <summary>Site.ClimateRatePerYear.</summary>
+    public static Field ClimateRate { get; } = new("climateRatePerYear", "Climate rate", Dimension.LengthPerYear, 0, 0.1,
+        "Rise of the level in a year; over the design life it adds to the allowance.");
+
+    /// <summary>Site.DesignLifeYears.</summary>
+    public static Field DesignLife { get; } = new("designLifeYears", "Design life", Dimension.Years, 1, 200, "Years that the barrier should serve.");
 
     /// <summary>Site.Freeboard.</summary>
     public static Field Freeboard { get; } = new("freeboard", "Freeboard", Dimension.Length, 0, 5,

@@ -18,8 +18,14 @@ public sealed record Site
     /// <summary>Surge allowance added to the still-water level [m], ≥ 0.</summary>
     public double Surge { get; init; }
 
-    /// <summary>Climate allowance added to the still-water level [m], ≥ 0.</summary>
+    /// <summary>Climate allowance as a lump, added to the still-water level [m], ≥ 0.</summary>
     public double ClimateAllowance { get; init; }
+
+    /// <summary>Climate allowance that grows with the years [m per year], ≥ 0; over the design life it adds to the lump.</summary>
+    public double ClimateRatePerYear { get; init; }
+
+    /// <summary>Years that the barrier should serve, 1 to 200.</summary>
+    public double DesignLifeYears { get; init; } = 30;
 
     /// <summary>Height of barrier wanted above the design flood level [m], ≥ 0.</summary>
     public double Freeboard { get; init; } = 0.3;
@@ -30,8 +36,11 @@ public sealed record Site
     /// <summary>Known levels by annual exceedance probability; may be empty.</summary>
     public ValueList<LevelPoint> Levels { get; init; } = [];
 
+    /// <summary>Climate allowance in all: the lump, and the rate over the design life [m].</summary>
+    public double TotalClimateAllowance => ClimateAllowance + ClimateRatePerYear * DesignLifeYears;
+
     /// <summary>Design flood level: still-water level, surge and climate allowance together [m].</summary>
-    public double DesignFloodLevel => DesignStillWaterLevel + Surge + ClimateAllowance;
+    public double DesignFloodLevel => DesignStillWaterLevel + Surge + TotalClimateAllowance;
 }
 
 /// <summary>One row of the table of levels.</summary>

@@ -6,6 +6,7 @@ public static class VerificationTable
     /// <summary>The rows, computed anew, in the order of the chain from water to members.</summary>
     public static IReadOnlyList<VerificationRow> Rows() =>
     [
+        .. LevelRows.Rows(),
         .. WaterRows.Rows(),
         .. FlowRows.Rows(),
         .. WaveRows.Rows(),

@@ -60,11 +60,22 @@ public static class FloodLevels
         ]);
     }
 
-    private static IEnumerable<CalculationStep> Level(Site site) =>
-    [
-        new("z_swl", "", site.DesignStillWaterLevel, Dimension.Length),
-        new("s", "", site.Surge, Dimension.Length),
-        new("c", "", site.ClimateAllowance, Dimension.Length),
-        new("z_dfl", "z_swl + s + c", site.DesignFloodLevel, Dimension.Length),
-    ];
+    private static List<CalculationStep> Level(Site site)
+    {
+        var steps = new List<CalculationStep>(LevelCurve.Of(site.Levels)?.Steps(site.AnnualProbability) ?? [])
+        {
+            new("z_swl", "", site.DesignStillWaterLevel, Dimension.Length),
+            new("s", "", site.Surge, Dimension.Length),
+            new("c", "", site.ClimateAllowance, Dimension.Length),
+        };
+        var grows = site.ClimateRatePerYear > 0;
+        if (grows)
+        {
+            steps.Add(new("r", "", site.ClimateRatePerYear, Dimension.LengthPerYear));
+            steps.Add(new("n", "", site.DesignLifeYears, Dimension.Years));
+        }
+
+        steps.Add(new("z_dfl", grows ? "z_swl + s + c + r·n" : "z_swl + s + c", site.DesignFloodLevel, Dimension.Length));
+        return steps;
+    }
 }

@@ -22,9 +22,9 @@ internal static class OwnerAdvice
             added.Add($"{Length(site.Surge)} for surge");
         }
 
-        if (site.ClimateAllowance > 0)
+        if (site.TotalClimateAllowance > 0)
         {
-            added.Add($"{Length(site.ClimateAllowance)} for the climate to come");
+            added.Add($"{Length(site.TotalClimateAllowance)} for the climate to come");
         }
 
         var allowances = added.Count == 0 ? "" : $", with {string.Join(" and ", added)} added";

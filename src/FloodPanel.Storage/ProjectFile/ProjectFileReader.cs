@@ -112,6 +112,8 @@ public static class ProjectFileReader
             DesignStillWaterLevel = site.Number("designStillWaterLevel"),
             Surge = site.Number("surge", blank.Surge),
             ClimateAllowance = site.Number("climateAllowance", blank.ClimateAllowance),
+            ClimateRatePerYear = site.Number("climateRatePerYear", blank.ClimateRatePerYear),
+            DesignLifeYears = site.Number("designLifeYears", blank.DesignLifeYears),
             Freeboard = site.Number("freeboard", blank.Freeboard),
             FloodZone = site.Word("floodZone", FileWords.FloodZone, blank.FloodZone),
             Levels = site.List("levels").Select(ReadLevel).ToValueList(),

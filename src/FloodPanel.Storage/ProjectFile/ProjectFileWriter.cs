@@ -73,6 +73,8 @@ public static class ProjectFileWriter
         json.WriteNumber("designStillWaterLevel", site.DesignStillWaterLevel);
         json.WriteNumber("surge", site.Surge);
         json.WriteNumber("climateAllowance", site.ClimateAllowance);
+        json.WriteNumber("climateRatePerYear", site.ClimateRatePerYear);
+        json.WriteNumber("designLifeYears", site.DesignLifeYears);
         json.WriteNumber("freeboard", site.Freeboard);
         json.WriteString("floodZone", FileWords.FloodZone.Of(site.FloodZone));
         json.WriteStartArray("levels");

@@ -4,7 +4,7 @@ namespace FloodPanel.Calculation.Tests.Steps;
 
 /// <summary>
 /// Reads and works out the formula of a step by recursive descent, in the language that <see cref="CalculationStep"/>
-/// allows: symbols, numbers, + − · / ( ) ² ³ ⁴ ^ √, π and min, max, cos, sin, tan, sinh, cosh, tanh, exp. Anything else is refused.
+/// allows: symbols, numbers, + − · / ( ) ² ³ ⁴ ^ √, π and min, max, cos, sin, tan, sinh, cosh, tanh, exp, ln. Anything else is refused.
 /// </summary>
 internal sealed class FormulaReader
 {
@@ -109,6 +109,7 @@ internal sealed class FormulaReader
             "sinh" => Call(1)[0].Function(Math.Sinh),
             "cosh" => Call(1)[0].Function(Math.Cosh),
             "tanh" => Call(1)[0].Function(Math.Tanh),
+            "ln" => Call(1)[0].Function(Math.Log),
             "exp" => Call(1)[0].Function(Math.Exp),
             "min" => Call(2) is var pair ? Measured.Least(pair[0], pair[1]) : default,
             "max" => Call(2) is var pair ? Measured.Greatest(pair[0], pair[1]) : default,

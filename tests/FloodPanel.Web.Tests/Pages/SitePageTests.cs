@@ -45,6 +45,45 @@ public class SitePageTests : PageContext
     }
 
     [Fact]
+    public async Task Levels_Interpolated_AreTakenOverWithOneClick()
+    {
+        var mill = Examples.Mill with
+        {
+            Site = Examples.Mill.Site with { Levels = [new LevelPoint(0.1, 11.9), new LevelPoint(0.01, 12.35)], AnnualProbability = 0.01 },
+        };
+        var page = await ShowAsync(mill);
+        Assert.Empty(page.FindAll("[data-testid=use-level]"));
+
+        Type(page, "annualProbability", "1 in 50");
+        page.Find("[data-testid=use-level]").Click();
+
+        Assert.Equal((0.02, 12.216), (Editor.Project.Site.AnnualProbability, Editor.Project.Site.DesignStillWaterLevel));
+        Assert.Contains("0.02 the table gives 12.216 m", page.Find("[data-testid=interpolated]").TextContent, StringComparison.Ordinal);
+        Assert.Contains("about 1 in 2 over 30 years", page.Find("[data-testid=risk]").TextContent, StringComparison.Ordinal);
+        Assert.Empty(page.FindAll("[data-testid=use-level]"));
+    }
+
+    [Fact]
+    public async Task Levels_DesignProbabilityOutsideThem_SaysThatNothingIsExtrapolated()
+    {
+        var page = await ShowAsync(Examples.Mill with { Site = Examples.Mill.Site with { Levels = [new LevelPoint(0.1, 11.9), new LevelPoint(0.02, 12.1)] } });
+
+        Assert.Contains("nothing is extrapolated", page.Find("[data-testid=interpolated]").TextContent, StringComparison.Ordinal);
+        Assert.Empty(page.FindAll("[data-testid=use-level]"));
+    }
+
+    [Fact]
+    public async Task Climate_RateOverTheDesignLife_RaisesTheDesignLevel()
+    {
+        var page = await ShowAsync(Examples.Mill);
+
+        Type(page, "climateRatePerYear", "5");
+        Type(page, "designLifeYears", "40");
+
+        Assert.Equal("12.550 m", page.Find("[data-testid=design-flood-level]").TextContent);
+    }
+
+    [Fact]
     public async Task Basis_CopiedAndAdjusted_ChangesTheDesignLoads()
     {
         var page = await ShowAsync(Examples.Mill);

@@ -1,6 +1,7 @@
 using System.Globalization;
 using FloodPanel.Calculation;
 using FloodPanel.Calculation.ProjectTree;
+using FloodPanel.Calculation.Water;
 using Microsoft.AspNetCore.Components;
 
 namespace FloodPanel.Web.Pages.Levels;
@@ -17,6 +18,8 @@ public sealed partial class LevelSum
     private string Symbol => Calculation.Units.Of(Dimension.Length, Units).Symbol;
 
     private string Chance => string.Create(CultureInfo.InvariantCulture, $"{Site.AnnualProbability * 100:0.####} %");
+
+    private string Risk => ExceedanceRisk.InWords(Site.AnnualProbability, Site.DesignLifeYears);
 
     private string Length(double value) => Calculation.Units.FormatNumber(value, Dimension.Length, Units);
 }

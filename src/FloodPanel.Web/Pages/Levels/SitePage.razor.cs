@@ -1,5 +1,6 @@
 using FloodPanel.Calculation;
 using FloodPanel.Calculation.ProjectTree;
+using FloodPanel.Calculation.Water;
 using Microsoft.AspNetCore.Components;
 
 namespace FloodPanel.Web.Pages.Levels;
@@ -10,6 +11,8 @@ public sealed partial class SitePage
     public required Library Library { get; init; }
 
     private Site Site => Project.Site;
+
+    private string Risk => ExceedanceRisk.InWords(Site.AnnualProbability, Site.DesignLifeYears);
 
     private Sentence? ProblemOf(Field field) => Editor.ProblemAt($"site.{field.Key}");
 

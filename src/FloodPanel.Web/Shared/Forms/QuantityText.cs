@@ -9,14 +9,14 @@ public readonly record struct QuantityReading(double? Value, string? Problem);
 
 /// <summary>
 /// Reads a number with or without a unit behind it, as practitioners write it: 1.2, 12,5, 1067 mm, 3 ft 6 in,
-/// 3' 6 1/2". What could mean two things is refused.
+/// 3' 6 1/2", 1 in 100. What could mean two things is refused.
 /// </summary>
 public static partial class QuantityText
 {
     /// <summary>Reads a text; a number without a unit is in the unit shown.</summary>
     public static QuantityReading Read(string text, Dimension dimension, UnitSystem system)
     {
-        var rest = Normalise(text);
+        var rest = Normalise(dimension == Dimension.Probability ? OneIn().Replace(text, "$1/$2") : text);
         if (rest.Length == 0)
         {
             return default;
@@ -102,6 +102,10 @@ public static partial class QuantityText
     }
 
     private static string FirstWord(string rest) => rest.Split(' ', 2)[0];
+
+    // "1 in 100" is how a chance is said.
+    [GeneratedRegex(@"^\s*(\d+)\s+in\s+(\d+)\s*$", RegexOptions.IgnoreCase)]
+    private static partial Regex OneIn();
 
     [GeneratedRegex(@"(?<=\p{L})([²³⁴]|[\^·*](?=[\p{L}234]))")]
     private static partial Regex AfterLetter();

@@ -34,6 +34,9 @@ internal static class UnitNames
         new Dictionary<Dimension, (string Name, double Size)[]>
         {
             [Dimension.Ratio] = [("%", 0.01)],
+            [Dimension.Probability] = [("%", 0.01)],
+            [Dimension.Years] = [("year", 1), ("yr", 1), ("yrs", 1), ("a", 1)],
+            [Dimension.LengthPerYear] = [("mm/yr", 1e-3), ("mm/a", 1e-3), ("cm/year", 1e-2), ("m/year", 1), ("in/yr", Inch), ("ft/year", Foot)],
             [Dimension.Degrees] = [("deg", 1), ("degrees", 1)],
             [Dimension.Angle] = [("deg", Math.PI / 180), ("rad", 1)],
             [Dimension.Length] = Lengths,

@@ -137,5 +137,5 @@ public static class StepText
     private static bool IsPart(char c) =>
         char.IsLetterOrDigit(c) || c is '_' or '\'' or '′' or '″' or (>= '₀' and <= '₎');
 
-    private static bool IsFunction(string token) => token is "min" or "max" or "cos" or "sin" or "tan" or "sinh" or "cosh" or "tanh" or "exp";
+    private static bool IsFunction(string token) => token is "min" or "max" or "cos" or "sin" or "tan" or "sinh" or "cosh" or "tanh" or "exp" or "ln";
 }

@@ -1,0 +1,93 @@
+using FloodPanel.Calculation.ProjectTree;
+
+namespace FloodPanel.Calculation.Water;
+
+/// <summary>Levels by annual exceedance probability, straight between the known points on the Gumbel reduced variate.</summary>
+/// <remarks>
+/// y = −ln(−ln(1 − p)): a Gumbel distribution of annual greatest levels is a straight line over it. Source: Gumbel,
+/// Statistics of Extremes (1958), reduced variate. Limits: between the rarest and the most frequent known level; nothing is
+/// extrapolated.
+/// </remarks>
+public sealed class LevelCurve
+{
+    /// <summary>Source of the interpolation, as printed.</summary>
+    public const string Source = "Interpolation on the Gumbel reduced variate between known levels";
+
+    private LevelCurve(LevelPoint[] points) => Points = points.ToValueList();
+
+    /// <summary>The known levels, the most frequent first.</summary>
+    public ValueList<LevelPoint> Points { get; }
+
+    /// <summary>The curve through a table; null when it holds fewer than two levels or problems.</summary>
+    /// <param name="levels">The table, in any order.</param>
+    public static LevelCurve? Of(ValueList<LevelPoint> levels)
+    {
+        var points = levels.OrderByDescending(point => point.AnnualProbability).ToArray();
+        var usable = points.Length >= 2
+            && points.All(p => p.AnnualProbability is > 0 and < 1 && double.IsFinite(p.Level))
+            && points.Zip(points.Skip(1)).All(pair =>
+                pair.First.AnnualProbability > pair.Second.AnnualProbability && pair.First.Level <= pair.Second.Level);
+        return usable ? new(points) : null;
+    }
+
+    /// <summary>y = −ln(−ln(1 − p)), Gumbel reduced variate [-].</summary>
+    /// <param name="probability">p, annual exceedance probability [-], above 0 and below 1.</param>
+    /// <exception cref="ArgumentOutOfRangeException">The probability is not above 0 and below 1.</exception>
+    public static double Variate(double probability)
+    {
+        Guard.Positive(probability);
+        Guard.InRange(probability, 0, 1 - 1e-12);
+
+        return -Math.Log(-Math.Log(1 - probability));
+    }
+
+    /// <summary>Level at a probability [m]; null outside the table.</summary>
+    /// <param name="probability">p, annual exceedance probability [-].</param>
+    public double? At(double probability)
+    {
+        if (Between(probability) is not { } pair)
+        {
+            return null;
+        }
+
+        var (from, to) = (Variate(pair.Frequent.AnnualProbability), Variate(pair.Rare.AnnualProbability));
+        return pair.Frequent.Level + (pair.Rare.Level - pair.Frequent.Level) * (Variate(probability) - from) / (to - from);
+    }
+
+    /// <summary>How a level of the table came about; null outside it.</summary>
+    /// <param name="probability">p, annual exceedance probability [-].</param>
+    internal IEnumerable<CalculationStep> Steps(double probability)
+    {
+        if (Between(probability) is not { } pair)
+        {
+            return [];
+        }
+
+        var (from, to) = (pair.Frequent, pair.Rare);
+        return
+        [
+            new("p", "", probability, Dimension.Probability),
+            new("y", "ln(1/ln(1/(1 − p)))", Variate(probability), Dimension.Ratio),
+            new("p_1", "", from.AnnualProbability, Dimension.Probability),
+            new("z_1", "", from.Level, Dimension.Length),
+            new("y_1", "ln(1/ln(1/(1 − p_1)))", Variate(from.AnnualProbability), Dimension.Ratio),
+            new("p_2", "", to.AnnualProbability, Dimension.Probability),
+            new("z_2", "", to.Level, Dimension.Length),
+            new("y_2", "ln(1/ln(1/(1 − p_2)))", Variate(to.AnnualProbability), Dimension.Ratio),
+            new("z_p", "z_1 + (z_2 − z_1)·(y − y_1)/(y_2 − y_1)", At(probability)!.Value, Dimension.Length),
+        ];
+    }
+
+    private (LevelPoint Frequent, LevelPoint Rare)? Between(double probability)
+    {
+        for (var i = 1; i < Points.Count; i++)
+        {
+            if (probability <= Points[i - 1].AnnualProbability && probability >= Points[i].AnnualProbability)
+            {
+                return (Points[i - 1], Points[i]);
+            }
+        }
+
+        return null;
+    }
+}
