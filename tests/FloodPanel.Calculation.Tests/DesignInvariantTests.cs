@@ -82,6 +82,26 @@ public class DesignInvariantTests
         Assert.True(after.Resultant >= before.Resultant - 1e-9 * (1 + before.Resultant));
     }
 
+    /// <summary>The same above the surcharge method where the drag coefficient stays what it is: 1.25 up to a width of 12 depths.</summary>
+    [Property(MaxTest = 100)]
+    public void Evaluate_MoreWaterAtAFixedDragCoefficient_NeverLessLoadOnAnyLog(Scenario scenario, PositiveInt rise)
+    {
+        var fast = WithFlow(scenario, 3.1 + rise.Get % 40 / 10.0);
+        var width = fast.Opening.ClearWidth;
+        var depth = Math.Max(width / 12 + 0.001, fast.Result.RetainedDepth);
+        if (width / 12 + 0.001 > fast.Result.BarrierHeight)
+        {
+            // A barrier lower than a twelfth of its width has no depth with this coefficient.
+            return;
+        }
+
+        var before = fast.WithDepth(depth).DesignFlood;
+        var after = fast.WithDepth(depth + rise.Get % 300 / 1000.0).DesignFlood;
+
+        Assert.All(before.Logs.Zip(after.Logs), pair =>
+            Assert.True(pair.Second.LineLoad >= pair.First.LineLoad - 1e-9 * (1 + pair.First.LineLoad)));
+    }
+
     /// <summary>Water behind helps, and never turns a load about.</summary>
     [Property(MaxTest = 100)]
     public void Evaluate_WaterBehind_NeverMoreLoadAndNeverNegative(Scenario scenario)

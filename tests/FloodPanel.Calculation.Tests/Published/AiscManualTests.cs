@@ -22,6 +22,14 @@ public class AiscManualTests
     public void Case1_UniformLoad_Deflection() =>
         Hand.Equal(0.06103515625, SimpleBeam.Deflection(6000, 2.5, 50_000));
 
+    /// <summary>Case 7, simple beam, force at mid-span: M = P·l/4, Δ = P·l³/(48·E·I), with P = 8 kN, l = 3 m, E·I = 50 kN·m².</summary>
+    [Fact]
+    public void Case7_ForceAtMidSpan_MomentAndDeflection()
+    {
+        Hand.Equal(6_000, SimpleBeam.PointMoment(8_000, 3));
+        Hand.Equal(0.09, SimpleBeam.PointDeflection(8_000, 3, 50_000));
+    }
+
     /// <summary>Case 18, cantilever, load increasing uniformly to the fixed end: V = w·l/2, M = w·l²/6, Δ = w·l⁴/30EI.</summary>
     [Fact]
     public void Case18_TriangularLoad_BaseAndTip()
