@@ -36,6 +36,12 @@ public enum Dimension
     /// <summary>Area of a cross-section: cm² / in².</summary>
     SectionArea,
 
+    /// <summary>Area of a surface under water: m² / ft².</summary>
+    Area,
+
+    /// <summary>Second moment of a surface under water: m⁴ / ft⁴.</summary>
+    AreaInertia,
+
     /// <summary>Section modulus: cm³ / in³.</summary>
     SectionModulus,
 

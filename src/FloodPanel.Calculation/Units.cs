@@ -39,6 +39,8 @@ public static class Units
             [Dimension.SectionLength] = (new("mm", 1e-3, 1), new("in", Inch, 3)),
             [Dimension.Deflection] = (new("mm", 1e-3), new("in", Inch)),
             [Dimension.SectionArea] = (new("cm²", 1e-4), new("in²", Inch * Inch)),
+            [Dimension.Area] = (new("m²", 1), new("ft²", Foot * Foot)),
+            [Dimension.AreaInertia] = (new("m⁴", 1), new("ft⁴", Foot * Foot * Foot * Foot)),
             [Dimension.SectionModulus] = (new("cm³", 1e-6), new("in³", Inch * Inch * Inch)),
             [Dimension.SecondMoment] = (new("cm⁴", 1e-8), new("in⁴", Inch * Inch * Inch * Inch)),
             [Dimension.Velocity] = (new("m/s", 1), new("ft/s", Foot)),

@@ -27,6 +27,8 @@ public class UnitsTests
         { Dimension.SectionLength, "mm", Length.FromMillimeters(1).Meters, "in", Length.FromInches(1).Meters },
         { Dimension.Deflection, "mm", Length.FromMillimeters(1).Meters, "in", Length.FromInches(1).Meters },
         { Dimension.SectionArea, "cm²", Area.FromSquareCentimeters(1).SquareMeters, "in²", Area.FromSquareInches(1).SquareMeters },
+        { Dimension.Area, "m²", 1, "ft²", Area.FromSquareFeet(1).SquareMeters },
+        { Dimension.AreaInertia, "m⁴", 1, "ft⁴", AreaMomentOfInertia.FromFeetToTheFourth(1).MetersToTheFourth },
         { Dimension.SectionModulus, "cm³", Volume.FromCubicCentimeters(1).CubicMeters, "in³", Volume.FromCubicInches(1).CubicMeters },
         {
             Dimension.SecondMoment, "cm⁴", AreaMomentOfInertia.FromCentimetersToTheFourth(1).MetersToTheFourth,

@@ -8,6 +8,7 @@ public static class VerificationTable
     [
         .. LevelRows.Rows(),
         .. WaterRows.Rows(),
+        .. PlaneAreaRows.Rows(),
         .. FlowRows.Rows(),
         .. WaveRows.Rows(),
         .. DebrisRows.Rows(),

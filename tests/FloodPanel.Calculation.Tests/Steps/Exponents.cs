@@ -11,6 +11,8 @@ internal readonly record struct Exponents(int Metre, int Kilogram, int Second)
     {
         Dimension.Ratio or Dimension.Count or Dimension.Probability or Dimension.Years or Dimension.Degrees or Dimension.Angle => None,
         Dimension.Length or Dimension.SectionLength or Dimension.Deflection or Dimension.LengthPerYear => new(1, 0, 0),
+        Dimension.Area => new(2, 0, 0),
+        Dimension.AreaInertia => new(4, 0, 0),
         Dimension.SectionArea => new(2, 0, 0),
         Dimension.SectionModulus => new(3, 0, 0),
         Dimension.SecondMoment => new(4, 0, 0),
