@@ -14,7 +14,7 @@ public static class OwnerSummary
     private const string SafetyNote = "calculation-aid";
 
     private const double FigureText = 2.25;
-    private const double FigureHeight = 61;
+    private const double FigureHeight = 58;
 
     /// <summary>Composes the summary. Nothing is calculated here.</summary>
     /// <param name="result">The calculation of the project.</param>
@@ -104,6 +104,7 @@ public static class OwnerSummary
         [
             new Heading(opening.Opening.Name, 2),
             OwnerAdvice.Verdict(opening, units),
+            .. LoadWords.Of(opening, units),
             new Figure(OpeningSheet.Draw(input, new Sheet(paper.ContentWidth, FigureHeight, FigureText))),
         ]);
     }

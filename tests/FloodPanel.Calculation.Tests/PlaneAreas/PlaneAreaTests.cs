@@ -82,7 +82,10 @@ public class PlaneAreaTests
     {
         var input = new PlaneAreaInput
         {
-            Shape = new TrapezoidShape(1, 1, 2), InclinationDegrees = 60, Depth = 0.9, WaterDensity = 9810 / 9.80665,
+            Shape = new TrapezoidShape(1, 1, 2),
+            InclinationDegrees = 60,
+            Depth = 0.9,
+            WaterDensity = 9810 / 9.80665,
         };
 
         var result = PlaneArea.Evaluate(input);

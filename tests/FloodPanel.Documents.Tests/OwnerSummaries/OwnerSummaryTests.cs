@@ -1,4 +1,5 @@
 using FloodPanel.Calculation;
+using FloodPanel.Calculation.ProjectTree;
 using FloodPanel.Documents.OwnerSummaries;
 using FloodPanel.Documents.Reports;
 
@@ -28,6 +29,33 @@ public class OwnerSummaryTests
         var report = Compose(project);
 
         Assert.Equal(new Band("Not for construction", reason), report.Band);
+    }
+
+    [Fact]
+    public void Compose_Actions_AreNamedInTheOwnersWords()
+    {
+        var project = Sample.Project with
+        {
+            Openings =
+            [
+                Sample.Garage with
+                {
+                    Actions = new()
+                    {
+                        Flow = new() { Velocity = 1.2 },
+                        Wave = new NonBreakingWaveInput { Height = 0.2, Period = 2.5 },
+                        Debris = new() { Velocity = 1.2 },
+                        Wind = new() { Pressure = 700 },
+                    },
+                },
+            ],
+        };
+
+        var report = OwnerSummary.Compose(Design.Run(project, Library.Empty), Library.Empty, UnitSystem.SI, 1, new DateOnly(2026, 3, 1));
+
+        Assert.Contains(
+            "Calculated for still water, flow of 1.20 m/s, waves 0.200 m high, a floating object of 450 kg at 1.20 m/s and wind on the dry barrier.",
+            All(report).OfType<Paragraph>().Select(p => p.Words));
     }
 
     [Fact]
