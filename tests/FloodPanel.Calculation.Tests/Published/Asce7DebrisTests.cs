@@ -37,6 +37,14 @@ public class Asce7DebrisTests
     public void Depth_Feet_Coefficient(double feet, double coefficient) =>
         Hand.Equal(coefficient, DebrisTables.ShallowDepth(feet * 0.3048));
 
+    /// <summary>Ground above the flood is below zero depth; what is no number is refused.</summary>
+    [Fact]
+    public void Depth_DryOrNotFinite_ZeroOrThrows()
+    {
+        Assert.Equal(0, DebrisTables.ShallowDepth(-2));
+        Assert.Throws<ArgumentOutOfRangeException>(() => DebrisTables.ShallowDepth(double.NaN));
+    }
+
     [Fact]
     public void Tables_Words_HoldTheirNumbers()
     {
@@ -67,6 +75,15 @@ public class Asce7DebrisTests
     [Fact]
     public void Force_StopHalved_ForceDoubled() =>
         Hand.Equal(2 * DebrisImpact.Force(450, 1.5, 0.1, 1), DebrisImpact.Force(450, 1.5, 0.05, 1));
+
+    [Fact]
+    public void Force_MassOrVelocityDoubled_ForceDoubled()
+    {
+        var force = DebrisImpact.Force(450, 1.5, 0.1, 1);
+
+        Hand.Equal(2 * force, DebrisImpact.Force(900, 1.5, 0.1, 1));
+        Hand.Equal(2 * force, DebrisImpact.Force(450, 3, 0.1, 1));
+    }
 
     [Theory]
     [InlineData(-1, 1, 0.03, 1)]

@@ -41,6 +41,48 @@ public class FemaP55DebrisTests
         Assert.All(estimates, e => Assert.NotEmpty(e.Source));
     }
 
+    /// <summary>
+    /// By hand: in 4 ft (1.2192 m) √(9.80665·1.2192)/2 = 1.7289 m/s, and 454·9.80665·1.7289·0.75·0.8/0.3048 = 15 152 N;
+    /// 100 lb/ft (1459.39 N/m) over 2 m are 2918.8 N.
+    /// </summary>
+    [Fact]
+    public void Comparison_PlaceKnown_RowsThatFollowFromIt()
+    {
+        var input = new DebrisInput { Mass = 454, Velocity = 2, Coefficients = new() { Depth = 0.75 } };
+
+        var (without, with) = (DebrisComparison.Of(input, force: 1), DebrisComparison.Of(input, force: 1, groundDepth: 1.2192, span: 2));
+
+        var added = with.Except(without).Select(e => e.Force).ToArray();
+        Assert.Equal(2, added.Length);
+        Assert.Equal(15_152, added[0], tolerance: 1);
+        Assert.Equal(2918.8, added[1], tolerance: 0.05);
+        Assert.Equal(without, with.Intersect(without));
+    }
+
+    /// <summary>Ground that stays dry has no velocity of its own.</summary>
+    [Fact]
+    public void Comparison_DryGround_NoForceAtFemasVelocity() => Assert.Equal(
+        0, DebrisComparison.Of(new() { Velocity = 1 }, force: 1, groundDepth: -0.3).Single(e => e.Method.Contains("own velocity", StringComparison.Ordinal)).Force);
+
+    [Theory]
+    [InlineData(-1, 1, 1, 0.8)]
+    [InlineData(454, -1, 1, 0.8)]
+    [InlineData(454, 1, -1, 0.8)]
+    [InlineData(454, 1, 1, double.NaN)]
+    public void Equation89_OutOfRange_Throws(double mass, double velocity, double factors, double structure) =>
+        Assert.Throws<ArgumentOutOfRangeException>(() => DebrisComparison.FemaForce(mass, velocity, factors, structure));
+
+    [Theory]
+    [InlineData(-1, 1, 1)]
+    [InlineData(454, double.PositiveInfinity, 1)]
+    [InlineData(454, 1, 0)]
+    public void EvenStop_OutOfRange_Throws(double mass, double velocity, double stop) =>
+        Assert.Throws<ArgumentOutOfRangeException>(() => DebrisComparison.EvenStop(mass, velocity, stop));
+
+    [Fact]
+    public void SpecialImpact_NegativeSpan_Throws() =>
+        Assert.Throws<ArgumentOutOfRangeException>(() => DebrisComparison.SpecialImpact(-1));
+
     /// <summary>Eq. 8.2 and ASCE 7, C5.4: V = d_s/1 s and √(g·d_s); 1.5 m gives 1.5 and 3.835 m/s.</summary>
     [Fact]
     public void Equation82_Depth_VelocityBounds()

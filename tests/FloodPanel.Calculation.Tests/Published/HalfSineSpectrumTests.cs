@@ -29,6 +29,7 @@ public class HalfSineSpectrumTests
     [InlineData(0.77)]
     [InlineData(1.6)]
     [InlineData(2.3)]
+    [InlineData(4.9)]
     public void HalfSine_Ratio_AsTheOscillatorItself(double pulse)
     {
         const double squared = 4 * Math.PI * Math.PI;
@@ -43,6 +44,33 @@ public class HalfSineSpectrumTests
 
         Assert.Equal(path.Max(state => Math.Abs(state[0])), ResponseRatio.HalfSine(pulse), tolerance: 2e-4);
     }
+
+    /// <summary>A pulse that lasts long is followed as if it were still: the response tends to 1, however long.</summary>
+    [Theory]
+    [InlineData(50)]
+    [InlineData(1e6)]
+    [InlineData(1e15)]
+    public void HalfSine_VeryLongPulse_TendsToOne(double ratio) =>
+        Assert.InRange(ResponseRatio.HalfSine(ratio), 1 - 1e-6, 1 + 1.1 / (2 * ratio) + 1e-9);
+
+    /// <summary>Several peaks: each is tried here, one by one, where the function goes to the greatest.</summary>
+    [Theory]
+    [InlineData(1.51)]
+    [InlineData(2.5)]
+    [InlineData(4.9)]
+    [InlineData(13.37)]
+    public void HalfSine_ManyPeaks_GreatestOfAll(double ratio) => Hand.Equal(
+        Enumerable.Range(1, (int)(ratio + 0.5)).Max(n => 2 * ratio / (2 * ratio - 1) * Math.Sin(2 * Math.PI * n / (2 * ratio + 1))),
+        ResponseRatio.HalfSine(ratio));
+
+    /// <summary>Both sides meet at π/2.</summary>
+    [Theory]
+    [InlineData(0.5 - 2e-7)]
+    [InlineData(0.5 - 1e-8)]
+    [InlineData(0.5)]
+    [InlineData(0.5 + 2e-7)]
+    public void HalfSine_AroundOneHalf_Continuous(double ratio) =>
+        Assert.Equal(Math.PI / 2, ResponseRatio.HalfSine(ratio), tolerance: 1e-6);
 
     [Fact]
     public void HalfSine_NoDuration_NoResponse() => Assert.Equal(0, ResponseRatio.HalfSine(0));

@@ -5,17 +5,15 @@ namespace FloodPanel.Calculation.Actions.Debris;
 /// <summary>Floating debris at one opening, resolved to forces. Heights from the sill.</summary>
 public sealed class DebrisModel
 {
-    private readonly DebrisInput input;
-    private readonly Member log;
-    private readonly double density;
     private readonly double retainedDepth;
+    private readonly DebrisResponse response;
     private readonly double[] spans;
     private readonly double[] forces;
 
     private DebrisModel(DebrisInput input, Member log, double unitWeight, double retainedDepth, double height, double[] spans)
     {
-        (this.input, this.log, this.retainedDepth, this.spans) = (input, log, retainedDepth, spans);
-        density = unitWeight / Physics.Gravity;
+        (Input, this.retainedDepth, this.spans) = (input, retainedDepth, spans);
+        response = new(input, log, unitWeight / Physics.Gravity);
         StrikeHeight = Math.Max(0, Math.Min(retainedDepth, height));
         LogShare = Math.Min(1, log.Section.Height / DebrisImpact.PatchHeight);
         forces = [.. spans.Select(ForceOn)];
@@ -24,6 +22,12 @@ public sealed class DebrisModel
             GreatestBay = forces[bay] > forces[GreatestBay] ? bay : GreatestBay;
         }
     }
+
+    /// <summary>The debris as entered.</summary>
+    public DebrisInput Input { get; }
+
+    /// <summary>True when the sill stays dry in the design flood: then nothing is struck.</summary>
+    public bool IsDry => !(retainedDepth > 0);
 
     /// <summary>Height at which posts and guides take the impact: still water, or the top of a lower barrier [m].</summary>
     public double StrikeHeight { get; }
@@ -52,66 +56,32 @@ public sealed class DebrisModel
 
     /// <summary>True where an object that floats at the water line can strike a log.</summary>
     /// <param name="logBottom">Height of the lower edge of the log [m].</param>
-    public bool Strikes(double logBottom) => retainedDepth > 0 && logBottom < retainedDepth + DebrisImpact.PatchHeight / 2;
+    public bool Strikes(double logBottom) => !IsDry && logBottom < retainedDepth + DebrisImpact.PatchHeight / 2;
 
     /// <summary>How the force on a log of a bay came about.</summary>
     /// <param name="bay">Bay from 0.</param>
     public Working Working(int bay)
     {
-        var factors = input.Coefficients;
-        var steps = new StepList(24);
-        var response = Response(spans[bay], steps);
+        var factors = Input.Coefficients;
+        var steps = new StepList(DebrisResponse.MostSteps + 9);
+        steps.Given("Δt", Input.StoppingTime, Dimension.Time);
+        response.Write(steps, spans[bay]);
         steps.Given("C_I", factors.Importance, Dimension.Ratio);
         steps.Given("C_O", factors.Orientation, Dimension.Ratio);
         steps.Given("C_D", factors.Depth, Dimension.Ratio);
         steps.Given("C_B", factors.Blockage, Dimension.Ratio);
-        steps.Add("C", "C_I·C_O·C_D·C_B·R_max", DebrisImpact.WithoutResponse(factors) * response, Dimension.Ratio);
-        steps.Given("m", input.Mass, Dimension.Mass);
-        steps.Given("V", input.Velocity, Dimension.Velocity);
-        steps.Add("F", "π·m·V·C/(2·Δt)", Impact(response), Dimension.Force);
-        var source = factors.Response is null ? $"{DebrisImpact.Source}; {ResponseRatio.Source}; {NaturalPeriod.Source}" : DebrisImpact.Source;
+        steps.Add("C", "C_I·C_O·C_D·C_B·R_max", Product(spans[bay]), Dimension.Ratio);
+        steps.Given("m", Input.Mass, Dimension.Mass);
+        steps.Given("V", Input.Velocity, Dimension.Velocity);
+        steps.Add("F", "π·m·V·C/(2·Δt)", Impact(spans[bay]), Dimension.Force);
+        var source = response.Source is { } derived ? $"{DebrisImpact.Source}; {derived}" : DebrisImpact.Source;
         return new("Force of debris", source, steps.Done());
     }
 
-    private double ForceOn(double span) =>
-        retainedDepth > 0 ? Impact(Response(span, new StepList(16))) : 0;
+    private double ForceOn(double span) => IsDry ? 0 : Impact(span);
 
-    private double Impact(double response) => DebrisImpact.Force(
-        input.Mass, input.Velocity, input.StoppingTime, DebrisImpact.WithoutResponse(input.Coefficients) * response);
+    private double Product(double span) => DebrisImpact.WithoutResponse(Input.Coefficients) * response.Of(span);
 
-    /// <summary>R_max as given, or from the log's own period, dry and wet, the larger; writes its steps.</summary>
-    private double Response(double span, StepList steps)
-    {
-        var stop = input.StoppingTime;
-        steps.Given("Δt", stop, Dimension.Time);
-        if (input.Coefficients.Response is { } given)
-        {
-            steps.Given("R_max", given, Dimension.Ratio);
-            return given;
-        }
-
-        var (height, lineMass) = (log.Section.Height, log.Material.Density * log.Section.Area);
-        var added = NaturalPeriod.AddedMass(density, height);
-        steps.Given("E", log.Material.ElasticModulus, Dimension.ElasticModulus);
-        steps.Given("I", log.Section.Inertia, Dimension.SecondMoment);
-        steps.Given("L", span, Dimension.Length);
-        steps.Given("m_l", lineMass, Dimension.LineMass);
-        var dry = Period(steps, "d", "m_l", lineMass, span);
-        steps.Given("ρ", density, Dimension.Density);
-        steps.Given("t", height, Dimension.SectionLength);
-        steps.Add("m_w", "π·ρ·t²/4", added, Dimension.LineMass);
-        var wet = Period(steps, "w", "(m_l + m_w)", lineMass + added, span);
-        steps.Add("R_max", "max(R_d, R_w)", Math.Max(dry, wet), Dimension.Ratio);
-        return Math.Max(dry, wet);
-    }
-
-    private double Period(StepList steps, string index, string massSymbol, double mass, double span)
-    {
-        var period = NaturalPeriod.Of(mass, log.Stiffness, span);
-        var response = ResponseRatio.Of(input.StoppingTime / period);
-        steps.Add($"T_{index}", $"2·L²/π·√({massSymbol}/(E·I))", period, Dimension.Time);
-        steps.Add($"r_{index}", $"Δt/T_{index}", input.StoppingTime / period, Dimension.Ratio);
-        steps.Given($"R_{index}", response, Dimension.Ratio);
-        return response;
-    }
+    private double Impact(double span) =>
+        DebrisImpact.Force(Input.Mass, Input.Velocity, Input.StoppingTime, Product(span));
 }

@@ -35,13 +35,20 @@ public static class DebrisTables
     ];
 
     /// <summary>C_D by zone, and by depth where the water is shallow.</summary>
-    /// <param name="depth">d_s, still-water depth above ground [m].</param>
+    /// <param name="depth">d_s, still-water depth above ground [m]; below zero where the ground stays dry.</param>
+    /// <exception cref="ArgumentOutOfRangeException">The depth is not finite.</exception>
     public static ValueList<DebrisChoice> Depth(double depth) =>
     [
         new("Floodway, coastal high-hazard zone, or deeper than 5 ft (1.5 m)", 1.0), new("Elsewhere, at this depth", ShallowDepth(depth)),
     ];
 
     /// <summary>C_D = 0.25·(d_s − 1) with d_s in ft, 0 to 1 [-]: 0.25 at 2 ft, 1 from 5 ft.</summary>
-    /// <param name="depth">d_s, still-water depth above ground [m].</param>
-    public static double ShallowDepth(double depth) => Math.Clamp(0.25 * (depth / Foot - 1), 0, 1);
+    /// <param name="depth">d_s, still-water depth above ground [m]; below zero where the ground stays dry.</param>
+    /// <exception cref="ArgumentOutOfRangeException">The depth is not finite.</exception>
+    public static double ShallowDepth(double depth)
+    {
+        Guard.Finite(depth);
+
+        return Math.Clamp(0.25 * (depth / Foot - 1), 0, 1);
+    }
 }

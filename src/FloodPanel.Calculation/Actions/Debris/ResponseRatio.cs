@@ -17,49 +17,49 @@ public static class ResponseRatio
     {
         Guard.NonNegative(ratio);
 
-        var row = ratio / Step;
-        if (row >= Table.Length - 1)
-        {
-            return Table[^1];
-        }
-
-        var (below, part) = ((int)row, row - (int)row);
-        return Table[below] + part * (Table[below + 1] - Table[below]);
+        return RowAt(ratio) is { } row
+            ? row.Response + (row.Next - row.Response) * (ratio - row.Ratio) / Step
+            : Table[^1];
     }
 
     /// <summary>R_max of an undamped oscillator under a half-sine pulse, exact [-].</summary>
     /// <param name="ratio">r = Δt/T_n [-], ≥ 0.</param>
     /// <exception cref="ArgumentOutOfRangeException">The ratio is negative or not finite.</exception>
     /// <remarks>
-    /// With β = 1/(2r): up to r = 1/2 the greatest response comes after the pulse, 2β/(β² − 1)·cos(π·r), π/2 at r = 1/2;
-    /// above, within it, the greatest sin(2π·n·β/(1 + β))/(1 − β) over n up to (1 + β)/(2β). Source: first principles.
+    /// Up to r = 1/2 the greatest response comes after the pulse, 4·r/(1 − 4·r²)·cos(π·r), π/2 at r = 1/2; above, within it,
+    /// the greatest 2·r/(2·r − 1)·sin(2·π·n/(2·r + 1)) over whole n from 1 to r + 1/2. Source: first principles.
     /// </remarks>
     public static double HalfSine(double ratio)
     {
         Guard.NonNegative(ratio);
 
-        if (ratio == 0)
-        {
-            return 0;
-        }
+        return IsHalf(ratio) ? Math.PI / 2
+            : ratio < 0.5 ? 4 * ratio / (1 - 4 * ratio * ratio) * Math.Cos(Math.PI * ratio)
+            : 2 * ratio / (2 * ratio - 1) * Math.Sin(2 * Math.PI * Peak(ratio) / (2 * ratio + 1));
+    }
 
-        var beta = 1 / (2 * ratio);
-        if (Math.Abs(beta - 1) < 1e-7)
-        {
-            return Math.PI / 2;
-        }
+    /// <summary>The formula behind <see cref="HalfSine"/>, written with a symbol for the ratio.</summary>
+    internal static string HalfSineFormula(double ratio, string symbol) =>
+        IsHalf(ratio) ? "π/2"
+        : ratio < 0.5 ? $"4·{symbol}/(1 − 4·{symbol}²)·cos(π·{symbol})"
+        : FormattableString.Invariant($"2·{symbol}/(2·{symbol} − 1)·sin(2·π·{Peak(ratio):0}/(2·{symbol} + 1))");
 
-        if (beta > 1)
-        {
-            return 2 * beta / (beta * beta - 1) * Math.Cos(Math.PI * ratio);
-        }
+    /// <summary>The row of the table at or below a ratio, with the response of the next; null from the last row on.</summary>
+    internal static (double Ratio, double Response, double Next)? RowAt(double ratio)
+    {
+        var row = ratio / Step;
+        return row < Table.Length - 1 ? ((int)row * Step, Table[(int)row], Table[(int)row + 1]) : null;
+    }
 
-        var greatest = 0.0;
-        for (var n = 1; n <= (1 + beta) / (2 * beta); n++)
-        {
-            greatest = Math.Max(greatest, Math.Sin(2 * Math.PI * n * beta / (1 + beta)) / (1 - beta));
-        }
+    // Nearer to 1/2 than this the formula on either side is 0/0 but for rounding.
+    private static bool IsHalf(double ratio) => Math.Abs(ratio - 0.5) < 1e-7;
 
-        return greatest;
+    /// <summary>n of the greatest peak: the sine is greatest next to a quarter turn, n = (2·r + 1)/4.</summary>
+    private static double Peak(double ratio)
+    {
+        var quarter = (2 * ratio + 1) / 4;
+        var (below, above) = (Math.Max(1, Math.Floor(quarter)), Math.Ceiling(quarter));
+        double Height(double n) => Math.Sin(2 * Math.PI * n / (2 * ratio + 1));
+        return Height(below) >= Height(above) ? below : above;
     }
 }

@@ -1,7 +1,7 @@
 using FloodPanel.Calculation.Actions.Debris;
 using MathNet.Numerics.LinearAlgebra;
 
-namespace FloodPanel.Calculation.Tests.Actions;
+namespace FloodPanel.Calculation.Tests.Actions.Debris;
 
 /// <summary>The first period of a simply supported log against beam elements, which share nothing with the closed form.</summary>
 public class NaturalPeriodTests
@@ -24,6 +24,13 @@ public class NaturalPeriodTests
     [InlineData(1, 1, double.NaN)]
     public void Of_OutOfRange_Throws(double lineMass, double stiffness, double span) =>
         Assert.Throws<ArgumentOutOfRangeException>(() => NaturalPeriod.Of(lineMass, stiffness, span));
+
+    [Theory]
+    [InlineData(0, 0.2)]
+    [InlineData(1000, 0)]
+    [InlineData(1000, double.NaN)]
+    public void AddedMass_OutOfRange_Throws(double density, double height) =>
+        Assert.Throws<ArgumentOutOfRangeException>(() => NaturalPeriod.AddedMass(density, height));
 
     private static double ByElements(double lineMass, double stiffness, double span)
     {
