@@ -1,4 +1,5 @@
 using FloodPanel.Calculation.Actions;
+using FloodPanel.Calculation.Actions.Debris;
 using FloodPanel.Calculation.Actions.Waves;
 using FloodPanel.Calculation.Handling;
 using FloodPanel.Calculation.ProjectTree;
@@ -29,6 +30,11 @@ public static class Cautions
         if (model.Wave is { } wave)
         {
             notes.AddRange(WaveNotes.Of(wave, model.Rake));
+        }
+
+        if (model.Debris is { } debris)
+        {
+            notes.AddRange(DebrisNotes.Of(debris));
         }
 
         Strengths(notes, NeededChecks.Logs, model.Log);

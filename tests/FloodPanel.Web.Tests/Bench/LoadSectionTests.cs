@@ -74,7 +74,7 @@ public class LoadSectionTests : BenchContext
         page.Find("[data-testid=switch-debris]").Change(true);
         ChooseCase(page, "Debris");
 
-        Assert.Equal(8, page.FindAll("[data-testid=debris-methods] tbody tr").Count);
+        Assert.Equal(10, page.FindAll("[data-testid=debris-methods] tbody tr").Count);
         Assert.Single(page.FindAll("[data-testid=section] [data-part=action-debris]"));
         Assert.Contains("deflection is reported, not judged", page.Markup);
     }

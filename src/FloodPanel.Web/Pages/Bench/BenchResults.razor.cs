@@ -1,5 +1,6 @@
 using FloodPanel.Calculation;
 using FloodPanel.Calculation.Cases;
+using FloodPanel.Calculation.Water;
 using FloodPanel.Web.Shared.Results;
 using Microsoft.AspNetCore.Components;
 
@@ -40,6 +41,11 @@ public sealed partial class BenchResults
     private IReadOnlyList<int> Bays => [.. Enumerable.Range(1, Widths.Count).Where(bay => FirstAsWide(bay) == bay)];
 
     private int ShownBay => Bays.Contains(FirstAsWide(chosenBay)) ? FirstAsWide(chosenBay) : 1;
+
+    private double GroundDepth => Math.Max(
+        0, FloodLevels.Depth(Result.DesignFloodLevel, Result.Opening.GroundLevel ?? Result.Opening.SillLevel));
+
+    private double WidestSpan => Widths.Max() + Result.Opening.Barrier.Logs.EndBearing;
 
     private string BaysInWords => Widths.Count > 1 ? $"the same in each of {Widths.Count} bays" : "";
 

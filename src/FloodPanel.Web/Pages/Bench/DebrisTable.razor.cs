@@ -17,10 +17,18 @@ public sealed partial class DebrisTable
     [Parameter, EditorRequired]
     public CaseResult Case { get; set; } = null!;
 
+    /// <summary>Still water above outside ground [m].</summary>
+    [Parameter, EditorRequired]
+    public double GroundDepth { get; set; }
+
+    /// <summary>Effective span of the widest bay [m].</summary>
+    [Parameter, EditorRequired]
+    public double Span { get; set; }
+
     /// <summary>The reader's units.</summary>
     [CascadingParameter]
     public UnitSystem Units { get; set; }
 
     private IReadOnlyList<DebrisEstimate> Estimates =>
-        DebrisComparison.Of(Input, Case.Actions.First(a => a.Kind == ActionKind.Debris).Impact!.Value.Characteristic);
+        DebrisComparison.Of(Input, Case.Actions.First(a => a.Kind == ActionKind.Debris).Impact!.Value.Characteristic, GroundDepth, Span);
 }
