@@ -44,6 +44,12 @@ public static class Cautions
         }
 
         Declarations(notes, opening);
+        if (opening.Leakage is { BackFlowClosed: false })
+        {
+            notes.Add(new("back-flow-open", new(
+                $"Nobody has confirmed that water cannot come back behind the barrier through drains, vents and cavities: check each way, and close it or fit a valve.")));
+        }
+
         Lifting(notes, schedule);
         Walls(notes, opening, FloodLevels.Depth(site.DesignFloodLevel, Math.Min(opening.SillLevel, opening.GroundLevel ?? opening.SillLevel)));
         notes.Add(CalculationAid);

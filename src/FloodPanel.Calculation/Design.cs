@@ -1,6 +1,7 @@
 using FloodPanel.Calculation.Actions;
 using FloodPanel.Calculation.Cases;
 using FloodPanel.Calculation.Handling;
+using FloodPanel.Calculation.Leakage;
 using FloodPanel.Calculation.ProjectTree;
 using FloodPanel.Calculation.Water;
 
@@ -46,6 +47,7 @@ public static class Design
             Cases = cases,
             Freeboard = freeboard,
             Schedule = schedule,
+            Leakage = LeakageEstimate.Of(opening.Leakage, model),
             Verdict = VerdictRules.Of(opening, model, cases, freeboard, uncovered),
             Notes = Cautions.Of(site, opening, model, schedule),
         };

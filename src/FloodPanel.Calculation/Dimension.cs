@@ -42,6 +42,18 @@ public enum Dimension
     /// <summary>Second moment of a surface under water: m⁴ / ft⁴.</summary>
     AreaInertia,
 
+    /// <summary>Volume of water: L / gal.</summary>
+    Volume,
+
+    /// <summary>Flow of water: L/h / gal/h.</summary>
+    FlowRate,
+
+    /// <summary>Leakage per length of seal [m³/s per m]: L/h per m / gal/h per ft.</summary>
+    LeakRate,
+
+    /// <summary>Rain [m/s]: mm/h / in/h.</summary>
+    RainIntensity,
+
     /// <summary>Section modulus: cm³ / in³.</summary>
     SectionModulus,
 

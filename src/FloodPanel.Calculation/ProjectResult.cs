@@ -1,5 +1,6 @@
 using FloodPanel.Calculation.Actions;
 using FloodPanel.Calculation.Cases;
+using FloodPanel.Calculation.Leakage;
 using FloodPanel.Calculation.ProjectTree;
 
 namespace FloodPanel.Calculation;
@@ -70,6 +71,9 @@ public sealed record OpeningResult
 
     /// <summary>Cutting length and mass of the logs, one row for each bay.</summary>
     public required IReadOnlyList<LogSchedule> Schedule { get; init; }
+
+    /// <summary>Leakage, rain and pump; null where nobody asks.</summary>
+    public LeakageResult? Leakage { get; init; }
 
     /// <summary>The verdict.</summary>
     public required Verdict Verdict { get; init; }

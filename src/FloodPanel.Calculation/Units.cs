@@ -11,7 +11,8 @@ public sealed record Unit(string Symbol, double InSI, int? Decimals = null);
 
 /// <summary>
 /// The one place that converts and prints. Everything else is base SI. The factors are exact by definition:
-/// 1 ft = 0.3048 m, 1 lb = 0.45359237 kg (international yard and pound agreement, 1959), 1 lbf = 1 lb × 9.80665 m/s².
+/// 1 ft = 0.3048 m, 1 lb = 0.45359237 kg (international yard and pound agreement, 1959), 1 lbf = 1 lb × 9.80665 m/s²,
+/// 1 US gallon = 231 in³.
 /// </summary>
 public static class Units
 {
@@ -20,6 +21,8 @@ public static class Units
     private const double Pound = 0.45359237;
     private const double PoundForce = Pound * Physics.Gravity;
     private const double KipPerSquareInch = 1000 * PoundForce / (Inch * Inch);
+    private const double Gallon = 231 * Inch * Inch * Inch;
+    private const double Hour = 3600;
     private const double Degree = Math.PI / 180;
 
     /// <summary>Decimals without an exponent, however small the number.</summary>
@@ -41,6 +44,10 @@ public static class Units
             [Dimension.SectionArea] = (new("cm²", 1e-4), new("in²", Inch * Inch)),
             [Dimension.Area] = (new("m²", 1), new("ft²", Foot * Foot)),
             [Dimension.AreaInertia] = (new("m⁴", 1), new("ft⁴", Foot * Foot * Foot * Foot)),
+            [Dimension.Volume] = (new("L", 1e-3), new("gal", Gallon)),
+            [Dimension.FlowRate] = (new("L/h", 1e-3 / Hour), new("gal/h", Gallon / Hour)),
+            [Dimension.LeakRate] = (new("L/h per m", 1e-3 / Hour), new("gal/h per ft", Gallon / Hour / Foot)),
+            [Dimension.RainIntensity] = (new("mm/h", 1e-3 / Hour), new("in/h", Inch / Hour)),
             [Dimension.SectionModulus] = (new("cm³", 1e-6), new("in³", Inch * Inch * Inch)),
             [Dimension.SecondMoment] = (new("cm⁴", 1e-8), new("in⁴", Inch * Inch * Inch * Inch)),
             [Dimension.Velocity] = (new("m/s", 1), new("ft/s", Foot)),

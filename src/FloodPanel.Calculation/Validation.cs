@@ -129,6 +129,17 @@ public static class Validation
 
         ActionValidation.Validate(opening, path, problems, library);
         BarrierValidation.Validate(opening, path, problems, library);
+        ValidateLeakage(opening.Leakage, $"{path}.leakage", problems);
+    }
+
+    private static void ValidateLeakage(LeakageInput? leakage, string path, ProblemList problems)
+    {
+        problems.Check(Fields.LeakRate, leakage?.Rate, path);
+        problems.Check(Fields.RainIntensity, leakage?.RainIntensity, path);
+        problems.Check(Fields.RainArea, leakage?.RainArea, path);
+        problems.Check(Fields.RunoffCoefficient, leakage?.RunoffCoefficient, path);
+        problems.Check(Fields.SumpVolume, leakage?.SumpVolume, path);
+        problems.Check(Fields.PumpMargin, leakage?.PumpMargin, path);
     }
 
     private static Quantity Length(double value) => new(value, Dimension.Length);

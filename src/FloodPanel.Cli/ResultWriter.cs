@@ -2,6 +2,7 @@ using System.Buffers;
 using System.Text.Encodings.Web;
 using System.Text.Json;
 using FloodPanel.Calculation;
+using FloodPanel.Calculation.Leakage;
 
 namespace FloodPanel.Cli;
 
@@ -60,7 +61,25 @@ internal static class ResultWriter
         }
 
         json.WriteEndArray();
+        WriteLeakage(json, opening.Leakage);
         WriteNotes(json, opening.Notes);
+        json.WriteEndObject();
+    }
+
+    private static void WriteLeakage(Utf8JsonWriter json, LeakageResult? leakage)
+    {
+        if (leakage is null)
+        {
+            return;
+        }
+
+        json.WriteStartObject("leakage");
+        json.WriteFigure("widthLength", leakage.WidthLength);
+        json.WriteFigure("sealLength", leakage.SealLength);
+        json.WriteFigure("leak", leakage.Leak);
+        json.WriteFigure("rain", leakage.Rain);
+        json.WriteFigure("pump", leakage.Pump);
+        json.WriteFigure("timeToFill", leakage.TimeToFill);
         json.WriteEndObject();
     }
 

@@ -29,6 +29,16 @@ public class UnitsTests
         { Dimension.SectionArea, "cm²", Area.FromSquareCentimeters(1).SquareMeters, "in²", Area.FromSquareInches(1).SquareMeters },
         { Dimension.Area, "m²", 1, "ft²", Area.FromSquareFeet(1).SquareMeters },
         { Dimension.AreaInertia, "m⁴", 1, "ft⁴", AreaMomentOfInertia.FromFeetToTheFourth(1).MetersToTheFourth },
+        { Dimension.Volume, "L", Volume.FromLiters(1).CubicMeters, "gal", Volume.FromUsGallons(1).CubicMeters },
+        { Dimension.FlowRate, "L/h", VolumeFlow.FromLitersPerHour(1).CubicMetersPerSecond, "gal/h", VolumeFlow.FromUsGallonsPerHour(1).CubicMetersPerSecond },
+        {
+            Dimension.LeakRate, "L/h per m", VolumeFlow.FromLitersPerHour(1).CubicMetersPerSecond,
+            "gal/h per ft", VolumeFlow.FromUsGallonsPerHour(1).CubicMetersPerSecond / Length.FromFeet(1).Meters
+        },
+        {
+            Dimension.RainIntensity, "mm/h", Speed.FromMillimetersPerHour(1).MetersPerSecond,
+            "in/h", Speed.FromInchesPerHour(1).MetersPerSecond
+        },
         { Dimension.SectionModulus, "cm³", Volume.FromCubicCentimeters(1).CubicMeters, "in³", Volume.FromCubicInches(1).CubicMeters },
         {
             Dimension.SecondMoment, "cm⁴", AreaMomentOfInertia.FromCentimetersToTheFourth(1).MetersToTheFourth,

@@ -101,6 +101,17 @@ internal static class Example
             },
             ByOthers = [new DesignedByOthers("anchors", "N. Lund", "A-12")],
         },
+        Leakage = new LeakageInput
+        {
+            Convention = LeakConvention.Seal,
+            Rate = 2e-7,
+            RainIntensity = 1.4e-5,
+            RainArea = 22,
+            RunoffCoefficient = 0.8,
+            SumpVolume = 0.12,
+            PumpMargin = 2,
+            BackFlowClosed = true,
+        },
     };
 
     private static Opening Hatch => new()

@@ -114,6 +114,24 @@ public static class Fields
     /// <summary>StrengthRule.Multiplier and StrengthRule.Divisor.</summary>
     public static Field StrengthFactor { get; } = new("factor", "Strength factor", Dimension.Ratio, 0.1, 10, "Multiplies or divides the characteristic strength.");
 
+    /// <summary>LeakageInput.Rate.</summary>
+    public static Field LeakRate { get; } = new("rate", "Leak rate", Dimension.LeakRate, 0, 0.01, "Allowed by a test, or measured.");
+
+    /// <summary>LeakageInput.RainIntensity.</summary>
+    public static Field RainIntensity { get; } = new("rainIntensity", "Rain intensity", Dimension.RainIntensity, 0, 1e-3 / 3600 * 1000, "Of the heaviest rain that falls while the barrier stands.");
+
+    /// <summary>LeakageInput.RainArea.</summary>
+    public static Field RainArea { get; } = new("rainArea", "Area behind", Dimension.Area, 0, 1e6, "That drains towards the barrier on the protected side.");
+
+    /// <summary>LeakageInput.RunoffCoefficient.</summary>
+    public static Field RunoffCoefficient { get; } = new("runoffCoefficient", "Runoff coefficient", Dimension.Ratio, 0, 1, "0.9 paved, 0.3 lawn (common practice).");
+
+    /// <summary>LeakageInput.SumpVolume.</summary>
+    public static Field SumpVolume { get; } = new("sumpVolume", "Sump volume", Dimension.Volume, 0, 1000, "Where the pump stands; nothing for none.");
+
+    /// <summary>LeakageInput.PumpMargin.</summary>
+    public static Field PumpMargin { get; } = new("pumpMargin", "Pump margin", Dimension.Ratio, 1, 10, "Pump flow over inflow.");
+
     /// <summary>LogStack.Count.</summary>
     public static Field LogCount { get; } = new("count", "Number of logs", Dimension.Count, 1, 100, "Logs in the stack.");
 

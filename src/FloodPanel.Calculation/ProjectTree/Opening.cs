@@ -35,6 +35,9 @@ public sealed record Opening
 
     /// <summary>What closes the opening.</summary>
     public Barrier Barrier { get; init; } = new();
+
+    /// <summary>Leakage, rain and pump, or null where nobody asks.</summary>
+    public LeakageInput? Leakage { get; init; }
 }
 
 /// <summary>The wall around an opening.</summary>

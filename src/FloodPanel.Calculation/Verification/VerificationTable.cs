@@ -13,5 +13,6 @@ public static class VerificationTable
         .. WaveRows.Rows(),
         .. DebrisRows.Rows(),
         .. MemberRows.Rows(),
+        .. LeakageRows.Rows(),
     ];
 }

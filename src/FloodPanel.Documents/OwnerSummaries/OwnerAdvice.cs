@@ -1,5 +1,6 @@
 using System.Globalization;
 using FloodPanel.Calculation;
+using FloodPanel.Calculation.Leakage;
 using FloodPanel.Calculation.ProjectTree;
 using FloodPanel.Documents.Reports;
 using FloodPanel.Documents.Typography;
@@ -60,15 +61,30 @@ internal static class OwnerAdvice
     }
 
     /// <summary>What an owner should know before the water comes.</summary>
-    public static IEnumerable<Block> WhatToExpect(ProjectResult result)
+    public static IEnumerable<Block> WhatToExpect(ProjectResult result, UnitSystem units)
     {
         var one = result.Openings.Count == 1;
         yield return new Heading("What to expect", 2);
         yield return Item("Put the " + (one ? "barrier" : "barriers") + " up before the water comes. Practise it, and note how long it takes and how many people it needs.");
         yield return Item("Some water leaks past every barrier. Keep a pump ready on the dry side, and know where it can pump to.");
+        foreach (var opening in result.Openings)
+        {
+            if (opening.Leakage is { } leakage)
+            {
+                yield return Item(Pump(opening.Opening, leakage, units));
+            }
+        }
+
         yield return Item("Water also finds other ways in: drains, vents, cavities, floors and walls. A barrier closes only its own opening.");
         yield return Item("Water higher than the barrier flows over it. A barrier can also fail, at once and without warning.");
         yield return Item("Leave when you are told to. A barrier protects property; nobody should stay because it stands.");
+    }
+
+    private static string Pump(Opening opening, LeakageResult leakage, UnitSystem units)
+    {
+        string Flow(double value) => Units.Format(value, Dimension.FlowRate, units);
+        var rain = leakage.Rain > 0 ? $" and {Flow(leakage.Rain)} of rain behind it" : "";
+        return $"{ShortName(opening.Name)}: about {Flow(leakage.Leak)} through the seals{rain}; the pump should take at least {Flow(leakage.Pump)}.";
     }
 
     /// <summary>A name cut to a part of a line.</summary>

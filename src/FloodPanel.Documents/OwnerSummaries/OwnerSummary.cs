@@ -47,7 +47,7 @@ public static class OwnerSummary
                 ]),
                 .. Protection(result, units),
                 .. Parts(result, library, units),
-                .. OwnerAdvice.WhatToExpect(result),
+                .. OwnerAdvice.WhatToExpect(result, units),
                 .. result.Openings.Select(o => Opening(result.Project, o, library, units, revision, paper)),
                 .. Cautions(result, units),
                 new Together([new Paragraph(SafetyWords(result, units), ParagraphKind.Strong), new SignatureLines(project.Engineer)]),

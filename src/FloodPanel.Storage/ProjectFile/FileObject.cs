@@ -61,6 +61,8 @@ internal sealed class FileObject
 
     public string Text(string name, string fallback) => Find(name)?.AsText() ?? fallback;
 
+    public bool Flag(string name, bool fallback) => Find(name)?.AsFlag() ?? fallback;
+
     public T? Word<T>(string name, Words<T> words) =>
         Need(name, words.Allowed) is { } value ? value.AsWord(words) : default;
 

@@ -36,6 +36,17 @@ internal readonly record struct FileValue(JsonElement Element, string Path, Prob
         return 0;
     }
 
+    public bool AsFlag()
+    {
+        if (Element.ValueKind is JsonValueKind.True or JsonValueKind.False)
+        {
+            return Element.GetBoolean();
+        }
+
+        Refuse("true or false");
+        return false;
+    }
+
     public string AsText()
     {
         if (IsText)

@@ -24,6 +24,7 @@ internal static class OpeningReader
             Wall = ReadWall(opening.Object("wall"), blank.Wall),
             Actions = opening.Object("actions") is { } actions ? ActionReader.Read(actions) : blank.Actions,
             Barrier = opening.NeededObject("barrier") is { } barrier ? ReadBarrier(barrier) : blank.Barrier,
+            Leakage = opening.Object("leakage") is { } leakage ? LeakageFile.Read(leakage) : null,
         };
         opening.Close();
         return read;

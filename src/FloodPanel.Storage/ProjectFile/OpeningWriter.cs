@@ -21,6 +21,7 @@ internal static class OpeningWriter
         json.WriteEndObject();
         ActionWriter.Write(json, opening.Actions);
         WriteBarrier(json, opening.Barrier);
+        LeakageFile.Write(json, opening.Leakage);
         json.WriteEndObject();
     }
 

@@ -46,6 +46,10 @@ internal static class FileWords
         ("timber-frame", WallKind.TimberFrame),
         ("steel-frame", WallKind.SteelFrame));
 
+    public static readonly Words<LeakConvention> Leak = new(
+        ("width", LeakConvention.Width),
+        ("seal", LeakConvention.Seal));
+
     public static readonly Words<MaterialFamily> Family = new(
         ("aluminium", MaterialFamily.Aluminium),
         ("steel", MaterialFamily.Steel),

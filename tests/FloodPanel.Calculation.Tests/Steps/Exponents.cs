@@ -11,6 +11,10 @@ internal readonly record struct Exponents(int Metre, int Kilogram, int Second)
     {
         Dimension.Ratio or Dimension.Count or Dimension.Probability or Dimension.Years or Dimension.Degrees or Dimension.Angle => None,
         Dimension.Length or Dimension.SectionLength or Dimension.Deflection or Dimension.LengthPerYear => new(1, 0, 0),
+        Dimension.Volume => new(3, 0, 0),
+        Dimension.FlowRate => new(3, 0, -1),
+        Dimension.LeakRate => new(2, 0, -1),
+        Dimension.RainIntensity => new(1, 0, -1),
         Dimension.Area => new(2, 0, 0),
         Dimension.AreaInertia => new(4, 0, 0),
         Dimension.SectionArea => new(2, 0, 0),

@@ -177,11 +177,11 @@ public class RefusalTests
     {
         string[] nullable =
         [
-            "ownBasis", "strengths", "openings", "levels", "wall", "actions", "flow", "wave", "debris", "coefficients", "wind", "line", "posts", "byOthers", "groundLevel",
+            "ownBasis", "leakage", "strengths", "openings", "levels", "wall", "actions", "flow", "wave", "debris", "coefficients", "wind", "line", "posts", "byOthers", "groundLevel",
             "protectedSideLevel", "response", "bendingStrength", "shearStrength", "allowableBending", "allowableShear",
         ];
         string[] whole = ["count", "webs", "riskCategory"];
-        string[] emptyAllowed = ["strengths", "openings", "levels", "bays", "byOthers", "wall", "actions", "coefficients"];
+        string[] emptyAllowed = ["leakage", "strengths", "openings", "levels", "bays", "byOthers", "wall", "actions", "coefficients"];
         string[] libraryId = ["material", "profile"];
         string[] words = ["format", "designBasis", "floodZone", "kind", "family", "shape"];
         var name = place.Name;
@@ -192,7 +192,7 @@ public class RefusalTests
                 && !whole.Contains(name) && name != "version",
             "[]" => place.Node is JsonArray && emptyAllowed.Contains(name),
             "{}" => place.Node is JsonObject && emptyAllowed.Contains(name),
-            "true" => false,
+            "true" => name == "backFlowClosed",
             _ => (place.Node?.GetValueKind() == JsonValueKind.String && !words.Contains(name)) || libraryId.Contains(name),
         };
     }

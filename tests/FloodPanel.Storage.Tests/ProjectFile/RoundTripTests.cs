@@ -83,7 +83,7 @@ public class RoundTripTests
 
         Assert.Equal("format version name reference client address engineer designBasis ownBasis site openings", Names(file));
         Assert.Equal(
-            "id name sillLevel groundLevel clearWidth clearHeight rake protectedSideLevel wall actions barrier",
+            "id name sillLevel groundLevel clearWidth clearHeight rake protectedSideLevel wall actions barrier leakage",
             Names(file["openings"]![0]!));
         Assert.Equal("logs bays posts byOthers", Names(file["openings"]![0]!["barrier"]!));
         Assert.Equal("flow wave debris wind line", Names(file["openings"]![0]!["actions"]!));
