@@ -8,7 +8,7 @@ namespace FloodPanel.Documents.Drawings;
 /// </summary>
 internal static class PressureReadings
 {
-    private const int Strips = 48;
+    private const int Strips = 30;
 
     public static IEnumerable<Shape> Draw(Sheet sheet, DrawingInput input, CaseResult loadCase, Projection view, double right)
     {

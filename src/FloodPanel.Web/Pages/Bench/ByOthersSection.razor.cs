@@ -8,6 +8,8 @@ public sealed partial class ByOthersSection
 {
     private readonly Dictionary<string, DesignedByOthers> remembered = [];
 
+    protected override object? Shown => (Barrier.ByOthers, Barrier.Posts is null);
+
     // Posts and base plates need a check only where there are posts; what was declared before stays visible.
     private IEnumerable<string> Checks => NeededChecks.MayBeByOthers.Where(check =>
         Barrier.Posts is not null || check is not (NeededChecks.Posts or NeededChecks.BasePlates) || DeclarationOf(check) is not null);

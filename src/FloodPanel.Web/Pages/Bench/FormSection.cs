@@ -8,7 +8,7 @@ namespace FloodPanel.Web.Pages.Bench;
 /// <summary>A section of the form of an opening: shows it, finds its problems, raises its edits.</summary>
 public abstract class FormSection : ComponentBase
 {
-    private (Opening?, IReadOnlyList<InputProblem>?, UnitSystem, object?) lastRendered;
+    private (object?, IReadOnlyList<InputProblem>?, UnitSystem, object?) lastRendered;
 
     /// <summary>The opening.</summary>
     [Parameter, EditorRequired]
@@ -32,13 +32,17 @@ public abstract class FormSection : ComponentBase
 
     protected Barrier Barrier => Opening.Barrier;
 
+    /// <summary>The part of the opening that the section shows: a key typed elsewhere does not draw it again.</summary>
+    protected virtual object? Shown => Opening;
+
     /// <summary>What a section shows besides the opening; when it changes the section is drawn again.</summary>
     protected virtual object? Besides => null;
 
     protected override bool ShouldRender()
     {
-        var now = (Opening, Problems, Units, Besides);
-        var same = ReferenceEquals(now.Opening, lastRendered.Item1) && ReferenceEquals(now.Problems, lastRendered.Item2)
+        var now = (Shown, Problems, Units, Besides);
+        var sameProblems = ReferenceEquals(now.Problems, lastRendered.Item2) || (now.Problems.Count == 0 && lastRendered.Item2?.Count == 0);
+        var same = Equals(now.Shown, lastRendered.Item1) && sameProblems
             && now.Units == lastRendered.Item3 && Equals(now.Besides, lastRendered.Item4);
         lastRendered = now;
         return !same;

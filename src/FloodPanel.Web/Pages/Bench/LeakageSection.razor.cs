@@ -11,6 +11,8 @@ public sealed partial class LeakageSection
 
     private LeakageInput remembered = new();
 
+    protected override object? Shown => Opening.Leakage;
+
     private static string Name(LeakConvention convention) => convention == LeakConvention.Width ? "Clear width" : "Wetted seal";
 
     /// <summary>The published rate that stands in the fields; one that is in no list when none does.</summary>

@@ -9,6 +9,8 @@ public sealed partial class LogsSection
 {
     private static readonly LogStack Usual = new();
 
+    protected override object? Shown => Barrier.Logs;
+
     /// <summary>Materials and profiles to choose from.</summary>
     [Parameter, EditorRequired]
     public Library Library { get; set; } = null!;

@@ -15,6 +15,8 @@ public sealed partial class WaterSection
     [Parameter, EditorRequired]
     public string SiteAddress { get; set; } = "";
 
+    protected override object? Shown => null;
+
     protected override object? Besides => Site;
 
     private string Level(double value) => Calculation.Units.Format(value, Dimension.Length, Units);

@@ -15,6 +15,8 @@ public abstract class LoadSection<T> : FormSection
     [Parameter, EditorRequired]
     public Site Site { get; set; } = null!;
 
+    protected override object? Shown => (Of(Opening.Actions), Opening.GroundLevel, Opening.SillLevel);
+
     protected override object? Besides => Site;
 
     /// <summary>Still water above outside ground [m]; 0 where the ground stays dry.</summary>
