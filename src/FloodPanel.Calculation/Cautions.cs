@@ -21,7 +21,7 @@ public static class Cautions
         $"This is a calculation aid. It must be checked by a licensed engineer and follow local codes. A barrier can fail or be overtopped: people leave when told to."));
 
     internal static List<Note> Of(
-        Site site, Opening opening, OpeningModel model, IReadOnlyList<LogSchedule> schedule)
+        Site site, Opening opening, OpeningModel model, IReadOnlyList<LogSchedule> schedule, IReadOnlyList<HoldDownResult> holdDowns)
     {
         var notes = new List<Note>();
         notes.AddRange(LevelNotes.Of(site));
@@ -51,6 +51,7 @@ public static class Cautions
         }
 
         Lifting(notes, schedule);
+        Floating(notes, holdDowns);
         Walls(notes, opening, FloodLevels.Depth(site.DesignFloodLevel, Math.Min(opening.SillLevel, opening.GroundLevel ?? opening.SillLevel)));
         notes.Add(CalculationAid);
         return notes;
@@ -120,6 +121,16 @@ public static class Cautions
         {
             notes.Add(new("log-two-people", new(
                 $"A log weighs {Mass(heaviest)} without fittings, more than one person should lift ({Mass(LogHandling.OnePerson)}): plan for two.")));
+        }
+    }
+
+    private static void Floating(List<Note> notes, IReadOnlyList<HoldDownResult> holdDowns)
+    {
+        var greatest = holdDowns.Max(row => row.DesignForce);
+        if (greatest > 0)
+        {
+            notes.Add(new("logs-float", new(
+                $"Under water the stack wants to float: hold each down with {new Quantity(greatest, Dimension.Force)}, half at each end, before the water comes.")));
         }
     }
 

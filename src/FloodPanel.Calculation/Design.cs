@@ -35,6 +35,7 @@ public static class Design
             schedule[bay] = LogHandling.Schedule(bay + 1, model.Bays[bay], opening.Barrier.Logs, model.Log);
         }
 
+        var holdDowns = Array.ConvertAll(schedule, row => HoldDown.Of(row, opening.Barrier.Logs, model));
         var uncovered = Uncovered(model);
         return new()
         {
@@ -47,9 +48,10 @@ public static class Design
             Cases = cases,
             Freeboard = freeboard,
             Schedule = schedule,
+            HoldDowns = holdDowns,
             Leakage = LeakageEstimate.Of(opening.Leakage, model),
             Verdict = VerdictRules.Of(opening, model, cases, freeboard, uncovered),
-            Notes = Cautions.Of(site, opening, model, schedule),
+            Notes = Cautions.Of(site, opening, model, schedule, holdDowns),
         };
     }
 

@@ -1,5 +1,6 @@
 using FloodPanel.Calculation.Actions;
 using FloodPanel.Calculation.Cases;
+using FloodPanel.Calculation.Handling;
 using FloodPanel.Calculation.Leakage;
 using FloodPanel.Calculation.ProjectTree;
 
@@ -71,6 +72,9 @@ public sealed record OpeningResult
 
     /// <summary>Cutting length and mass of the logs, one row for each bay.</summary>
     public required IReadOnlyList<LogSchedule> Schedule { get; init; }
+
+    /// <summary>Hold-down against buoyancy, one row for each bay.</summary>
+    public required IReadOnlyList<HoldDownResult> HoldDowns { get; init; }
 
     /// <summary>Leakage, rain and pump; null where nobody asks.</summary>
     public LeakageResult? Leakage { get; init; }

@@ -80,6 +80,8 @@ internal static class Example
                 EndBearing = 0.045,
                 DeflectionLimit = 150,
                 FittingClearance = 0.012,
+                Sealed = false,
+                SealPreload = 150,
             },
             Bays = [1.6, 1.6],
             Posts = new PostSet

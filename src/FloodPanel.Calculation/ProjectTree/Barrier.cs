@@ -36,6 +36,12 @@ public sealed record LogStack
 
     /// <summary>Total end play taken off the cutting length so that the log slides into its guides [m], ≥ 0.</summary>
     public double FittingClearance { get; init; } = 0.01;
+
+    /// <summary>True when no water gets inside a hollow log: it floats more than one that fills.</summary>
+    public bool Sealed { get; init; } = true;
+
+    /// <summary>q_seal, upward push of the bottom seal per length [N/m], ≥ 0.</summary>
+    public double SealPreload { get; init; }
 }
 
 /// <summary>The posts between bays, all alike.</summary>

@@ -147,6 +147,9 @@ public static class Fields
     public static Field FittingClearance { get; } = new("fittingClearance", "Fitting clearance", Dimension.SectionLength, 0, 0.1,
         "Total end play taken off the cutting length of a log.");
 
+    /// <summary>LogStack.SealPreload.</summary>
+    public static Field SealPreload { get; } = new("sealPreload", "Bottom seal push", Dimension.LineForce, 0, 20_000, "Upward, when the seal under the lowest log is pressed together.");
+
     /// <summary>Each of Barrier.Bays.</summary>
     public static Field BayWidth { get; } = new("bays", "Clear bay", Dimension.Length, 0.05, 100, "Clear width of a bay.");
 

@@ -65,6 +65,8 @@ internal static class OpeningReader
             EndBearing = logs.Number("endBearing", blank.EndBearing),
             DeflectionLimit = logs.Number("deflectionLimit", blank.DeflectionLimit),
             FittingClearance = logs.Number("fittingClearance", blank.FittingClearance),
+            Sealed = logs.Flag("sealed", blank.Sealed),
+            SealPreload = logs.Number("sealPreload", blank.SealPreload),
         };
         logs.Close();
         return read;

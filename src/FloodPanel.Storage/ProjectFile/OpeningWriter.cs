@@ -72,6 +72,8 @@ internal static class OpeningWriter
         json.WriteNumber("endBearing", logs.EndBearing);
         json.WriteNumber("deflectionLimit", logs.DeflectionLimit);
         json.WriteNumber("fittingClearance", logs.FittingClearance);
+        json.WriteBoolean("sealed", logs.Sealed);
+        json.WriteNumber("sealPreload", logs.SealPreload);
         json.WriteEndObject();
     }
 

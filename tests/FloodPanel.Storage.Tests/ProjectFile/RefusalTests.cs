@@ -192,7 +192,7 @@ public class RefusalTests
                 && !whole.Contains(name) && name != "version",
             "[]" => place.Node is JsonArray && emptyAllowed.Contains(name),
             "{}" => place.Node is JsonObject && emptyAllowed.Contains(name),
-            "true" => name == "backFlowClosed",
+            "true" => name is "backFlowClosed" or "sealed",
             _ => (place.Node?.GetValueKind() == JsonValueKind.String && !words.Contains(name)) || libraryId.Contains(name),
         };
     }

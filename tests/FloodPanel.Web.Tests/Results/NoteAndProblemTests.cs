@@ -49,7 +49,7 @@ public class NoteAndProblemTests : BunitContext
     {
         var result = Examples.Result(Examples.Garage);
 
-        var table = Render<ScheduleTable>(p => p.Add(t => t.Schedule, result.Schedule).AddCascadingValue(new OpenFigure()));
+        var table = Render<ScheduleTable>(p => p.Add(t => t.Schedule, result.Schedule).Add(t => t.HoldDowns, result.HoldDowns).AddCascadingValue(new OpenFigure()));
 
         Assert.Equal(2, table.FindAll("tbody tr").Count);
         Assert.Equal(Units.FormatNumber(result.Schedule[1].Mass, Dimension.Mass, UnitSystem.SI), table.Find("[data-testid=mass-2]").TextContent);

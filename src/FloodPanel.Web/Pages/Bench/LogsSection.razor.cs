@@ -8,6 +8,7 @@ namespace FloodPanel.Web.Pages.Bench;
 public sealed partial class LogsSection
 {
     private static readonly LogStack Usual = new();
+    private static readonly bool[] Insides = [true, false];
 
     protected override object? Shown => Barrier.Logs;
 

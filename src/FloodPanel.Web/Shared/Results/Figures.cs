@@ -41,12 +41,14 @@ public static class Figures
     public const string Freeboard = "freeboard";
     public const string Schedule = "schedule";
     public const string Leakage = "leakage";
+    public const string HoldDown = "hold-down";
 
     /// <summary>The working behind a figure; null when the result no longer holds it.</summary>
     public static FigureWorking? Find(OpeningResult result, FigureKey key) => key.Name switch
     {
         Levels => Of(result.Levels, ""),
         Freeboard => Of(result.Freeboard, ""),
+        HoldDown => result.HoldDowns.FirstOrDefault(row => row.Bay == key.Bay) is { } held ? Of(held.Working, BayName(held.Bay)) : null,
         Leakage => result.Leakage is { } leakage ? Of(leakage.Working, "") : null,
         Schedule => result.Schedule.FirstOrDefault(row => row.Bay == key.Bay) is { } row ? Of(row.Working, BayName(row.Bay)) : null,
         _ => result.Cases.FirstOrDefault(c => c.Name == key.Case) is { } loadCase ? InCase(loadCase, key) : null,

@@ -1,4 +1,5 @@
 using FloodPanel.Calculation;
+using FloodPanel.Calculation.Handling;
 using Microsoft.AspNetCore.Components;
 
 namespace FloodPanel.Web.Shared.Results;
@@ -9,6 +10,10 @@ public sealed partial class ScheduleTable
     /// <summary>The rows.</summary>
     [Parameter, EditorRequired]
     public IReadOnlyList<LogSchedule> Schedule { get; set; } = [];
+
+    /// <summary>Hold-down of each bay, in the same order.</summary>
+    [Parameter, EditorRequired]
+    public IReadOnlyList<HoldDownResult> HoldDowns { get; set; } = [];
 
     /// <summary>The reader's units.</summary>
     [CascadingParameter]
