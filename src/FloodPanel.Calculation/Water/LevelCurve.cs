@@ -22,9 +22,13 @@ public sealed class LevelCurve
     /// <param name="levels">The table, in any order.</param>
     public static LevelCurve? Of(ValueList<LevelPoint> levels)
     {
+        if (levels.Count < 2)
+        {
+            return null;
+        }
+
         var points = levels.OrderByDescending(point => point.AnnualProbability).ToArray();
-        var usable = points.Length >= 2
-            && points.All(p => p.AnnualProbability is > 0 and < 1 && double.IsFinite(p.Level))
+        var usable = points.All(p => p.AnnualProbability is > 0 and < 1 && double.IsFinite(p.Level))
             && points.Zip(points.Skip(1)).All(pair =>
                 pair.First.AnnualProbability > pair.Second.AnnualProbability && pair.First.Level <= pair.Second.Level);
         return usable ? new(points) : null;

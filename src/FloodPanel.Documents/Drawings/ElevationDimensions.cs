@@ -18,7 +18,7 @@ internal static class ElevationDimensions
         var bays = ElevationBays.Of(input);
         if (bays.Count == 1)
         {
-            DrawOnlyBay(sketch, input, layout, y);
+            // The only bay is as wide as the opening.
             return true;
         }
 
@@ -46,14 +46,6 @@ internal static class ElevationDimensions
         }
 
         return chain.IsComplete;
-    }
-
-    private static void DrawOnlyBay(Sketch sketch, DrawingInput input, ElevationLayout layout, double y)
-    {
-        var (view, width) = (layout.Projection, input.Barrier.Bays[0]);
-        var label = new DimensionLabel(
-            FieldKeys.Bay(0), $"Bay 1, {input.LengthWithUnit(width)}", [input.Length(width)], Overflow.After);
-        sketch.Add(DimensionMarks.Horizontal(sketch.Sheet, label, view.X(0), view.X(width), y, layout.Bottom + 1.9));
     }
 
     private static void AddPost(

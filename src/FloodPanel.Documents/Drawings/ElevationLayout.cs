@@ -100,11 +100,11 @@ internal sealed record ElevationLayout
         };
     }
 
-    /// <summary>Distance of the two rows of dimensions below the ground [mm].</summary>
+    /// <summary>Distance of the rows of dimensions below the ground [mm]: bays and posts, and the clear width; one row for one bay.</summary>
     public static (double First, double Second) RowsBelow(DrawingInput input, Sheet sheet)
     {
         var first = 1.4 * sheet.TextSize + 1.6;
-        return (first, first + (input.Barrier.Bays.Count > 1 ? 2.5 : 1.7) * sheet.TextSize);
+        return (first, input.Barrier.Bays.Count > 1 ? first + 2.5 * sheet.TextSize : first);
     }
 
     private static double DimensionRows(DrawingInput input, Sheet sheet) => RowsBelow(input, sheet).Second - 1.6;
