@@ -94,7 +94,7 @@ public static class Validation
                 continue;
             }
 
-            if (earlier.AnnualProbability == level.AnnualProbability)
+            if (LevelCurve.IsSame(earlier.AnnualProbability, level.AnnualProbability))
             {
                 problems.Add($"{path}.annualProbability", $"Probability of level {index + 1} is {Chance(level.AnnualProbability):typed}, as of level {i + 1}; each probability takes one level.");
             }

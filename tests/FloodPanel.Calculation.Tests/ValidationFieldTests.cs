@@ -25,6 +25,8 @@ public class ValidationFieldTests
         ("site.designStillWaterLevel", Fields.DesignStillWaterLevel, v => Refused.With((Site s) => s with { DesignStillWaterLevel = v })),
         ("site.surge", Fields.Surge, v => Refused.With((Site s) => s with { Surge = v })),
         ("site.climateAllowance", Fields.ClimateAllowance, v => Refused.With((Site s) => s with { ClimateAllowance = v })),
+        ("site.climateRatePerYear", Fields.ClimateRate, v => Refused.With((Site s) => s with { ClimateRatePerYear = v })),
+        ("site.designLifeYears", Fields.DesignLife, v => Refused.With((Site s) => s with { DesignLifeYears = v })),
         ("site.freeboard", Fields.Freeboard, v => Refused.With((Site s) => s with { Freeboard = v })),
         ("site.levels[0].annualProbability", Fields.LevelProbability, v => Refused.With((Site s) => s with { Levels = [new(v, 1)] })),
         ("site.levels[0].level", Fields.LevelValue, v => Refused.With((Site s) => s with { Levels = [new(0.1, v)] })),

@@ -24,12 +24,12 @@ public static class FloodLevels
 
     /// <summary>Working of the design flood level of a site.</summary>
     /// <param name="site">The site.</param>
-    public static Working DesignLevel(Site site) => new("Design flood level", Source, [.. Level(site)]);
+    public static Working DesignLevel(Site site) => new("Design flood level", SourceOf(site), [.. Level(site)]);
 
     /// <summary>Working of the levels at an opening.</summary>
     /// <param name="site">The site.</param>
     /// <param name="opening">The opening.</param>
-    public static Working At(Site site, Opening opening) => new("Retained depth", Source,
+    public static Working At(Site site, Opening opening) => new("Retained depth", SourceOf(site),
     [
         .. Level(site),
         new("z_sill", "", opening.SillLevel, Dimension.Length),
@@ -60,9 +60,15 @@ public static class FloodLevels
         ]);
     }
 
+    private static string SourceOf(Site site) => Table(site) is null ? Source : $"{Source}; {LevelCurve.Source}";
+
+    /// <summary>The table that the level comes from; a level from elsewhere owes it nothing, and a note tells where the two differ.</summary>
+    private static LevelCurve? Table(Site site) =>
+        LevelCurve.Of(site.Levels) is { } curve && curve.Gives(site.AnnualProbability, site.DesignStillWaterLevel) ? curve : null;
+
     private static List<CalculationStep> Level(Site site)
     {
-        var steps = new List<CalculationStep>(LevelCurve.Of(site.Levels)?.Steps(site.AnnualProbability) ?? [])
+        var steps = new List<CalculationStep>(Table(site)?.Steps(site.AnnualProbability) ?? [])
         {
             new("z_swl", "", site.DesignStillWaterLevel, Dimension.Length),
             new("s", "", site.Surge, Dimension.Length),

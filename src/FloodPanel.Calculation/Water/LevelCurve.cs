@@ -11,7 +11,13 @@ namespace FloodPanel.Calculation.Water;
 public sealed class LevelCurve
 {
     /// <summary>Source of the interpolation, as printed.</summary>
-    public const string Source = "Interpolation on the Gumbel reduced variate between known levels";
+    public const string Source = "interpolation on the Gumbel reduced variate between known levels";
+
+    /// <summary>A design level within this of the table's counts as taken from it [m], 1 cm: levels are quoted to that.</summary>
+    private const double Taken = 0.01;
+
+    /// <summary>Chances that differ by no more, relatively, are the same chance: 0.7 % is 0.007 but for rounding.</summary>
+    private const double SameChance = 1e-9;
 
     private LevelCurve(LevelPoint[] points) => Points = points.ToValueList();
 
@@ -30,7 +36,7 @@ public sealed class LevelCurve
         var points = levels.OrderByDescending(point => point.AnnualProbability).ToArray();
         var usable = points.All(p => p.AnnualProbability is > 0 and < 1 && double.IsFinite(p.Level))
             && points.Zip(points.Skip(1)).All(pair =>
-                pair.First.AnnualProbability > pair.Second.AnnualProbability && pair.First.Level <= pair.Second.Level);
+                !IsSame(pair.First.AnnualProbability, pair.Second.AnnualProbability) && pair.First.Level <= pair.Second.Level);
         return usable ? new(points) : null;
     }
 
@@ -58,7 +64,17 @@ public sealed class LevelCurve
         return pair.Frequent.Level + (pair.Rare.Level - pair.Frequent.Level) * (Variate(probability) - from) / (to - from);
     }
 
-    /// <summary>How a level of the table came about; null outside it.</summary>
+    /// <summary>True where the table gives this level at this probability, to the centimetre.</summary>
+    /// <param name="probability">p, annual exceedance probability [-].</param>
+    /// <param name="level">Level [m].</param>
+    public bool Gives(double probability, double level) => At(probability) is { } own && Math.Abs(own - level) <= Taken;
+
+    /// <summary>True for one and the same chance, but for the rounding of per cent and fractions.</summary>
+    /// <param name="one">A probability [-].</param>
+    /// <param name="other">Another [-].</param>
+    internal static bool IsSame(double one, double other) => Math.Abs(one - other) <= SameChance * Math.Max(one, other);
+
+    /// <summary>How a level of the table came about; empty outside it.</summary>
     /// <param name="probability">p, annual exceedance probability [-].</param>
     internal IEnumerable<CalculationStep> Steps(double probability)
     {
@@ -86,9 +102,10 @@ public sealed class LevelCurve
     {
         for (var i = 1; i < Points.Count; i++)
         {
-            if (probability <= Points[i - 1].AnnualProbability && probability >= Points[i].AnnualProbability)
+            var (frequent, rare) = (Points[i - 1], Points[i]);
+            if (probability <= frequent.AnnualProbability * (1 + SameChance) && probability >= rare.AnnualProbability * (1 - SameChance))
             {
-                return (Points[i - 1], Points[i]);
+                return (frequent, rare);
             }
         }
 

@@ -5,9 +5,6 @@ namespace FloodPanel.Calculation.Water;
 /// <summary>Where the design level and the table of levels do not go together.</summary>
 internal static class LevelNotes
 {
-    /// <summary>A design level within this of the table's is taken from it [m], 1 cm.</summary>
-    private const double Same = 0.01;
-
     public static IEnumerable<Note> Of(Site site)
     {
         if (LevelCurve.Of(site.Levels) is not { } curve)
@@ -20,7 +17,7 @@ internal static class LevelNotes
             yield return new("level-outside-table", new(
                 $"The design probability, {Chance(site.AnnualProbability)}, lies outside the table of levels, {Chance(curve.Points[^1].AnnualProbability)} to {Chance(curve.Points[0].AnnualProbability)}: nothing is extrapolated, and the typed level stands."));
         }
-        else if (Math.Abs(level - site.DesignStillWaterLevel) > Same)
+        else if (!curve.Gives(site.AnnualProbability, site.DesignStillWaterLevel))
         {
             yield return new("level-differs-from-table", new(
                 $"The design still-water level, {Length(site.DesignStillWaterLevel)}, is not that of the table of levels at this probability, {Length(level)}. The typed level stands."));

@@ -18,6 +18,8 @@ internal sealed class Retyped(UnitSystem system)
         DesignStillWaterLevel = Read(site.DesignStillWaterLevel, Fields.DesignStillWaterLevel),
         Surge = Read(site.Surge, Fields.Surge),
         ClimateAllowance = Read(site.ClimateAllowance, Fields.ClimateAllowance),
+        ClimateRatePerYear = Read(site.ClimateRatePerYear, Fields.ClimateRate),
+        DesignLifeYears = Read(site.DesignLifeYears, Fields.DesignLife),
         Freeboard = Read(site.Freeboard, Fields.Freeboard),
     };
 

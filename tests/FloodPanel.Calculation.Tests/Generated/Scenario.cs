@@ -22,5 +22,5 @@ public sealed record Scenario(Project Project)
 
     /// <summary>The same with the still-water level so that water stands this deep above the sill.</summary>
     internal Scenario WithDepth(double depth) =>
-        With((Site site) => site with { DesignStillWaterLevel = Opening.SillLevel + depth - site.Surge - site.ClimateAllowance });
+        With((Site site) => site with { DesignStillWaterLevel = Opening.SillLevel + depth - site.Surge - site.TotalClimateAllowance });
 }

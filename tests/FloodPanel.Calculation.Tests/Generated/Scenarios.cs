@@ -17,12 +17,13 @@ public static class Scenarios
         from isWetBehind in Gen.Elements(false, true)
         from basis in Gen.Elements(Enum.GetValues<DesignBasisKind>())
         let level = opening.SillLevel + depth
+        let still = level - site.Surge - site.TotalClimateAllowance
         let protectedLevel = Math.Round(level - behind * (0.2 + Math.Max(0, depth)), 4)
         select new Scenario(new Project
         {
             Name = "Generated",
             DesignBasis = basis,
-            Site = site with { DesignStillWaterLevel = level - site.Surge - site.ClimateAllowance },
+            Site = site with { DesignStillWaterLevel = still, Levels = [new(0.01, still), new(0.1, still - 0.3)] },
             Openings = [opening with { ProtectedSideLevel = isWetBehind ? Math.Min(level, protectedLevel) : null }],
         });
 
@@ -30,6 +31,8 @@ public static class Scenarios
         from density in Numbers.From(990, 1400, 5)
         from surge in Numbers.From(0, 0.5, 0.05)
         from climate in Numbers.From(0, 0.3, 0.05)
+        from rate in Numbers.From(0, 0.01, 0.001)
+        from life in Numbers.From(1, 100, 1)
         from freeboard in Numbers.From(0, 0.5, 0.05)
         from zone in Gen.Elements(Enum.GetValues<FloodZone>())
         select new Site
@@ -37,6 +40,8 @@ public static class Scenarios
             WaterDensity = density,
             Surge = surge,
             ClimateAllowance = climate,
+            ClimateRatePerYear = rate,
+            DesignLifeYears = life,
             Freeboard = freeboard,
             FloodZone = zone,
         };

@@ -53,6 +53,7 @@ public class ExceedanceRiskTests
     public void Levels_ThatCannotBe_AreRefusedAtTheirRow()
     {
         Assert.Equal(["site.levels[1].annualProbability"], Paths(new(0.01, 10), new(0.01, 10.2)));
+        Assert.Equal(["site.levels[1].annualProbability"], Paths(new(0.007, 10), new(0.7 * 0.01, 10.2)));
         Assert.Equal(["site.levels[1].level"], Paths(new(0.01, 10), new(0.1, 10.2)));
         Assert.Equal(["site.levels[1].level"], Paths(new(0.1, 10), new(0.01, 9.9)));
         Assert.Equal(["site.levels[0].annualProbability"], Paths(new(2, 10), new(0.01, 9.9)));

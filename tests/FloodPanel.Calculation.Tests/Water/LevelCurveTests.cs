@@ -65,12 +65,33 @@ public class LevelCurveTests
     [Fact]
     public void DesignLevel_WithTable_ShowsTheInterpolation()
     {
-        var site = SampleProject.Project.Site with { Levels = Table, AnnualProbability = 0.02 };
+        var site = SampleProject.Project.Site with { Levels = Table, AnnualProbability = 0.02, DesignStillWaterLevel = 10.71 };
 
         var steps = FloodLevels.DesignLevel(site).Steps;
 
         Assert.Equal(10.71035, steps.Single(s => s.Symbol == "z_p").Value, tolerance: 0.00001);
         Assert.Empty(Steps.StepAudit.Complaints("levels", steps));
+        Assert.Contains("Gumbel", FloodLevels.DesignLevel(site).Source, StringComparison.Ordinal);
+    }
+
+    [Theory]
+    [InlineData(0.02, 10.73)]
+    [InlineData(0.2, 10.71)]
+    public void DesignLevel_NotThatOfTheTable_ShowsNoInterpolation(double probability, double level)
+    {
+        var site = SampleProject.Project.Site with { Levels = Table, AnnualProbability = probability, DesignStillWaterLevel = level };
+
+        Assert.Equal(["z_swl", "s", "c", "z_dfl"], FloodLevels.DesignLevel(site).Steps.Select(s => s.Symbol));
+    }
+
+    /// <summary>0.7 · 0.01 is one bit below 0.007: typed as 0.7 % the chance is still that of the table.</summary>
+    [Fact]
+    public void At_ChanceTypedInPerCent_IsTheKnownLevel()
+    {
+        var curve = LevelCurve.Of([new(0.1, 10.38), new(0.007, 10.9)])!;
+
+        Assert.Equal(10.9, curve.At(0.7 * 0.01)!.Value, tolerance: 1e-7);
+        Assert.Null(LevelCurve.Of([new(0.007, 10.38), new(0.7 * 0.01, 10.9)]));
     }
 
     [Theory]
