@@ -98,11 +98,11 @@ public sealed class CaseEvaluation
             for (var index = 0; index < responses.Length; index++)
             {
                 responses[index] = LogResponse.Of(
-                    logLoads[index], span, model.Log, CaseForces.OnLog(model, kind, bay, index), judgesDeflection);
+                    logLoads[index], span, model.LogMember(index), CaseForces.OnLog(model, kind, bay, index), judgesDeflection);
             }
         }
     }
 
     private GuideResponse Guide(OpeningModel model, CaseKind kind, int bay) => GuideReaction.Of(
-        logLoads, model.GuideTributary(bay), model.Log.Section.Height, CaseForces.OnGuide(model, kind, bay));
+        logLoads, model.GuideTributary(bay), model.LogHeights, CaseForces.OnGuide(model, kind, bay));
 }

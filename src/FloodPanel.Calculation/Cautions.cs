@@ -37,7 +37,7 @@ public static class Cautions
             notes.AddRange(DebrisNotes.Of(debris));
         }
 
-        Strengths(notes, NeededChecks.Logs, model.Log);
+        Strengths(notes, NeededChecks.Logs, model.Runs.Select(run => run.Log).FirstOrDefault(log => !log.IsComplete) ?? model.Runs[0].Log);
         if (model.Post is { } post)
         {
             Strengths(notes, NeededChecks.Posts, post);

@@ -2,6 +2,7 @@ using FloodPanel.Calculation.Actions;
 using FloodPanel.Calculation.Cases;
 using FloodPanel.Calculation.Handling;
 using FloodPanel.Calculation.Leakage;
+using FloodPanel.Calculation.Parts;
 using FloodPanel.Calculation.ProjectTree;
 using FloodPanel.Calculation.Water;
 
@@ -29,13 +30,9 @@ public static class Design
         var model = new OpeningModel(site, opening, library.BasisOf(project), library);
         var cases = Cases(model);
         var freeboard = FloodLevels.Freeboard(model.RetainedDepth, site.Freeboard, model.Height);
-        var schedule = new LogSchedule[model.Bays.Count];
-        for (var bay = 0; bay < schedule.Length; bay++)
-        {
-            schedule[bay] = LogHandling.Schedule(bay + 1, model.Bays[bay], opening.Barrier.Logs, model.Log);
-        }
-
-        var holdDowns = Array.ConvertAll(schedule, row => HoldDown.Of(row, opening.Barrier.Logs, model));
+        var schedule = Schedule(opening.Barrier.Logs, model);
+        HoldDownResult[] holdDowns = [.. schedule.DistinctBy(row => row.Bay).Select(row => HoldDown.Of(row, opening.Barrier.Logs, model))];
+        PartGap[] gaps = [.. PartRegistry.Gaps(model)];
         var uncovered = Uncovered(model);
         return new()
         {
@@ -50,8 +47,9 @@ public static class Design
             Schedule = schedule,
             HoldDowns = holdDowns,
             Leakage = LeakageEstimate.Of(opening.Leakage, model),
-            Verdict = VerdictRules.Of(opening, model, cases, freeboard, uncovered),
+            Verdict = VerdictRules.Of(opening, model, cases, freeboard, uncovered, gaps),
             Notes = Cautions.Of(site, opening, model, schedule, holdDowns),
+            Gaps = [.. gaps.Where(gap => !VerdictRules.IsByOthers(opening, gap.Check))],
         };
     }
 
@@ -62,6 +60,11 @@ public static class Design
             throw new ArgumentException($"has problems, the first at {problems[0].Path}: {problems[0].Message}", parameter);
         }
     }
+
+    private static LogSchedule[] Schedule(LogStack logs, OpeningModel model) =>
+    [
+        .. model.Bays.SelectMany((clear, bay) => model.Runs.Select(run => LogHandling.Schedule(bay + 1, clear, logs, run))),
+    ];
 
     private static CaseResult[] Cases(OpeningModel model)
     {

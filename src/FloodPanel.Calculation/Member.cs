@@ -6,12 +6,13 @@ namespace FloodPanel.Calculation;
 
 /// <summary>A log or post resolved to numbers: section, material and the stresses it may carry.</summary>
 /// <param name="Material">The material.</param>
+/// <param name="Profile">The cross-section as entered.</param>
 /// <param name="Section">Properties of the cross-section.</param>
 /// <param name="Bending">Design bending stress; null when its inputs are missing or not covered.</param>
 /// <param name="Shear">Design shear stress; null when its inputs are missing or not covered.</param>
 /// <param name="DeflectionLimit">n in the limit length / n [-].</param>
 public sealed record Member(
-    Material Material, SectionProperties Section, DesignStress? Bending, DesignStress? Shear, double DeflectionLimit)
+    Material Material, Profile Profile, SectionProperties Section, DesignStress? Bending, DesignStress? Shear, double DeflectionLimit)
 {
     /// <summary>E·I, bending stiffness [N·m²].</summary>
     public double Stiffness => Material.ElasticModulus * Section.Inertia;
@@ -40,6 +41,7 @@ public sealed record Member(
             ?? throw new ArgumentException("the library does not hold the profile", nameof(profile));
         return new(
             found,
+            shape,
             SectionProperties.Of(shape),
             DesignStress.Bending(found, basis),
             DesignStress.Shear(found, basis),

@@ -10,6 +10,10 @@ namespace FloodPanel.Calculation;
 /// <summary>An opening resolved to the numbers that a load case needs. Base SI; heights from the sill.</summary>
 public sealed class OpeningModel
 {
+    private readonly Member[] logs;
+    private readonly double[] slopes;
+    private readonly double[] logHeights;
+
     /// <summary>Resolves an opening.</summary>
     /// <param name="site">Levels and water.</param>
     /// <param name="opening">An opening without problems, see <see cref="Validation"/>.</param>
@@ -17,7 +21,8 @@ public sealed class OpeningModel
     /// <param name="library">The materials and profiles it may name.</param>
     public OpeningModel(Site site, Opening opening, DesignBasis basis, Library library)
     {
-        var (logs, posts) = (opening.Barrier.Logs, opening.Barrier.Posts);
+        var (stack, posts) = (opening.Barrier.Logs, opening.Barrier.Posts);
+        (Site, Opening, Basis) = (site, opening, basis);
         Factors = basis.For(site.FloodZone);
         UnitWeight = Hydrostatic.UnitWeight(site.WaterDensity);
         RetainedDepth = FloodLevels.Depth(site.DesignFloodLevel, opening.SillLevel);
@@ -31,9 +36,11 @@ public sealed class OpeningModel
         Line = opening.Actions.Line;
         Rake = double.DegreesToRadians(opening.RakeDegrees);
         CosRake = Math.Cos(Rake);
-        Log = Member.Of(logs.Material, logs.Profile, logs.DeflectionLimit, basis, library);
-        LogCount = logs.Count;
-        EndBearing = logs.EndBearing;
+        Runs = LogRun.Of(stack, basis, library);
+        logs = [.. Runs.SelectMany(run => Enumerable.Repeat(run.Log, run.Count))];
+        logHeights = [.. logs.Select(log => log.Section.Height)];
+        slopes = Slopes(Runs);
+        EndBearing = stack.EndBearing;
         Bays = opening.Barrier.Bays;
         if (posts is not null && Bays.Count > 1)
         {
@@ -44,9 +51,18 @@ public sealed class OpeningModel
         var groundDepth = FloodLevels.Depth(site.DesignFloodLevel, opening.GroundLevel ?? opening.SillLevel);
         Wave = WaveModel.Of(opening.Actions.Wave, UnitWeight, RetainedDepth, groundDepth, Height);
         Debris = DebrisModel.Of(
-            opening.Actions.Debris, Log, UnitWeight, RetainedDepth, Height, [.. Bays.Select(bay => bay + EndBearing)]);
+            opening.Actions.Debris, [.. Runs.Select(run => run.Log)], UnitWeight, RetainedDepth, Height, [.. Bays.Select(bay => bay + EndBearing)]);
         Cases = CaseDiagram.CasesOf(this);
     }
+
+    /// <summary>Levels and water.</summary>
+    public Site Site { get; }
+
+    /// <summary>The opening as entered.</summary>
+    public Opening Opening { get; }
+
+    /// <summary>The design basis.</summary>
+    public DesignBasis Basis { get; }
 
     /// <summary>The load cases of the opening, in the order in which they are shown.</summary>
     public ValueList<CaseKind> Cases { get; }
@@ -87,11 +103,18 @@ public sealed class OpeningModel
     /// <summary>cos θ [-].</summary>
     public double CosRake { get; }
 
-    /// <summary>The logs.</summary>
-    public Member Log { get; }
+    /// <summary>The groups of equal logs, the lowest first.</summary>
+    public IReadOnlyList<LogRun> Runs { get; }
 
     /// <summary>Number of logs in a stack [-].</summary>
-    public int LogCount { get; }
+    public int LogCount => logs.Length;
+
+    /// <summary>Height of each log along the face, the lowest first [m].</summary>
+    public ReadOnlySpan<double> LogHeights => logHeights;
+
+    /// <summary>A log of the stack.</summary>
+    /// <param name="index">Position in the stack from 0.</param>
+    public Member LogMember(int index) => logs[index];
 
     /// <summary>e, length of log that bears at each end [m].</summary>
     public double EndBearing { get; }
@@ -109,14 +132,14 @@ public sealed class OpeningModel
     public int PostCount => Bays.Count - 1;
 
     /// <summary>Length of the barrier along its face [m].</summary>
-    public double FaceLength => LogCount * Log.Section.Height;
+    public double FaceLength => slopes[LogCount];
 
     /// <summary>H, vertical height of the barrier [m].</summary>
     public double Height => FaceLength * CosRake;
 
     /// <summary>Height z of the lower edge of a log [m].</summary>
     /// <param name="index">Position in the stack from 0; the count of logs gives the top of the barrier.</param>
-    public double EdgeHeight(int index) => index * Log.Section.Height * CosRake;
+    public double EdgeHeight(int index) => slopes[index] * CosRake;
 
     /// <summary>The log that stands at a height, from 0: bottom ≤ z below its top; the top log at the top of the barrier.</summary>
     /// <param name="z">Height above the sill [m], 0 to <see cref="Height"/>.</param>
@@ -142,4 +165,22 @@ public sealed class OpeningModel
     /// <summary>Width of face that loads a guide: half of the clear bay and the end bearing [m].</summary>
     /// <param name="bay">Bay from 0, the first or the last.</param>
     public double GuideTributary(int bay) => Bays[bay] / 2 + EndBearing;
+
+    /// <summary>Distance of each joint from the sill along the face; multiplied where logs are equal, so that no rounding adds up.</summary>
+    private static double[] Slopes(IReadOnlyList<LogRun> runs)
+    {
+        var slopes = new double[1 + runs.Sum(run => run.Count)];
+        var (next, from) = (0, 0.0);
+        foreach (var (_, count, log) in runs)
+        {
+            for (var i = 1; i <= count; i++)
+            {
+                slopes[next + i] = from + i * log.Section.Height;
+            }
+
+            (next, from) = (next + count, slopes[next + count]);
+        }
+
+        return slopes;
+    }
 }

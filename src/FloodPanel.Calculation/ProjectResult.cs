@@ -2,6 +2,7 @@ using FloodPanel.Calculation.Actions;
 using FloodPanel.Calculation.Cases;
 using FloodPanel.Calculation.Handling;
 using FloodPanel.Calculation.Leakage;
+using FloodPanel.Calculation.Parts;
 using FloodPanel.Calculation.ProjectTree;
 
 namespace FloodPanel.Calculation;
@@ -70,7 +71,7 @@ public sealed record OpeningResult
     /// <summary>Barrier height against the required height.</summary>
     public required Check Freeboard { get; init; }
 
-    /// <summary>Cutting length and mass of the logs, one row for each bay.</summary>
+    /// <summary>Cutting length and mass of the logs, one row for each kind of log in each bay.</summary>
     public required IReadOnlyList<LogSchedule> Schedule { get; init; }
 
     /// <summary>Hold-down against buoyancy, one row for each bay.</summary>
@@ -81,6 +82,9 @@ public sealed record OpeningResult
 
     /// <summary>The verdict.</summary>
     public required Verdict Verdict { get; init; }
+
+    /// <summary>What to enter before the verdict can be complete, and what no method covers; nothing for parts designed by others.</summary>
+    public IReadOnlyList<PartGap> Gaps { get; init; } = [];
 
     /// <summary>Cautions and results not covered.</summary>
     public required IReadOnlyList<Note> Notes { get; init; }
@@ -118,6 +122,9 @@ public sealed record CaseResult
 
     /// <summary>The guides, left and right.</summary>
     public required IReadOnlyList<GuideResult> Guides { get; init; }
+
+    /// <summary>Base plates, anchors, guides, walls and footings, as far as they have inputs.</summary>
+    public IReadOnlyList<PartResult> Parts { get; init; } = [];
 }
 
 /// <summary>One action in a case.</summary>
@@ -190,8 +197,11 @@ public sealed record LogResult
     /// <summary>How the deflection came about; null where the deflection check tells it.</summary>
     public Working? DeflectionWorking { get; init; }
 
+    /// <summary>Further checks: what the section, its seat and its joints must stand.</summary>
+    public IReadOnlyList<Check> Others { get; init; } = [];
+
     /// <summary>The checks that have a result.</summary>
-    public IEnumerable<Check> Checks => new[] { BendingCheck, ShearCheck, DeflectionCheck }.OfType<Check>();
+    public IEnumerable<Check> Checks => new[] { BendingCheck, ShearCheck, DeflectionCheck }.OfType<Check>().Concat(Others);
 }
 
 /// <summary>One post under one case. A check is null where its inputs are missing.</summary>
@@ -227,8 +237,11 @@ public sealed record PostResult
     /// <summary>How the deflection came about; null where the deflection check tells it.</summary>
     public Working? DeflectionWorking { get; init; }
 
+    /// <summary>Further checks: interaction, stability, welded base.</summary>
+    public IReadOnlyList<Check> Others { get; init; } = [];
+
     /// <summary>The checks that have a result.</summary>
-    public IEnumerable<Check> Checks => new[] { BendingCheck, ShearCheck, DeflectionCheck }.OfType<Check>();
+    public IEnumerable<Check> Checks => new[] { BendingCheck, ShearCheck, DeflectionCheck }.OfType<Check>().Concat(Others);
 }
 
 /// <summary>One guide under one case.</summary>
@@ -238,10 +251,11 @@ public sealed record PostResult
 /// <param name="Working">How they came about.</param>
 public sealed record GuideResult(string Side, double Reaction, double PeakLineReaction, Working Working);
 
-/// <summary>Cutting length and mass of the logs of one bay.</summary>
+/// <summary>Cutting length and mass of equal logs of one bay.</summary>
 /// <param name="Bay">Bay from the left, from 1.</param>
+/// <param name="FirstLog">Position of the lowest of them in the stack, 1 = lowest of all.</param>
 /// <param name="Count">Number of logs [-].</param>
 /// <param name="CuttingLength">Length to cut [m].</param>
 /// <param name="Mass">Mass of one log, profile only [kg].</param>
 /// <param name="Working">How they came about.</param>
-public sealed record LogSchedule(int Bay, int Count, double CuttingLength, double Mass, Working Working);
+public sealed record LogSchedule(int Bay, int FirstLog, int Count, double CuttingLength, double Mass, Working Working);

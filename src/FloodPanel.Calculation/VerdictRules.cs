@@ -1,3 +1,4 @@
+using FloodPanel.Calculation.Parts;
 using FloodPanel.Calculation.ProjectTree;
 
 namespace FloodPanel.Calculation;
@@ -10,10 +11,15 @@ namespace FloodPanel.Calculation;
 internal static class VerdictRules
 {
     public static Verdict Of(
-        Opening opening, OpeningModel model, IReadOnlyList<CaseResult> cases, Check freeboard, IReadOnlyList<string> uncovered)
+        Opening opening,
+        OpeningModel model,
+        IReadOnlyList<CaseResult> cases,
+        Check freeboard,
+        IReadOnlyList<string> uncovered,
+        IReadOnlyList<PartGap> gaps)
     {
         var governing = Governing(cases, freeboard);
-        var missing = Missing(opening, model, uncovered);
+        var missing = Missing(opening, model, uncovered, gaps);
         var fails = !freeboard.Passes || Checks(cases).Any(c => !c.Check.Passes);
         var kind = fails ? VerdictKind.Inadequate
             : missing.Count > 0 ? VerdictKind.Incomplete
@@ -28,18 +34,19 @@ internal static class VerdictRules
     public static bool IsNamed(DesignedByOthers declaration) =>
         !string.IsNullOrWhiteSpace(declaration.Name) && !string.IsNullOrWhiteSpace(declaration.Reference);
 
-    private static List<string> Missing(Opening opening, OpeningModel model, IReadOnlyList<string> uncovered)
+    private static List<string> Missing(
+        Opening opening, OpeningModel model, IReadOnlyList<string> uncovered, IReadOnlyList<PartGap> gaps)
     {
         var missing = new List<string>();
         foreach (var check in NeededChecks.MayBeByOthers)
         {
-            var hasResult = check switch
+            var hasStresses = check switch
             {
-                NeededChecks.Logs => model.Log.IsComplete,
+                NeededChecks.Logs => model.Runs.All(run => run.Log.IsComplete),
                 NeededChecks.Posts => model.Post is null || model.Post.IsComplete,
-                NeededChecks.BasePlates => model.Post is null,
-                _ => false,
+                _ => true,
             };
+            var hasResult = hasStresses && gaps.All(gap => gap.Check != check);
             if (!hasResult && !IsByOthers(opening, check))
             {
                 missing.Add(check);
@@ -53,30 +60,31 @@ internal static class VerdictRules
     private static Governing? Governing(IReadOnlyList<CaseResult> cases, Check freeboard)
     {
         Governing? worst = freeboard.Passes ? null : new(freeboard.Name, null, freeboard.Utilisation, "");
-        foreach (var (check, caseName, member, number, bay) in Checks(cases))
+        foreach (var (check, caseName, member) in Checks(cases))
         {
             if (worst is null || check.Utilisation > worst.Utilisation)
             {
-                worst = new(check.Name, caseName, check.Utilisation, Member(member, number, bay, cases));
+                worst = new(check.Name, caseName, check.Utilisation, member);
             }
         }
 
         return worst;
     }
 
-    private static string Member(string member, int number, int bay, IReadOnlyList<CaseResult> cases) =>
-        bay > 0 && cases[0].Posts.Count > 0 ? $"{member} {number} in bay {bay}" : $"{member} {number}";
+    private static string Name(LogResult log, bool hasPosts) => hasPosts
+        ? FormattableString.Invariant($"log {log.Index} in bay {log.Bay}")
+        : FormattableString.Invariant($"log {log.Index}");
 
-    private static IEnumerable<(Check Check, string Case, string Member, int Number, int Bay)> Checks(
-        IReadOnlyList<CaseResult> cases)
+    private static IEnumerable<(Check Check, string Case, string Member)> Checks(IReadOnlyList<CaseResult> cases)
     {
+        var hasPosts = cases[0].Posts.Count > 0;
         foreach (var result in cases)
         {
             foreach (var log in result.Logs)
             {
                 foreach (var check in log.Checks)
                 {
-                    yield return (check, result.Name, "log", log.Index, log.Bay);
+                    yield return (check, result.Name, Name(log, hasPosts));
                 }
             }
 
@@ -84,7 +92,15 @@ internal static class VerdictRules
             {
                 foreach (var check in post.Checks)
                 {
-                    yield return (check, result.Name, "post", post.Index, 0);
+                    yield return (check, result.Name, FormattableString.Invariant($"post {post.Index}"));
+                }
+            }
+
+            foreach (var part in result.Parts)
+            {
+                foreach (var check in part.Checks)
+                {
+                    yield return (check, result.Name, part.Member);
                 }
             }
         }

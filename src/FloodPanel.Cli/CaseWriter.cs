@@ -1,6 +1,7 @@
 using System.Text.Json;
 using FloodPanel.Calculation;
 using FloodPanel.Calculation.Actions;
+using FloodPanel.Calculation.Parts;
 
 namespace FloodPanel.Cli;
 
@@ -31,6 +32,7 @@ internal static class CaseWriter
 
         json.WriteEndArray();
         WriteMembers(json, result);
+        WriteParts(json, result.Parts);
         json.WriteEndObject();
     }
 
@@ -52,6 +54,7 @@ internal static class CaseWriter
             json.WriteFigure("baseMoment", post.BaseMoment);
             json.WriteFigure("tipDeflection", post.TipDeflection);
             WriteUtilisations(json, post.BendingCheck, post.ShearCheck, post.DeflectionCheck);
+            WriteOthers(json, post.Others);
             json.WriteEndObject();
         }
 
@@ -63,6 +66,44 @@ internal static class CaseWriter
             json.WriteString("side", guide.Side);
             json.WriteFigure("reaction", guide.Reaction);
             json.WriteFigure("peakLineReaction", guide.PeakLineReaction);
+            json.WriteEndObject();
+        }
+
+        json.WriteEndArray();
+    }
+
+    // Left out where no part has inputs.
+    private static void WriteParts(Utf8JsonWriter json, IReadOnlyList<PartResult> parts)
+    {
+        if (parts.Count == 0)
+        {
+            return;
+        }
+
+        json.WriteStartArray("parts");
+        foreach (var part in parts)
+        {
+            json.WriteStartObject();
+            json.WriteString("check", part.Check);
+            json.WriteString("member", part.Member);
+            WriteChecks(json, part.Checks);
+            json.WriteEndObject();
+        }
+
+        json.WriteEndArray();
+    }
+
+    private static void WriteChecks(Utf8JsonWriter json, IReadOnlyList<Check> checks)
+    {
+        json.WriteStartArray("checks");
+        foreach (var check in checks)
+        {
+            json.WriteStartObject();
+            json.WriteString("name", check.Name);
+            json.WriteString("source", check.Source);
+            json.WriteFigure("demand", check.Demand);
+            json.WriteFigure("capacity", check.Capacity);
+            json.WriteFigure("utilisation", check.Utilisation);
             json.WriteEndObject();
         }
 
@@ -81,7 +122,16 @@ internal static class CaseWriter
         json.WriteFigure("shear", log.Shear);
         json.WriteFigure("deflection", log.Deflection);
         WriteUtilisations(json, log.BendingCheck, log.ShearCheck, log.DeflectionCheck);
+        WriteOthers(json, log.Others);
         json.WriteEndObject();
+    }
+
+    private static void WriteOthers(Utf8JsonWriter json, IReadOnlyList<Check> others)
+    {
+        if (others.Count > 0)
+        {
+            WriteChecks(json, others);
+        }
     }
 
     // A check without inputs has no utilisation.

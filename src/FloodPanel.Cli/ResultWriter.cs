@@ -62,7 +62,7 @@ internal static class ResultWriter
 
         json.WriteEndArray();
         WriteLeakage(json, opening.Leakage);
-        WriteNotes(json, opening.Notes);
+        WriteNotes(json, [.. opening.Gaps.Select(gap => gap.Note), .. opening.Notes]);
         json.WriteEndObject();
     }
 

@@ -19,9 +19,9 @@ internal sealed class HandInlined
         var flow = model.Flow!;
         (gamma, depth, behind, height) = (model.UnitWeight, model.RetainedDepth, model.ProtectedDepth, model.Height);
         surcharge = gamma * flow.ShapeCoefficient * flow.Velocity * flow.Velocity / (2 * Physics.Gravity);
-        (logHeight, bearing, count, bays) = (model.Log.Section.Height, model.EndBearing, model.LogCount, [.. model.Bays]);
+        (logHeight, bearing, count, bays) = (model.LogMember(0).Section.Height, model.EndBearing, model.LogCount, [.. model.Bays]);
         (logStiffness, logMoment, logShear, logLimit) =
-            (model.Log.Stiffness, model.Log.MomentResistance, model.Log.ShearResistance, model.Log.DeflectionLimit);
+            (model.LogMember(0).Stiffness, model.LogMember(0).MomentResistance, model.LogMember(0).ShearResistance, model.LogMember(0).DeflectionLimit);
         (postStiffness, postMoment, postShear, postLimit, postWidth) =
             (model.Post!.Stiffness, model.Post.MomentResistance, model.Post.ShearResistance, model.Post.DeflectionLimit, model.PostWidth);
         Logs = new Log[count * bays.Length];

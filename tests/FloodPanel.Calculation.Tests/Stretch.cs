@@ -14,6 +14,7 @@ internal static class Stretch
     /// <summary>A member of stiffness E·I and nothing else known.</summary>
     public static Member Beam(double elasticModulus, double inertia, double deflectionLimit = 100) => new(
         new Material { Density = 7850, ElasticModulus = elasticModulus },
+        new Rectangle { Height = 0.1, Depth = 0.1 },
         new SectionProperties(0.1, 0.1, 0.002, inertia, 2 * inertia / 0.1, 2.3 * inertia / 0.1, 0.001),
         null,
         null,

@@ -1,4 +1,5 @@
 using FloodPanel.Calculation.Actions;
+using FloodPanel.Calculation.Actions.Debris;
 using FloodPanel.Calculation.Guides;
 
 namespace FloodPanel.Calculation.Cases;
@@ -23,7 +24,7 @@ internal static class CaseForces
             return default;
         }
 
-        var share = debris.Force(bay) * debris.LogShare;
+        var share = debris.Force(bay) * DebrisModel.Share(model.LogHeights[index]);
         return new(share, CaseDiagram.Factor(model.Factors, kind) * share);
     }
 
@@ -52,7 +53,7 @@ internal static class CaseForces
             struck++;
         }
 
-        return new(Impact(model, debris.Force(bay)).Design, OnLog(model, kind, bay, 0).Design, struck);
+        return new(Impact(model, debris.Force(bay)).Design, struck);
     }
 
     /// <summary>An impact at the water line, or at the top of a barrier that is lower.</summary>

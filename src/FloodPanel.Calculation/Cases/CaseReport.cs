@@ -1,6 +1,7 @@
 using FloodPanel.Calculation.Actions;
 using FloodPanel.Calculation.Guides;
 using FloodPanel.Calculation.Logs;
+using FloodPanel.Calculation.Parts;
 using FloodPanel.Calculation.Posts;
 
 namespace FloodPanel.Calculation.Cases;
@@ -25,6 +26,7 @@ internal static class CaseReport
             Logs = Logs(model, kind, numbers),
             Posts = Posts(model, kind, numbers),
             Guides = Guides(model, kind, numbers),
+            Parts = [.. PartRegistry.Of(model, kind, numbers)],
         };
     }
 
@@ -64,7 +66,7 @@ internal static class CaseReport
     private static LogResult Log(
         OpeningModel model, CaseKind kind, in LogResponse response, int index, int bay, Working lineLoad)
     {
-        var (clear, bearing, log) = (model.Bays[bay], model.EndBearing, model.Log);
+        var (clear, bearing, log) = (model.Bays[bay], model.EndBearing, model.LogMember(index));
         var judged = CaseForces.JudgesDeflection(kind);
         return new()
         {
@@ -129,7 +131,7 @@ internal static class CaseReport
             response.Reaction,
             response.PeakLineReaction,
             GuideReaction.Explain(
-                response, loads, model.Bays[bay], model.EndBearing, model.Log.Section.Height,
+                response, loads, model.Bays[bay], model.EndBearing, model.LogHeights,
                 CaseForces.OnGuide(model, kind, bay)));
     }
 

@@ -1,4 +1,5 @@
 using FloodPanel.Calculation.Actions;
+using FloodPanel.Calculation.Actions.Debris;
 
 namespace FloodPanel.Calculation.Guides;
 
@@ -7,11 +8,16 @@ namespace FloodPanel.Calculation.Guides;
 /// <param name="PeakLineReaction">n, greatest design reaction of one log per length of guide [N/m].</param>
 public readonly record struct GuideResponse(double Reaction, double PeakLineReaction);
 
-/// <summary>What a debris impact does to a guide: the whole of it once, and its share on one log [N].</summary>
+/// <summary>What a debris impact does to a guide: the whole of it once, and a share of it on each log that is struck.</summary>
 /// <param name="Force">F, design force [N].</param>
-/// <param name="Share">P, design share of one log [N].</param>
 /// <param name="StruckLogs">Logs from the bottom that may be struck [-].</param>
-public readonly record struct GuideImpact(double Force, double Share, int StruckLogs);
+public readonly record struct GuideImpact(double Force, int StruckLogs)
+{
+    /// <summary>P, design force on a log of the stack [N].</summary>
+    /// <param name="log">Position from 0.</param>
+    /// <param name="height">t, its height along the guide [m].</param>
+    public double On(int log, double height) => log < StruckLogs ? Force * DebrisModel.Share(height) : 0;
+}
 
 /// <summary>Reaction of a stack of logs on the guide at its end.</summary>
 public static class GuideReaction
@@ -19,13 +25,13 @@ public static class GuideReaction
     /// <summary>Source of the formulas, as printed.</summary>
     public const string Source = "Statics: half of the clear bay and the end bearing load the guide";
 
-    /// <summary>R = Σ w·(b/2 + e) + F and n = max(w·(b/2 + e) + P)/t.</summary>
+    /// <summary>R = Σ w·(b/2 + e) + F and n = max((w·(b/2 + e) + P)/t).</summary>
     /// <param name="logLoads">w, line load of each log [N/m].</param>
     /// <param name="tributary">b/2 + e, half of the clear bay and the end bearing [m].</param>
-    /// <param name="logHeight">t, height of a log along the guide [m], > 0.</param>
+    /// <param name="logHeights">t, height of each log along the guide [m], > 0.</param>
     /// <param name="impact">Debris, or nothing.</param>
     public static GuideResponse Of(
-        ReadOnlySpan<FactoredLoad> logLoads, double tributary, double logHeight, GuideImpact impact = default)
+        ReadOnlySpan<FactoredLoad> logLoads, double tributary, ReadOnlySpan<double> logHeights, GuideImpact impact = default)
     {
         var sum = 0.0;
         foreach (ref readonly var load in logLoads)
@@ -33,9 +39,8 @@ public static class GuideReaction
             sum += load.Design;
         }
 
-        var peak = PeakLog(logLoads, tributary, impact);
-        var greatest = peak < 0 ? 0 : End(logLoads, peak, tributary, impact);
-        return new(sum * tributary + impact.Force, greatest / logHeight);
+        var peak = PeakLog(logLoads, tributary, logHeights, impact);
+        return new(sum * tributary + impact.Force, peak < 0 ? 0 : LineReaction(logLoads, peak, tributary, logHeights, impact));
     }
 
     /// <summary>How a guide's reactions came about.</summary>
@@ -43,14 +48,14 @@ public static class GuideReaction
     /// <param name="logLoads">w, line load of each log [N/m].</param>
     /// <param name="clearBay">b, clear width of the bay [m].</param>
     /// <param name="endBearing">e, length of log that bears at each end [m].</param>
-    /// <param name="logHeight">t, height of a log along the guide [m].</param>
+    /// <param name="logHeights">t, height of each log along the guide [m].</param>
     /// <param name="impact">Debris, or nothing.</param>
     internal static Working Explain(
         GuideResponse response,
         ReadOnlySpan<FactoredLoad> logLoads,
         double clearBay,
         double endBearing,
-        double logHeight,
+        ReadOnlySpan<double> logHeights,
         GuideImpact impact)
     {
         var sum = 0.0;
@@ -59,7 +64,7 @@ public static class GuideReaction
             sum += load.Design;
         }
 
-        var peak = PeakLog(logLoads, clearBay / 2 + endBearing, impact);
+        var peak = PeakLog(logLoads, clearBay / 2 + endBearing, logHeights, impact);
         var steps = new StepList(9);
         steps.Given("b", clearBay, Dimension.Length);
         steps.Given("e", endBearing, Dimension.SectionLength);
@@ -74,21 +79,22 @@ public static class GuideReaction
         var struck = peak >= 0 && peak < impact.StruckLogs;
         if (struck)
         {
-            steps.Given("P", impact.Share, Dimension.Force);
+            steps.Given("P", impact.On(peak, logHeights[peak]), Dimension.Force);
         }
 
-        steps.Given("t", logHeight, Dimension.SectionLength);
+        steps.Given("t", logHeights[Math.Max(0, peak)], Dimension.SectionLength);
         steps.Add("n", struck ? "(w_max·(b/2 + e) + P)/t" : "w_max·(b/2 + e)/t", response.PeakLineReaction, Dimension.LineForce);
         return new("Guide reaction", Source, steps.Done());
     }
 
     /// <summary>The log that presses hardest on the guide, from 0; −1 where none presses towards the protected side.</summary>
-    private static int PeakLog(ReadOnlySpan<FactoredLoad> logLoads, double tributary, GuideImpact impact)
+    private static int PeakLog(
+        ReadOnlySpan<FactoredLoad> logLoads, double tributary, ReadOnlySpan<double> logHeights, GuideImpact impact)
     {
         var (peak, greatest) = (-1, 0.0);
         for (var log = 0; log < logLoads.Length; log++)
         {
-            var end = End(logLoads, log, tributary, impact);
+            var end = LineReaction(logLoads, log, tributary, logHeights, impact);
             if (end > greatest)
             {
                 (peak, greatest) = (log, end);
@@ -98,6 +104,8 @@ public static class GuideReaction
         return peak;
     }
 
-    private static double End(ReadOnlySpan<FactoredLoad> logLoads, int log, double tributary, GuideImpact impact) =>
-        logLoads[log].Design * tributary + (log < impact.StruckLogs ? impact.Share : 0);
+    /// <summary>n, design reaction of one log per length of guide [N/m].</summary>
+    private static double LineReaction(
+        ReadOnlySpan<FactoredLoad> logLoads, int log, double tributary, ReadOnlySpan<double> logHeights, GuideImpact impact) =>
+        (logLoads[log].Design * tributary + impact.On(log, logHeights[log])) / logHeights[log];
 }

@@ -33,37 +33,54 @@ public static class HoldDown
     /// <param name="model">The opening.</param>
     internal static HoldDownResult Of(LogSchedule schedule, LogStack logs, OpeningModel model)
     {
-        var buoyancy = Buoyancy(model.UnitWeight, model.Log, logs.Sealed);
-        var weight = model.Log.Section.Area * model.Log.Material.Density * Physics.Gravity;
-        var (length, count, preload) = (schedule.CuttingLength, logs.Count, logs.SealPreload);
-        var uplift = length * (count * (buoyancy - weight) + preload);
-        var force = Math.Max(0, length * (count * (UpliftFactor * buoyancy - WeightFactor * weight) + UpliftFactor * preload));
+        var (length, preload) = (schedule.CuttingLength, logs.SealPreload);
+        var (floats, weighs) = (0.0, 0.0);
         var steps = new StepList(14);
         steps.UnitWeight(model.UnitWeight);
-        Displaced(steps, model.Log, logs.Sealed, buoyancy);
-        steps.Given("ρ_s", model.Log.Material.Density, Dimension.Density);
-        steps.Add("w_s", logs.Sealed ? "ρ_s·g·A_s" : "ρ_s·g·A", weight, Dimension.LineForce);
-        steps.Given("n", count, Dimension.Count);
+        foreach (var run in model.Runs)
+        {
+            var index = model.Runs.Count == 1 ? "" : FormattableString.Invariant($"_{run.First}");
+            var (buoyancy, weight) = Log(steps, run, logs.Sealed, model.UnitWeight, index);
+            floats += run.Count * buoyancy;
+            weighs += run.Count * weight;
+        }
+
+        var uplift = length * (floats - weighs + preload);
+        var force = Math.Max(0, length * (UpliftFactor * (floats + preload) - WeightFactor * weighs));
+        steps.Add("u_sum", Sum(model, "u"), floats, Dimension.LineForce);
+        steps.Add("w_sum", Sum(model, "w"), weighs, Dimension.LineForce);
         steps.Given("ℓ", length, Dimension.Length);
         steps.Given("q_seal", preload, Dimension.LineForce);
-        steps.Add("U", "ℓ·(n·(u − w_s) + q_seal)", uplift, Dimension.Force);
-        steps.Add("F", "max(0, ℓ·(n·(1.1·u − 0.9·w_s) + 1.1·q_seal))", force, Dimension.Force);
+        steps.Add("U", "ℓ·(u_sum − w_sum + q_seal)", uplift, Dimension.Force);
+        steps.Add("F", "max(0, ℓ·(1.1·(u_sum + q_seal) − 0.9·w_sum))", force, Dimension.Force);
         return new(schedule.Bay, uplift, force, new("Hold-down of the stack, water to its top; each end takes half", Source, steps.Done()));
     }
 
-    private static void Displaced(StepList steps, Member log, bool isSealed, double buoyancy)
+    /// <summary>u and w, uplift and weight of one log per length, and their steps.</summary>
+    private static (double Buoyancy, double Weight) Log(StepList steps, LogRun run, bool isSealed, double unitWeight, string index)
     {
+        var (section, density) = (run.Log.Section, run.Log.Material.Density);
+        var (buoyancy, weight) = (Buoyancy(unitWeight, run.Log, isSealed), section.Area * density * Physics.Gravity);
         if (isSealed)
         {
-            steps.Given("t", log.Section.Height, Dimension.SectionLength);
-            steps.Given("d", log.Section.Depth, Dimension.SectionLength);
-            steps.Add("u", "γ·t·d", buoyancy, Dimension.LineForce);
-            steps.Given("A_s", log.Section.Area, Dimension.SectionArea);
+            steps.Given($"t{index}", section.Height, Dimension.SectionLength);
+            steps.Given($"d{index}", section.Depth, Dimension.SectionLength);
+            steps.Add($"u{index}", $"γ·t{index}·d{index}", buoyancy, Dimension.LineForce);
+            steps.Given($"A{index}", section.Area, Dimension.SectionArea);
         }
         else
         {
-            steps.Given("A", log.Section.Area, Dimension.SectionArea);
-            steps.Add("u", "γ·A", buoyancy, Dimension.LineForce);
+            steps.Given($"A{index}", section.Area, Dimension.SectionArea);
+            steps.Add($"u{index}", $"γ·A{index}", buoyancy, Dimension.LineForce);
         }
+
+        steps.Given($"ρ_s{index}", density, Dimension.Density);
+        steps.Add($"w{index}", $"ρ_s{index}·g·A{index}", weight, Dimension.LineForce);
+        steps.Given($"n{index}", run.Count, Dimension.Count);
+        return (buoyancy, weight);
     }
+
+    private static string Sum(OpeningModel model, string symbol) => model.Runs.Count == 1
+        ? $"n·{symbol}"
+        : string.Join(" + ", model.Runs.Select(run => FormattableString.Invariant($"n_{run.First}·{symbol}_{run.First}")));
 }

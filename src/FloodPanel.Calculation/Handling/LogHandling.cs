@@ -15,14 +15,15 @@ public static class LogHandling
     /// <param name="bay">Bay from the left, from 1.</param>
     /// <param name="clearBay">b, clear width of the bay [m], > 0.</param>
     /// <param name="logs">The stack.</param>
-    /// <param name="log">The log.</param>
+    /// <param name="run">The equal logs.</param>
     /// <returns>Length b + 2·e − c [m] and mass A·ρ·length [kg], profile only.</returns>
     /// <remarks>Source: geometry. Limits: fittings, seals and water held inside are not included.</remarks>
-    public static LogSchedule Schedule(int bay, double clearBay, LogStack logs, Member log)
+    public static LogSchedule Schedule(int bay, double clearBay, LogStack logs, LogRun run)
     {
+        var log = run.Log;
         var length = clearBay + 2 * logs.EndBearing - logs.FittingClearance;
         var mass = log.Section.Area * log.Material.Density * length;
-        return new(bay, logs.Count, length, mass, new("Cutting length and mass of a log", "Geometry; profile only, without fittings",
+        return new(bay, run.First, run.Count, length, mass, new("Cutting length and mass of a log", "Geometry; profile only, without fittings",
         [
             new("b", "", clearBay, Dimension.Length),
             new("e", "", logs.EndBearing, Dimension.SectionLength),

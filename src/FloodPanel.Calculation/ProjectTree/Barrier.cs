@@ -16,7 +16,7 @@ public sealed record Barrier
     public ValueList<DesignedByOthers> ByOthers { get; init; } = [];
 }
 
-/// <summary>A stack of equal stop-logs.</summary>
+/// <summary>A stack of stop-logs: equal ones, and beneath them groups of others where the water presses harder.</summary>
 public sealed record LogStack
 {
     /// <summary>What the logs are made of.</summary>
@@ -25,7 +25,7 @@ public sealed record LogStack
     /// <summary>Cross-section of a log; height along the stack, depth in the direction of the water.</summary>
     public ProfileChoice Profile { get; init; } = new Rectangle();
 
-    /// <summary>Number of logs in the stack [-], 1 to 100.</summary>
+    /// <summary>Number of these logs [-], 1 to 100; with those beneath, no more than 100.</summary>
     public int Count { get; init; } = 1;
 
     /// <summary>Length of log that bears at each end [m], > 0.</summary>
@@ -42,6 +42,28 @@ public sealed record LogStack
 
     /// <summary>q_seal, upward push of the bottom seal per length [N/m], ≥ 0.</summary>
     public double SealPreload { get; init; }
+
+    /// <summary>Other logs beneath these, the lowest group first; none where all are equal.</summary>
+    public ValueList<LogGroup> Below { get; init; } = [];
+
+    /// <summary>Number of logs in the whole stack [-].</summary>
+    public int TotalCount => Count + Below.Sum(group => group.Count);
+
+    /// <summary>The groups of equal logs from the bottom, these logs last.</summary>
+    public IEnumerable<LogGroup> Groups => Below.Append(new LogGroup { Material = Material, Profile = Profile, Count = Count });
+}
+
+/// <summary>Equal logs that follow each other in a stack.</summary>
+public sealed record LogGroup
+{
+    /// <summary>What the logs are made of.</summary>
+    public MaterialChoice Material { get; init; } = new Material();
+
+    /// <summary>Cross-section of a log; height along the stack, depth in the direction of the water.</summary>
+    public ProfileChoice Profile { get; init; } = new Rectangle();
+
+    /// <summary>Number of logs [-], 1 to 100.</summary>
+    public int Count { get; init; } = 1;
 }
 
 /// <summary>The posts between bays, all alike.</summary>

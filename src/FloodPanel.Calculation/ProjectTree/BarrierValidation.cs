@@ -15,6 +15,7 @@ internal static class BarrierValidation
         ChoiceValidation.Material(logs.Material, $"{path}.logs.material", problems, library);
         ChoiceValidation.Profile(logs.Profile, $"{path}.logs.profile", problems, library);
         problems.Check(Fields.LogCount, logs.Count, $"{path}.logs");
+        Below(logs, $"{path}.logs", problems, library);
         problems.Check(Fields.EndBearing, logs.EndBearing, $"{path}.logs");
         problems.Check(Fields.LogDeflectionLimit, logs.DeflectionLimit, $"{path}.logs");
         problems.Check(Fields.FittingClearance, logs.FittingClearance, $"{path}.logs");
@@ -31,6 +32,24 @@ internal static class BarrierValidation
         }
 
         ByOthers(barrier, path, problems);
+    }
+
+    private static void Below(LogStack logs, string path, ProblemList problems, Library library)
+    {
+        var allowed = Fields.LogCount.Allows(logs.Count);
+        for (var i = 0; i < logs.Below.Count; i++)
+        {
+            var (group, at) = (logs.Below[i], $"{path}.below[{i}]");
+            ChoiceValidation.Material(group.Material, $"{at}.material", problems, library);
+            ChoiceValidation.Profile(group.Profile, $"{at}.profile", problems, library);
+            problems.Check(Fields.LogCount, group.Count, at);
+            allowed &= Fields.LogCount.Allows(group.Count);
+        }
+
+        if (allowed && !Fields.LogCount.Allows(logs.TotalCount))
+        {
+            problems.Add($"{path}.below", $"The stack has {logs.TotalCount} logs; allowed is {Fields.LogCount.Maximum} in all.");
+        }
     }
 
     private static void Bays(Opening opening, string path, ProblemList problems)

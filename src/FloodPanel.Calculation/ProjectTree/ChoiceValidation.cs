@@ -21,6 +21,13 @@ internal static class ChoiceValidation
         problems.Check(Fields.ShearStrength, material.ShearStrength, path);
         problems.Check(Fields.AllowableBending, material.AllowableBending, path);
         problems.Check(Fields.AllowableShear, material.AllowableShear, path);
+        problems.Check(MaterialFields.UltimateStrength, material.UltimateStrength, path);
+        problems.Check(MaterialFields.WeldedYield, material.WeldedYield, path);
+        problems.Check(MaterialFields.WeldedUltimate, material.WeldedUltimate, path);
+        problems.Check(MaterialFields.ShearModulus, material.ShearModulus, path);
+        problems.Check(MaterialFields.CrossStrength, material.CrossStrength, path);
+        problems.Check(MaterialFields.CrossCompression, material.CrossCompression, path);
+        problems.Check(MaterialFields.CharacteristicDensity, material.CharacteristicDensity, path);
     }
 
     public static void Profile(ProfileChoice choice, string path, ProblemList problems, Library library)

@@ -33,6 +33,53 @@ public sealed record Material : MaterialChoice
 
     /// <summary>Shear stress allowed (allowable stress) or design resistance (strength bases) [Pa], > 0, or null.</summary>
     public double? AllowableShear { get; init; }
+
+    /// <summary>f_u or F_tu, characteristic ultimate tensile strength [Pa], > 0, or null.</summary>
+    public double? UltimateStrength { get; init; }
+
+    /// <summary>f_o,haz or F_tyw, yield within 25 mm of a weld of aluminium [Pa], > 0, or null.</summary>
+    public double? WeldedYield { get; init; }
+
+    /// <summary>f_u,haz or F_tuw, ultimate strength within 25 mm of a weld of aluminium [Pa], > 0, or null.</summary>
+    public double? WeldedUltimate { get; init; }
+
+    /// <summary>G, shear modulus [Pa], > 0, or null.</summary>
+    public double? ShearModulus { get; init; }
+
+    /// <summary>Flexural strength across the fibres of a composite [Pa], > 0, or null.</summary>
+    public double? CrossStrength { get; init; }
+
+    /// <summary>f_c,90,k or F_c⊥, compressive strength of timber across the grain [Pa], > 0, or null.</summary>
+    public double? CrossCompression { get; init; }
+
+    /// <summary>ρ_k, characteristic density of timber [kg/m³], > 0, or null.</summary>
+    public double? CharacteristicDensity { get; init; }
+
+    /// <summary>How an aluminium alloy buckles; null where nobody has said.</summary>
+    public BucklingClass? BucklingClass { get; init; }
+
+    /// <summary>What the strengths are.</summary>
+    public StrengthReference Reference { get; init; }
+}
+
+/// <summary>Buckling class of an aluminium alloy (EN 1999-1-1, 3.2.2).</summary>
+public enum BucklingClass
+{
+    /// <summary>Class A, heat-treated tempers.</summary>
+    A,
+
+    /// <summary>Class B, other tempers.</summary>
+    B,
+}
+
+/// <summary>What the strengths of a material are.</summary>
+public enum StrengthReference
+{
+    /// <summary>Characteristic or specified minimum strengths.</summary>
+    Characteristic,
+
+    /// <summary>Reference design values of the National Design Specification for timber, to be adjusted by its factors.</summary>
+    NdsReference,
 }
 
 /// <summary>Material families.</summary>

@@ -105,6 +105,6 @@ internal static class MemberRows
     {
         var material = new Material { ElasticModulus = stiffness, Density = 1 };
         var section = SectionProperties.Of(new GivenProperties { Area = 1, Inertia = 1, Modulus = 1, PlasticModulus = 1, ShearArea = 1 });
-        return Cantilever.Respond(PressureDiagram.Of(load), new Member(material, section, null, null, 100), tributary, length, cosRake: 1);
+        return Cantilever.Respond(PressureDiagram.Of(load), new Member(material, new Rectangle { Height = section.Height, Depth = section.Depth }, section, null, null, 100), tributary, length, cosRake: 1);
     }
 }

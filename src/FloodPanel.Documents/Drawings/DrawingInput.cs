@@ -17,7 +17,7 @@ public sealed record DrawingInput(
 
     internal Barrier Barrier => Result.Opening.Barrier;
 
-    internal int LogCount => Barrier.Logs.Count;
+    internal int LogCount => Barrier.Logs.TotalCount;
 
     internal double Rake => double.DegreesToRadians(Opening.RakeDegrees);
 

@@ -69,6 +69,9 @@ internal sealed class FileObject
     public T Word<T>(string name, Words<T> words, T fallback)
         where T : struct => Find(name)?.AsWord(words) ?? fallback;
 
+    public T? WordOrNull<T>(string name, Words<T> words)
+        where T : struct => Present(name) is { } value ? value.AsWord(words) : null;
+
     /// <summary>The object; null when it is absent or null.</summary>
     public FileObject? Object(string name) => Present(name)?.AsObject();
 

@@ -67,8 +67,26 @@ internal static class OpeningReader
             FittingClearance = logs.Number("fittingClearance", blank.FittingClearance),
             Sealed = logs.Flag("sealed", blank.Sealed),
             SealPreload = logs.Number("sealPreload", blank.SealPreload),
+            Below = logs.List("below").Select(ReadGroup).ToValueList(),
         };
         logs.Close();
+        return read;
+    }
+
+    private static LogGroup ReadGroup(FileValue value)
+    {
+        if (value.AsObject() is not { } group)
+        {
+            return new LogGroup();
+        }
+
+        var read = new LogGroup
+        {
+            Material = SectionReader.ReadMaterial(group),
+            Profile = SectionReader.ReadProfile(group),
+            Count = group.WholeNumber("count", Fields.LogCount),
+        };
+        group.Close();
         return read;
     }
 

@@ -37,6 +37,15 @@ internal static class OpeningWriter
         }
     }
 
+    /// <summary>Writes an optional field only where it holds something.</summary>
+    public static void WriteNumberIfAny(this Utf8JsonWriter json, string name, double? value)
+    {
+        if (value is { } number)
+        {
+            json.WriteNumber(name, number);
+        }
+    }
+
     private static void WriteBarrier(Utf8JsonWriter json, Barrier barrier)
     {
         json.WriteStartObject("barrier");
@@ -74,7 +83,28 @@ internal static class OpeningWriter
         json.WriteNumber("fittingClearance", logs.FittingClearance);
         json.WriteBoolean("sealed", logs.Sealed);
         json.WriteNumber("sealPreload", logs.SealPreload);
+        WriteBelow(json, logs.Below);
         json.WriteEndObject();
+    }
+
+    private static void WriteBelow(Utf8JsonWriter json, ValueList<LogGroup> below)
+    {
+        if (below.Count == 0)
+        {
+            return;
+        }
+
+        json.WriteStartArray("below");
+        foreach (var group in below)
+        {
+            json.WriteStartObject();
+            SectionWriter.Write(json, group.Material);
+            SectionWriter.Write(json, group.Profile);
+            json.WriteNumber("count", group.Count);
+            json.WriteEndObject();
+        }
+
+        json.WriteEndArray();
     }
 
     private static void WritePosts(Utf8JsonWriter json, PostSet? posts)

@@ -54,6 +54,15 @@ internal static class SectionReader
             ShearStrength = material.NumberOrNull("shearStrength"),
             AllowableBending = material.NumberOrNull("allowableBending"),
             AllowableShear = material.NumberOrNull("allowableShear"),
+            UltimateStrength = material.NumberOrNull("ultimateStrength"),
+            WeldedYield = material.NumberOrNull("weldedYield"),
+            WeldedUltimate = material.NumberOrNull("weldedUltimate"),
+            ShearModulus = material.NumberOrNull("shearModulus"),
+            CrossStrength = material.NumberOrNull("crossStrength"),
+            CrossCompression = material.NumberOrNull("crossCompression"),
+            CharacteristicDensity = material.NumberOrNull("characteristicDensity"),
+            BucklingClass = material.WordOrNull("bucklingClass", FileWords.Buckling),
+            Reference = material.Word("strengthReference", FileWords.Reference, StrengthReference.Characteristic),
         };
         material.Close();
         return read;

@@ -23,6 +23,23 @@ internal static class SectionWriter
         json.WriteNumberOrNull("shearStrength", material.ShearStrength);
         json.WriteNumberOrNull("allowableBending", material.AllowableBending);
         json.WriteNumberOrNull("allowableShear", material.AllowableShear);
+        json.WriteNumberIfAny("ultimateStrength", material.UltimateStrength);
+        json.WriteNumberIfAny("weldedYield", material.WeldedYield);
+        json.WriteNumberIfAny("weldedUltimate", material.WeldedUltimate);
+        json.WriteNumberIfAny("shearModulus", material.ShearModulus);
+        json.WriteNumberIfAny("crossStrength", material.CrossStrength);
+        json.WriteNumberIfAny("crossCompression", material.CrossCompression);
+        json.WriteNumberIfAny("characteristicDensity", material.CharacteristicDensity);
+        if (material.BucklingClass is { } buckling)
+        {
+            json.WriteString("bucklingClass", FileWords.Buckling.Of(buckling));
+        }
+
+        if (material.Reference != StrengthReference.Characteristic)
+        {
+            json.WriteString("strengthReference", FileWords.Reference.Of(material.Reference));
+        }
+
         json.WriteEndObject();
     }
 

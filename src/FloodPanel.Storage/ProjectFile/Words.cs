@@ -55,4 +55,12 @@ internal static class FileWords
         ("steel", MaterialFamily.Steel),
         ("timber", MaterialFamily.Timber),
         ("composite", MaterialFamily.Composite));
+
+    public static readonly Words<BucklingClass> Buckling = new(
+        ("A", BucklingClass.A),
+        ("B", BucklingClass.B));
+
+    public static readonly Words<StrengthReference> Reference = new(
+        ("characteristic", StrengthReference.Characteristic),
+        ("nds-reference", StrengthReference.NdsReference));
 }

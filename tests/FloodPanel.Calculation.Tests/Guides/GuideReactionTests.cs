@@ -8,12 +8,12 @@ public class GuideReactionTests
     [Fact]
     public void Of_ThreeLogs_SumAndPeakOfDesignLoads()
     {
-        var response = GuideReaction.Of([new(30, 3_000), new(20, 2_000), new(10, 1_000)], tributary: 0.9, logHeight: 0.2);
+        var response = GuideReaction.Of([new(30, 3_000), new(20, 2_000), new(10, 1_000)], tributary: 0.9, logHeights: [0.2, 0.2, 0.2]);
 
         Hand.Equal(5_400, response.Reaction);
         Hand.Equal(13_500, response.PeakLineReaction);
     }
 
     [Fact]
-    public void Of_NoLogs_Nothing() => Assert.Equal(default, GuideReaction.Of([], 0.9, 0.2));
+    public void Of_NoLogs_Nothing() => Assert.Equal(default, GuideReaction.Of([], 0.9, []));
 }

@@ -15,10 +15,9 @@ public class HoldDownTests
 {
     private static readonly Material Alloy = new() { Family = MaterialFamily.Aluminium, Density = 2700, ElasticModulus = 70e9 };
 
-    private static readonly Member Ribbed = new(
-        Alloy,
-        SectionProperties.Of(new HollowRectangle { Height = 0.2, Depth = 0.05, Face = 0.003, Web = 0.0085 / 3, Webs = 3 }),
-        null, null, 200);
+    private static readonly HollowRectangle Profile = new() { Height = 0.2, Depth = 0.05, Face = 0.003, Web = 0.0085 / 3, Webs = 3 };
+
+    private static readonly Member Ribbed = new(Alloy, Profile, SectionProperties.Of(Profile), null, null, 200);
 
     [Fact]
     public void Buoyancy_RibbedLog_DerivedExample()

@@ -12,7 +12,7 @@ public class LogHandlingTests
         var logs = new LogStack { Count = 6, EndBearing = 0.04, FittingClearance = 0.01 };
         var log = Stretch.Beam(70e9, 1e-6) with { Material = SampleProject.Aluminium };
 
-        var row = LogHandling.Schedule(bay: 2, clearBay: 1.6, logs, log);
+        var row = LogHandling.Schedule(bay: 2, clearBay: 1.6, logs, new LogRun(1, 6, log));
 
         Assert.Equal((2, 6), (row.Bay, row.Count));
         Hand.Equal(1.67, row.CuttingLength);

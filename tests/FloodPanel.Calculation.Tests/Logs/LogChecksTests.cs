@@ -11,9 +11,12 @@ namespace FloodPanel.Calculation.Tests.Logs;
 /// </summary>
 public class LogChecksTests
 {
+    private static readonly Rectangle Profile = new() { Height = 0.2, Depth = 0.06 };
+
     private static readonly Member Plank = new(
         new Material { Density = 500, ElasticModulus = 10e9 },
-        SectionProperties.Of(new Rectangle { Height = 0.2, Depth = 0.06 }),
+        Profile,
+        SectionProperties.Of(Profile),
         new DesignStress(9e6, null, "", "typed"),
         new DesignStress(1e6, null, "", "typed"),
         200);
@@ -55,7 +58,7 @@ public class LogChecksTests
     [Fact]
     public void BendingAndShear_NoStress_NoCheck()
     {
-        var unknown = new Member(Plank.Material, Plank.Section, null, null, 200);
+        var unknown = new Member(Plank.Material, Plank.Profile, Plank.Section, null, null, 200);
         var response = LogResponse.Of(new(1_600, 2_000), 1.8, unknown);
 
         Assert.Null(LogChecks.Bending(response, 1.75, 0.05, unknown));

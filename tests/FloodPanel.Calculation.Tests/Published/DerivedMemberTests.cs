@@ -39,7 +39,7 @@ public class DerivedMemberTests
     {
         var alloy = new Material { Family = MaterialFamily.Aluminium, Density = 2700, ElasticModulus = 70e9, BendingStrength = 160e6 };
         var log = new Member(
-            alloy, SectionProperties.Of(RibbedLog), DesignStress.Bending(alloy, DesignBases.Eurocode), null, 200);
+            alloy, RibbedLog, SectionProperties.Of(RibbedLog), DesignStress.Bending(alloy, DesignBases.Eurocode), null, 200);
 
         var response = LogResponse.Of(new(1_600, 1_600), span: 1.5, log);
 
@@ -73,7 +73,7 @@ public class DerivedMemberTests
         var diagram = PressureDiagram.Of(Hydrostatic.Side(UnitWeight, 1.2, height: 1.2, factor: 1));
         var loads = Enumerable.Range(0, logs).Select(i => diagram.Within(i * 1.2 / logs, (i + 1) * 1.2 / logs)).ToArray();
 
-        var response = GuideReaction.Of(loads, tributary: 1.5, logHeight: 1.2 / logs);
+        var response = GuideReaction.Of(loads, tributary: 1.5, logHeights: [.. Enumerable.Repeat(1.2 / logs, logs)]);
 
         Assert.Equal(17.66, response.PeakLineReaction / 1000, tolerance: 0.005);
         Assert.Equal(10.59, response.Reaction / 1000, tolerance: 0.005);

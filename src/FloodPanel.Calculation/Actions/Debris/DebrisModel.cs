@@ -6,16 +6,16 @@ namespace FloodPanel.Calculation.Actions.Debris;
 public sealed class DebrisModel
 {
     private readonly double retainedDepth;
-    private readonly DebrisResponse response;
+    private readonly DebrisResponse[] responses;
     private readonly double[] spans;
     private readonly double[] forces;
 
-    private DebrisModel(DebrisInput input, Member log, double unitWeight, double retainedDepth, double height, double[] spans)
+    private DebrisModel(
+        DebrisInput input, IReadOnlyList<Member> logs, double unitWeight, double retainedDepth, double height, double[] spans)
     {
         (Input, this.retainedDepth, this.spans) = (input, retainedDepth, spans);
-        response = new(input, log, unitWeight / Physics.Gravity);
+        responses = [.. logs.Select(log => new DebrisResponse(input, log, unitWeight / Physics.Gravity))];
         StrikeHeight = Math.Max(0, Math.Min(retainedDepth, height));
-        LogShare = Math.Min(1, log.Section.Height / DebrisImpact.PatchHeight);
         forces = [.. spans.Select(ForceOn)];
         for (var bay = 1; bay < forces.Length; bay++)
         {
@@ -32,23 +32,24 @@ public sealed class DebrisModel
     /// <summary>Height at which posts and guides take the impact: still water, or the top of a lower barrier [m].</summary>
     public double StrikeHeight { get; }
 
-    /// <summary>Share of the force that falls on one log: its height over the height of the patch, at most 1 [-].</summary>
-    public double LogShare { get; }
-
     /// <summary>The bay with the greatest force, from 0.</summary>
     public int GreatestBay { get; }
 
     /// <summary>Resolves debris.</summary>
     /// <param name="input">The debris, or null.</param>
-    /// <param name="log">The logs.</param>
+    /// <param name="logs">One of each kind of log; the greatest response counts for all.</param>
     /// <param name="unitWeight">γ, unit weight of water [N/m³].</param>
     /// <param name="retainedDepth">h, still-water depth above the sill [m]; nothing strikes unless it is above zero.</param>
     /// <param name="height">H, vertical height of the barrier [m].</param>
     /// <param name="spans">L, effective span of each bay [m].</param>
     /// <returns>The debris; null when there is none.</returns>
     public static DebrisModel? Of(
-        DebrisInput? input, Member log, double unitWeight, double retainedDepth, double height, double[] spans) =>
-        input is null ? null : new(input, log, unitWeight, retainedDepth, height, spans);
+        DebrisInput? input, IReadOnlyList<Member> logs, double unitWeight, double retainedDepth, double height, double[] spans) =>
+        input is null ? null : new(input, logs, unitWeight, retainedDepth, height, spans);
+
+    /// <summary>Share of the force that falls on one log: its height over the height of the patch, at most 1 [-].</summary>
+    /// <param name="logHeight">t, height of the log [m], > 0.</param>
+    public static double Share(double logHeight) => Math.Min(1, logHeight / DebrisImpact.PatchHeight);
 
     /// <summary>F, unfactored force on a log of a bay [N]; it differs where the response follows from the span.</summary>
     /// <param name="bay">Bay from 0.</param>
@@ -65,6 +66,7 @@ public sealed class DebrisModel
         var factors = Input.Coefficients;
         var steps = new StepList(DebrisResponse.MostSteps + 9);
         steps.Given("Δt", Input.StoppingTime, Dimension.Time);
+        var response = Governing(spans[bay]);
         response.Write(steps, spans[bay]);
         steps.Given("C_I", factors.Importance, Dimension.Ratio);
         steps.Given("C_O", factors.Orientation, Dimension.Ratio);
@@ -80,7 +82,9 @@ public sealed class DebrisModel
 
     private double ForceOn(double span) => IsDry ? 0 : Impact(span);
 
-    private double Product(double span) => DebrisImpact.WithoutResponse(Input.Coefficients) * response.Of(span);
+    private double Product(double span) => DebrisImpact.WithoutResponse(Input.Coefficients) * Governing(span).Of(span);
+
+    private DebrisResponse Governing(double span) => responses.MaxBy(response => response.Of(span))!;
 
     private double Impact(double span) =>
         DebrisImpact.Force(Input.Mass, Input.Velocity, Input.StoppingTime, Product(span));

@@ -1,6 +1,7 @@
 using System.Globalization;
 using FloodPanel.Calculation;
 using FloodPanel.Calculation.Cases;
+using FloodPanel.Calculation.Parts;
 using FloodPanel.Web.Shared.Forms;
 
 namespace FloodPanel.Web.Shared.Results;
@@ -12,7 +13,9 @@ namespace FloodPanel.Web.Shared.Results;
 /// <param name="Index">Log, post or action, from 1; 0 where there is but one.</param>
 /// <param name="Bay">Bay, from 1; 0 where it does not matter.</param>
 /// <param name="Side">Side of a guide, or empty.</param>
-public sealed record FigureKey(string Name, string Symbol, string Case = "", int Index = 0, int Bay = 0, string Side = "");
+/// <param name="Part">Needed check and name of a part, "anchors/post 1", or empty.</param>
+public sealed record FigureKey(
+    string Name, string Symbol, string Case = "", int Index = 0, int Bay = 0, string Side = "", string Part = "");
 
 /// <summary>The working behind a figure.</summary>
 /// <param name="Title">What is worked out.</param>
@@ -50,7 +53,7 @@ public static class Figures
         Freeboard => Of(result.Freeboard, ""),
         HoldDown => result.HoldDowns.FirstOrDefault(row => row.Bay == key.Bay) is { } held ? Of(held.Working, BayName(held.Bay)) : null,
         Leakage => result.Leakage is { } leakage ? Of(leakage.Working, "") : null,
-        Schedule => result.Schedule.FirstOrDefault(row => row.Bay == key.Bay) is { } row ? Of(row.Working, BayName(row.Bay)) : null,
+        Schedule => result.Schedule.FirstOrDefault(row => row.Bay == key.Bay && (key.Index == 0 || row.FirstLog == key.Index)) is { } row ? Of(row.Working, BayName(row.Bay)) : null,
         _ => result.Cases.FirstOrDefault(c => c.Name == key.Case) is { } loadCase ? InCase(loadCase, key) : null,
     };
 
@@ -70,14 +73,46 @@ public static class Figures
     private static IEnumerable<FigureKey> Candidates(OpeningResult result, Governing governing)
     {
         var loadCase = result.Cases.First(c => c.Name == governing.Case);
-        return governing.Check.StartsWith("post", StringComparison.Ordinal)
-            ? loadCase.Posts.Select(p => new FigureKey(governing.Check, "u", loadCase.Name, p.Index))
-            : loadCase.Logs.Select(l => new FigureKey(governing.Check, "u", loadCase.Name, l.Index, l.Bay));
+        return loadCase.Posts.Select(p => new FigureKey(governing.Check, "u", loadCase.Name, p.Index))
+            .Concat(loadCase.Logs.Select(l => new FigureKey(governing.Check, "u", loadCase.Name, l.Index, l.Bay)))
+            .Concat(loadCase.Parts.Select(p => OfPart(loadCase.Name, p, governing.Check)));
+    }
+
+    /// <summary>The figure that a check or a working of a part is.</summary>
+    /// <param name="loadCase">Name of the load case.</param>
+    /// <param name="part">The part.</param>
+    /// <param name="name">Name of the check, or title of the working.</param>
+    /// <param name="symbol">Symbol of the line.</param>
+    public static FigureKey OfPart(string loadCase, PartResult part, string name, string symbol = "u") =>
+        new(name, symbol, loadCase, Part: $"{part.Check}/{part.Member}");
+
+    private static FigureWorking? InPart(CaseResult loadCase, FigureKey key, string inCase)
+    {
+        foreach (var part in loadCase.Parts.Where(p => key.Part == $"{p.Check}/{p.Member}"))
+        {
+            var where = Sentence($"{part.Member}, {inCase}");
+            if (part.Checks.FirstOrDefault(c => c.Name == key.Name) is { } check)
+            {
+                return Of(check, where);
+            }
+
+            if (part.Workings.FirstOrDefault(w => w.Title == key.Name) is { } working)
+            {
+                return Of(working, where);
+            }
+        }
+
+        return null;
     }
 
     private static FigureWorking? InCase(CaseResult loadCase, FigureKey key)
     {
         var inCase = $"{CaseNames.InWords(loadCase.Name)} case";
+        if (key.Part.Length > 0)
+        {
+            return InPart(loadCase, key, inCase);
+        }
+
         switch (key.Name)
         {
             case Resultant:
@@ -109,6 +144,8 @@ public static class Figures
             PostShear when post?.ShearWorking is { } working => Of(working, $"{PostName(post)}, {inCase}"),
             PostDeflection when post?.DeflectionCheck is { } check => Of(check, $"{PostName(post)}, {inCase}"),
             PostDeflection when post?.DeflectionWorking is { } working => Of(working, $"{PostName(post)}, {inCase}"),
+            _ when key.Bay > 0 && log?.Others.FirstOrDefault(c => c.Name == key.Name) is { } check => Of(check, $"{LogName(log)}, {inCase}"),
+            _ when key.Bay == 0 && post?.Others.FirstOrDefault(c => c.Name == key.Name) is { } check => Of(check, $"{PostName(post)}, {inCase}"),
             _ => null,
         };
     }

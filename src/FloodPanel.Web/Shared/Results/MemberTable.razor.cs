@@ -19,15 +19,19 @@ public sealed partial class MemberTable
     {
         "log" => Bays.Distinct().Count() > 1 ? $"Log {row.Number}, bay {row.Bay}" : $"Log {row.Number}",
         "post" => $"Post {row.Number}",
-        _ => $"{Forms.Words.FromName(row.Side)} guide",
+        "guide" => $"{Forms.Words.FromName(row.Side)} guide",
+        _ => $"{Forms.Words.FromName(row.Member)}, {NeededChecks.Title(row.Part)}",
     };
 
     private static string NameOf(MemberGoverning row) => row.Member switch
     {
         "log" => FormattableString.Invariant($"log-{row.Number}-bay-{row.Bay}"),
         "post" => FormattableString.Invariant($"post-{row.Number}"),
-        _ => $"{row.Side}-guide",
+        "guide" => $"{row.Side}-guide",
+        _ => $"{row.Part}-{row.Member.Replace(' ', '-')}",
     };
 
-    private static FigureKey KeyOf(MemberGoverning row, Check check) => new(check.Name, "u", row.Case.Name, row.Number, row.Bay);
+    private static FigureKey KeyOf(MemberGoverning row, Check check) => row.Part.Length > 0
+        ? new(check.Name, "u", row.Case.Name, Part: $"{row.Part}/{row.Member}")
+        : new(check.Name, "u", row.Case.Name, row.Number, row.Bay);
 }

@@ -12,6 +12,14 @@ public sealed partial class NoteList
     [Parameter, EditorRequired]
     public IReadOnlyList<Note> Notes { get; set; } = [];
 
+    /// <summary>What the notes are, for those who cannot see the heading.</summary>
+    [Parameter]
+    public string Title { get; set; } = "Cautions";
+
+    /// <summary>Name for tests.</summary>
+    [Parameter]
+    public string TestId { get; set; } = "notes";
+
     /// <summary>The reader's units.</summary>
     [CascadingParameter]
     public UnitSystem Units { get; set; }

@@ -16,7 +16,7 @@ public class DebrisModelTests
     private static readonly DebrisInput Input = new() { Mass = 450, Velocity = 1.5 };
 
     [Fact]
-    public void Of_NoDebris_Null() => Assert.Null(DebrisModel.Of(null, Plank, Gamma, 0.9, 1.2, [2]));
+    public void Of_NoDebris_Null() => Assert.Null(DebrisModel.Of(null, [Plank], Gamma, 0.9, 1.2, [2]));
 
     [Theory]
     [InlineData(0.9, 0.9)]
@@ -40,7 +40,7 @@ public class DebrisModelTests
     [InlineData(0.3, 1)]
     [InlineData(0.45, 1)]
     public void LogShare_LogHeight_ShareOfThePatch(double height, double share) =>
-        Hand.Equal(share, DebrisModel.Of(Input, Log(height), Gamma, 0.9, 1.2, [2])!.LogShare);
+        Hand.Equal(share, DebrisModel.Share(height));
 
     [Fact]
     public void Force_SillDry_None() => Assert.Equal(0, Model(Input, 0).Force(0));
@@ -122,8 +122,11 @@ public class DebrisModelTests
         Assert.StartsWith("With depth coefficient and screening at 0, debris puts no force", note.Text.ToString(), StringComparison.Ordinal);
     }
 
-    private static DebrisModel Model(DebrisInput input, double depth) => DebrisModel.Of(input, Plank, Gamma, depth, 1.2, [2, 4])!;
+    private static DebrisModel Model(DebrisInput input, double depth) => DebrisModel.Of(input, [Plank], Gamma, depth, 1.2, [2, 4])!;
 
-    private static Member Log(double height) =>
-        new(SampleProject.Aluminium, SectionProperties.Of(new Rectangle { Height = height, Depth = 0.05 }), null, null, 200);
+    private static Member Log(double height)
+    {
+        var profile = new Rectangle { Height = height, Depth = 0.05 };
+        return new(SampleProject.Aluminium, profile, SectionProperties.Of(profile), null, null, 200);
+    }
 }

@@ -1,0 +1,36 @@
+using FloodPanel.Calculation.Cases;
+
+namespace FloodPanel.Calculation.Parts;
+
+/// <summary>The checks of one part of the barrier.</summary>
+/// <param name="Of">The part under a load case; nothing where it has no inputs.</param>
+/// <param name="Gaps">Why its needed check has no result; nothing where it has one.</param>
+internal sealed record PartSource(
+    Func<OpeningModel, CaseKind, CaseEvaluation, IEnumerable<PartResult>> Of,
+    Func<OpeningModel, IEnumerable<PartGap>> Gaps);
+
+/// <summary>Everything besides logs and posts that must resist. A new part joins the list.</summary>
+internal static class PartRegistry
+{
+    private static readonly PartSource[] Sources =
+    [
+        NotEntered(NeededChecks.BasePlates, model => model.Post is not null, new(
+            $"The base plates of the posts have no inputs: enter a base plate, or declare it designed by others.")),
+        NotEntered(NeededChecks.Anchors, _ => true, new(
+            $"The anchors have no inputs: enter them, or declare them designed by others.")),
+        NotEntered(NeededChecks.Guides, _ => true, new(
+            $"The guides have no inputs: enter their mounting and dimensions, or declare them designed by others.")),
+        NotEntered(NeededChecks.SupportingWall, _ => true, new(
+            $"The wall behind has no resistance entered: enter it with its source, or declare it designed by others.")),
+    ];
+
+    /// <summary>The parts with their checks under a load case.</summary>
+    public static IEnumerable<PartResult> Of(OpeningModel model, CaseKind kind, CaseEvaluation numbers) =>
+        Sources.SelectMany(source => source.Of(model, kind, numbers));
+
+    /// <summary>Why needed checks have no result; a needed check without a gap is complete.</summary>
+    public static IEnumerable<PartGap> Gaps(OpeningModel model) => Sources.SelectMany(source => source.Gaps(model));
+
+    private static PartSource NotEntered(string check, Func<OpeningModel, bool> isNeeded, Sentence text) => new(
+        (_, _, _) => [], model => isNeeded(model) ? [new(check, new($"{check}-missing", text))] : []);
+}
