@@ -177,8 +177,8 @@ public class VerdictRulesTests
     public void Of_AnyOpening_AdequateOnlyWhenAllRanAndPassed(Scenario scenario)
     {
         var result = scenario.Result;
-        var members = result.Cases.SelectMany(c => c.Logs.SelectMany(l => new[] { l.BendingCheck, l.ShearCheck, l.DeflectionCheck })
-            .Concat(c.Posts.SelectMany(p => new[] { p.BendingCheck, p.ShearCheck, p.DeflectionCheck }))).OfType<Check>().ToArray();
+        var members = result.Cases.SelectMany(c => c.Logs.SelectMany(l => l.Checks)
+            .Concat(c.Posts.SelectMany(p => p.Checks)).Concat(c.Parts.SelectMany(p => p.Checks))).ToArray();
         var fails = members.Append(result.Freeboard).Any(c => !(c.Demand <= c.Capacity));
 
         var expected = fails ? VerdictKind.Inadequate
@@ -196,13 +196,13 @@ public class VerdictRulesTests
     {
         var (barrier, actions) = (scenario.Opening.Barrier, scenario.Opening.Actions);
         var result = scenario.Result;
-        var logsRan = result.Cases[0].Logs[0] is { BendingCheck: not null, ShearCheck: not null };
+        var logsRan = result.Cases[0].Logs.All(log => log is { BendingCheck: not null, ShearCheck: not null });
         var postsRan = barrier.Bays.Count == 1 || result.Cases[0].Posts[0] is { BendingCheck: not null, ShearCheck: not null };
         var needed = new List<string>();
         needed.AddRange(logsRan ? [] : ["logs"]);
         needed.AddRange(postsRan ? [] : ["posts"]);
-        needed.AddRange(barrier.Bays.Count == 1 ? [] : ["base-plates"]);
-        needed.AddRange(["anchors", "guides", "supporting-wall"]);
+        needed.AddRange(result.Gaps.Select(gap => gap.Check));
+        needed = [.. NeededChecks.MayBeByOthers.Where(needed.Contains)];
         needed.RemoveAll(check => barrier.ByOthers.Any(d => d.Check == check && d.Name.Length > 0 && d.Reference.Length > 0));
         needed.AddRange(actions.Flow is { Velocity: > 3.05 } ? ["flow"] : []);
         needed.AddRange(scenario.Model.Wave is { IsCovered: false } ? ["wave"] : []);

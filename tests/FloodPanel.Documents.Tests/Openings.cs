@@ -46,6 +46,21 @@ internal static class Openings
                     },
                 },
             }, u),
+        ["mixed-stack"] = u => Sample.Input(
+            Sample.Garage with
+            {
+                Barrier = Sample.Garage.Barrier with
+                {
+                    Logs = Sample.Garage.Barrier.Logs with
+                    {
+                        Below =
+                        [
+                            new LogGroup { Material = Sample.Alloy, Profile = Sample.Plank with { Height = 0.25, Depth = 0.08 }, Count = 2 },
+                            new LogGroup { Material = Sample.Alloy with { Family = MaterialFamily.Timber }, Profile = new Rectangle { Height = 0.15, Depth = 0.06 } },
+                        ],
+                    },
+                },
+            }, u),
         ["i-section"] = u => Sample.Input(
             Sample.Garage with
             {

@@ -7,6 +7,26 @@ namespace FloodPanel.Storage.Tests;
 /// <summary>Projects that use every field of the tree, none of them at its default.</summary>
 internal static class Example
 {
+    /// <summary>A material with each of its figures.</summary>
+    public static Material EveryFigure { get; } = new()
+    {
+        Family = MaterialFamily.Timber,
+        Name = "every figure",
+        Density = 520,
+        ElasticModulus = 11e9,
+        BendingStrength = 24e6,
+        ShearStrength = 4e6,
+        UltimateStrength = 250e6,
+        WeldedYield = 80e6,
+        WeldedUltimate = 150e6,
+        ShearModulus = 3e9,
+        CrossStrength = 50e6,
+        CrossCompression = 2.5e6,
+        CharacteristicDensity = 350,
+        BucklingClass = BucklingClass.B,
+        Reference = StrengthReference.NdsReference,
+    };
+
     public static Project Full { get; } = new()
     {
         Name = "Weir Cottage \"north\" \\ Überlauf 水門",
@@ -82,6 +102,11 @@ internal static class Example
                 FittingClearance = 0.012,
                 Sealed = false,
                 SealPreload = 150,
+                Below =
+                [
+                    new LogGroup { Material = new LibraryMaterial("en-aw-6005a-t6"), Profile = new RectangularTube { Height = 0.25, Depth = 0.08, Wall = 0.006 }, Count = 1 },
+                    new LogGroup { Material = EveryFigure, Profile = new LibraryProfile("log-200-50"), Count = 2 },
+                ],
             },
             Bays = [1.6, 1.6],
             Posts = new PostSet

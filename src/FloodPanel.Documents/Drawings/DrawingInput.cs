@@ -19,6 +19,9 @@ public sealed record DrawingInput(
 
     internal int LogCount => Barrier.Logs.TotalCount;
 
+    /// <summary>Height above the sill of each joint of the stack, from 0 to the top of the barrier [m].</summary>
+    internal double[] LogEdges => [0, .. Result.Cases[0].Logs.Where(log => log.Bay == 1).Select(log => log.Top)];
+
     internal double Rake => double.DegreesToRadians(Opening.RakeDegrees);
 
     /// <summary>Design flood level above the sill [m].</summary>

@@ -35,11 +35,12 @@ internal static class ElevationBarrier
     public static void DrawNumbers(Sketch sketch, DrawingInput input, ElevationLayout layout)
     {
         var view = layout.Projection;
-        var pitch = (view.SillY - layout.Shown(input.Result.BarrierHeight)) / input.LogCount;
+        var edges = EdgesOf(input, view.SillY, layout.Shown(input.Result.BarrierHeight));
+        var pitch = edges.Zip(edges.Skip(1), (low, high) => low - high).Min();
         var size = Math.Min(sketch.Sheet.SmallText, 0.92 * sketch.Sheet.TextSize);
         var widest = Sketch.Width(input.LogCount.ToString(CultureInfo.InvariantCulture), size, TextRole.Normal);
         var bays = ElevationBays.Of(input);
-        var (low, high) = (view.SillY - 0.5 * size, view.SillY - input.LogCount * pitch + 0.5 * size);
+        var (low, high) = (view.SillY - 0.5 * size, edges[^1] + 0.5 * size);
         foreach (var (left, width) in Shown(bays.Count, view.Cut).Select(bay => bays[bay]))
         {
             if (width * view.PerMetre < widest + 0.8)
@@ -49,7 +50,7 @@ internal static class ElevationBarrier
 
             foreach (var number in Numbered(input.LogCount, pitch, 1.25 * size))
             {
-                var y = Math.Clamp(view.SillY - (number - 0.5) * pitch, Math.Min(high, low), low) + 0.33 * size;
+                var y = Math.Clamp((edges[number - 1] + edges[number]) / 2, Math.Min(high, low), low) + 0.33 * size;
                 sketch.Add(new Text(
                     number.ToString(CultureInfo.InvariantCulture), new(view.X(left + width / 2), y), size,
                     TextAnchor.Middle, TextRole.Normal));
@@ -69,16 +70,16 @@ internal static class ElevationBarrier
         Sketch sketch, DrawingInput input, Projection view, (double Left, double Width) bay, int number, double top)
     {
         var (left, right) = (view.X(bay.Left), view.X(bay.Left + bay.Width));
-        var pitch = (view.SillY - top) / input.LogCount;
+        var edges = EdgesOf(input, view.SillY, top);
+        var pitch = edges.Zip(edges.Skip(1), (low, high) => low - high).Min();
         if (pitch >= LeastLog)
         {
             for (var log = 1; log <= input.LogCount; log++)
             {
-                var bottom = view.SillY - (log - 1) * pitch;
                 sketch.Add(new Mark(
                     MarkKind.Log, FormattableString.Invariant($"Log {log}, bay {number}"), null,
                     FormattableString.Invariant($"bay-{number}-log-{log}"),
-                    [Sketch.Box(left, bottom - pitch, right, bottom, FillRole.Log, LineRole.Edge)]));
+                    [Sketch.Box(left, edges[log], right, edges[log - 1], FillRole.Log, LineRole.Edge)]));
             }
         }
         else
@@ -87,12 +88,16 @@ internal static class ElevationBarrier
             var every = (int)Math.Ceiling(0.5 / pitch);
             sketch.Add(new Hatch(
                 [.. Enumerable.Range(1, input.LogCount - 1).Where(i => i % every == 0)
-                    .Select(i => new Segment(new(left, view.SillY - i * pitch), new(right, view.SillY - i * pitch)))],
+                    .Select(i => new Segment(new(left, edges[i]), new(right, edges[i])))],
                 LineRole.Hatch));
         }
 
         sketch.Add(Sketch.Box(left, top, right, view.SillY, null, LineRole.Outline));
     }
+
+    /// <summary>Sheet y of each joint, from the sill to the top of the barrier.</summary>
+    private static double[] EdgesOf(DrawingInput input, double sill, double top) =>
+        [.. input.LogEdges.Select(z => sill - z / input.Result.BarrierHeight * (sill - top))];
 
     private static Mark Guide(string side, double left, double top, double right, double bottom) => new(
         MarkKind.Guide, $"Guide, {side}", null, $"guide-{side}",

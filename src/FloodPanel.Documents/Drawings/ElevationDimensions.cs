@@ -98,12 +98,20 @@ internal static class ElevationDimensions
     internal static string[] StackFigures(DrawingInput input)
     {
         var height = input.Length(input.Result.BarrierHeight);
-        var logHeight = input.Library.Find(input.Barrier.Logs.Profile)?.Height;
-        var count = FormattableString.Invariant($"{input.LogCount}");
-        return logHeight is { } one
-            ? input.Opening.RakeDegrees == 0
-                ? [$"{count} × {input.Size(one)} = {height}", $"{count} × {input.Size(one)}", height]
-                : [$"{count} × {input.Size(one)}, {height} high", height]
-            : [height];
+        var parts = new List<string>();
+        foreach (var group in input.Barrier.Logs.Groups)
+        {
+            if (input.Library.Find(group.Profile)?.Height is not { } one)
+            {
+                return [height];
+            }
+
+            parts.Add(FormattableString.Invariant($"{group.Count} × {input.Size(one)}"));
+        }
+
+        var stack = string.Join(" + ", parts);
+        return input.Opening.RakeDegrees == 0
+            ? [$"{stack} = {height}", stack, height]
+            : [$"{stack}, {height} high", height];
     }
 }

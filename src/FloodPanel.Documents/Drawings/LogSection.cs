@@ -15,26 +15,20 @@ internal sealed class LogSection
 
     private readonly double sin;
     private readonly double cos;
-    private readonly Profile? profile;
-    private readonly MaterialFamily family;
-    private readonly double pitch;
-    private readonly int count;
+    private readonly OneLog[] logs;
 
     public LogSection(DrawingInput input)
     {
         (sin, cos) = Math.SinCos(input.Rake);
-        profile = input.Library.Find(input.Barrier.Logs.Profile);
-        family = input.Library.Find(input.Barrier.Logs.Material)?.Family ?? MaterialFamily.Aluminium;
-        count = input.LogCount;
         SlopeLength = input.Result.BarrierHeight / cos;
-        pitch = SlopeLength / count;
-        Depth = profile?.Depth ?? UnknownDepth;
+        logs = LogsOf(input, cos);
+        Depth = logs.Max(log => log.Depth);
         PostDepth = input.Barrier.Posts is { } posts && input.Barrier.Bays.Count > 1
             ? input.Library.Find(posts.Profile)?.Depth
             : null;
     }
 
-    /// <summary>Size of a log in the direction of the water [m].</summary>
+    /// <summary>Size of the deepest log in the direction of the water [m].</summary>
     public double Depth { get; }
 
     /// <summary>Size of a post in the direction of the water [m]; null without posts.</summary>
@@ -57,11 +51,11 @@ internal sealed class LogSection
     /// <summary>The logs from the sill upward.</summary>
     public IEnumerable<Mark> Logs(Projection view)
     {
-        for (var log = 1; log <= count; log++)
+        for (var log = 1; log <= logs.Length; log++)
         {
             yield return new Mark(
                 MarkKind.Log, FormattableString.Invariant($"Log {log}"), null, FormattableString.Invariant($"log-{log}"),
-                [.. One(view, (log - 1) * pitch)]);
+                [.. One(view, logs[log - 1])]);
         }
     }
 
@@ -69,18 +63,34 @@ internal sealed class LogSection
     public Polygon? Post(Projection view) =>
         PostDepth is null ? null : Box(view, 0, SlopeLength, -PostOverhang, Depth + PostOverhang, null, LineRole.Hidden);
 
-    private IEnumerable<Shape> One(Projection view, double from)
+    private static OneLog[] LogsOf(DrawingInput input, double cos)
     {
-        var high = pitch * view.PerMetre;
-        var edge = high >= 1.2 ? LineRole.Edge : LineRole.Hatch;
-        if (profile is ISection i && high >= 2)
+        var (edges, logs) = (input.LogEdges, new List<OneLog>());
+        foreach (var group in input.Barrier.Logs.Groups)
         {
-            yield return ISectionOutline(view, from, i);
+            var profile = input.Library.Find(group.Profile);
+            var family = input.Library.Find(group.Material)?.Family ?? MaterialFamily.Aluminium;
+            for (var i = 0; i < group.Count; i++)
+            {
+                logs.Add(new(edges[logs.Count] / cos, edges[logs.Count + 1] / cos, profile?.Depth ?? UnknownDepth, profile, family));
+            }
+        }
+
+        return [.. logs];
+    }
+
+    private IEnumerable<Shape> One(Projection view, OneLog log)
+    {
+        var high = log.Pitch * view.PerMetre;
+        var edge = high >= 1.2 ? LineRole.Edge : LineRole.Hatch;
+        if (log.Profile is ISection i && high >= 2)
+        {
+            yield return ISectionOutline(view, log, i);
             yield break;
         }
 
-        var holes = high >= 2 ? Holes(view, from).ToArray() : [];
-        var body = Box(view, from, from + pitch, 0, Depth, holes.Length > 0 ? FillRole.Post : FillRole.Log, edge);
+        var holes = high >= 2 ? Holes(view, log).ToArray() : [];
+        var body = Box(view, log.From, log.To, 0, log.Depth, holes.Length > 0 ? FillRole.Post : FillRole.Log, edge);
         yield return body;
         foreach (var hole in holes)
         {
@@ -89,13 +99,13 @@ internal sealed class LogSection
 
         if (holes.Length == 0 && high >= 1.2)
         {
-            yield return Hatching.Cut(family, body.Points);
+            yield return Hatching.Cut(log.Family, body.Points);
         }
     }
 
-    private IEnumerable<Polygon> Holes(Projection view, double from)
+    private IEnumerable<Polygon> Holes(Projection view, OneLog log)
     {
-        var (face, web, webs) = profile switch
+        var (face, web, webs) = log.Profile switch
         {
             HollowRectangle hollow => (hollow.Face, hollow.Web, hollow.Webs),
             RectangularTube tube => (tube.Wall, tube.Wall, 2),
@@ -103,29 +113,29 @@ internal sealed class LogSection
         };
         var least = LeastWall / view.PerMetre;
         (face, web) = (Math.Max(face, least), Math.Max(web, least));
-        var hole = webs < 2 ? 0 : (pitch - webs * web) / (webs - 1);
-        if (hole * view.PerMetre < 0.3 || (Depth - 2 * face) * view.PerMetre < 0.3)
+        var hole = webs < 2 ? 0 : (log.Pitch - webs * web) / (webs - 1);
+        if (hole * view.PerMetre < 0.3 || (log.Depth - 2 * face) * view.PerMetre < 0.3)
         {
             yield break;
         }
 
         for (var k = 0; k < webs - 1; k++)
         {
-            var start = from + web + k * (hole + web);
-            yield return Box(view, start, start + hole, face, Depth - face, FillRole.Paper, null);
+            var start = log.From + web + k * (hole + web);
+            yield return Box(view, start, start + hole, face, log.Depth - face, FillRole.Paper, null);
         }
     }
 
     /// <summary>Web along the load, flanges at the wet and the dry face.</summary>
-    private Polygon ISectionOutline(Projection view, double from, ISection section)
+    private Polygon ISectionOutline(Projection view, OneLog log, ISection section)
     {
-        var (low, high) = (from, from + pitch);
-        var (webLow, webHigh) = (from + (pitch - section.Web) / 2, from + (pitch + section.Web) / 2);
-        var (wet, dry) = (section.Flange, Depth - section.Flange);
+        var (low, high, depth) = (log.From, log.To, log.Depth);
+        var (webLow, webHigh) = ((low + high - section.Web) / 2, (low + high + section.Web) / 2);
+        var (wet, dry) = (section.Flange, depth - section.Flange);
         (double S, double N)[] corners =
         [
             (low, 0), (high, 0), (high, wet), (webHigh, wet), (webHigh, dry), (high, dry),
-            (high, Depth), (low, Depth), (low, dry), (webLow, dry), (webLow, wet), (low, wet),
+            (high, depth), (low, depth), (low, dry), (webLow, dry), (webLow, wet), (low, wet),
         ];
         return new Polygon([.. corners.Select(c => At(view, c.S, c.N))], FillRole.Post, LineRole.Edge);
     }
@@ -133,4 +143,10 @@ internal sealed class LogSection
     private Polygon Box(
         Projection view, double low, double high, double wet, double dry, FillRole? fill, LineRole? outline) =>
         new([At(view, low, wet), At(view, high, wet), At(view, high, dry), At(view, low, dry)], fill, outline);
+
+    /// <summary>One log: from and to along the slope, its depth, profile and material.</summary>
+    private sealed record OneLog(double From, double To, double Depth, Profile? Profile, MaterialFamily Family)
+    {
+        public double Pitch => To - From;
+    }
 }

@@ -28,9 +28,9 @@ internal static class PartsTable
     private static IEnumerable<IReadOnlyList<string>> Rows(
         OpeningResult opening, Library library, UnitSystem units, Dimension cutting)
     {
-        var height = library.Find(opening.Opening.Barrier.Logs.Profile)?.Height;
         var alike = opening.Schedule.GroupBy(row => (
             row.Count,
+            Height: HeightOf(opening, row, library),
             Length: Units.FormatNumber(row.CuttingLength, cutting, units),
             Mass: Units.FormatNumber(row.Mass, Dimension.Mass, units)));
         var isFirst = true;
@@ -41,13 +41,30 @@ internal static class PartsTable
                 isFirst ? opening.Opening.Name : "",
                 Bays([.. group.Select(row => row.Bay)]),
                 group.Key.Count.ToString(CultureInfo.InvariantCulture),
-                height is { } known ? Plain(Units.FormatNumber(known, Dimension.SectionLength, units)) : "–",
+                group.Key.Height is { } known ? Plain(Units.FormatNumber(known, Dimension.SectionLength, units)) : "–",
                 group.Key.Length,
                 group.Key.Mass,
                 isFirst ? Posts(opening.Opening.Barrier.Bays.Count - 1) : "",
             ];
             isFirst = false;
         }
+    }
+
+    /// <summary>Height of the logs of a row [m]; null where the library does not hold their profile.</summary>
+    private static double? HeightOf(OpeningResult opening, LogSchedule row, Library library)
+    {
+        var first = 1;
+        foreach (var group in opening.Opening.Barrier.Logs.Groups)
+        {
+            if (first == row.FirstLog)
+            {
+                return library.Find(group.Profile)?.Height;
+            }
+
+            first += group.Count;
+        }
+
+        return null;
     }
 
     private static string Posts(int count) => count == 0 ? "none" : count.ToString(CultureInfo.InvariantCulture);

@@ -29,6 +29,7 @@ internal static class Barriers
         from endBearing in Numbers.From(0.02, 0.04)
         from clearance in Numbers.From(0, 0.015)
         from limit in Gen.Choose(100, 500)
+        from below in Below
         select new LogStack
         {
             Material = material,
@@ -37,7 +38,20 @@ internal static class Barriers
             EndBearing = endBearing,
             FittingClearance = clearance,
             DeflectionLimit = limit,
+            Below = below,
         };
+
+    /// <summary>Mostly none; else one or two groups of other logs beneath.</summary>
+    private static Gen<ValueList<LogGroup>> Below =>
+        from kind in Gen.Choose(0, 5)
+        from groups in Group.ArrayOf(kind < 4 ? 0 : kind - 3)
+        select groups.ToValueList();
+
+    private static Gen<LogGroup> Group =>
+        from material in Members.Material
+        from profile in Members.Profile
+        from count in Gen.Choose(1, 3)
+        select new LogGroup { Material = material, Profile = profile, Count = count };
 
     private static Gen<PostSet> Posts =>
         from material in Members.Material

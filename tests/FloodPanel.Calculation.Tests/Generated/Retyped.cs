@@ -48,6 +48,7 @@ internal sealed class Retyped(UnitSystem system)
         {
             Material = Of((Material)barrier.Logs.Material),
             Profile = Of((Profile)barrier.Logs.Profile),
+            Below = barrier.Logs.Below.Select(g => g with { Material = Of((Material)g.Material), Profile = Of((Profile)g.Profile) }).ToValueList(),
             EndBearing = Read(barrier.Logs.EndBearing, Fields.EndBearing),
             FittingClearance = Read(barrier.Logs.FittingClearance, Fields.FittingClearance),
         },

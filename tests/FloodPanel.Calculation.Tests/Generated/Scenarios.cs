@@ -109,5 +109,5 @@ public static class Scenarios
     private static double Height(Opening opening) => Height(opening.Barrier, opening.RakeDegrees);
 
     private static double Height(Barrier barrier, double rake) =>
-        barrier.Logs.Count * ((Profile)barrier.Logs.Profile).Height * Math.Cos(double.DegreesToRadians(rake));
+        barrier.Logs.Groups.Sum(group => group.Count * ((Profile)group.Profile).Height) * Math.Cos(double.DegreesToRadians(rake));
 }

@@ -183,11 +183,12 @@ public class RefusalTests
         [
             "ownBasis", "leakage", "strengths", "openings", "levels", "wall", "actions", "flow", "wave", "debris", "coefficients", "wind", "line", "posts", "byOthers", "groundLevel",
             "protectedSideLevel", "response", "bendingStrength", "shearStrength", "allowableBending", "allowableShear",
+            "below", "ultimateStrength", "weldedYield", "weldedUltimate", "shearModulus", "crossStrength", "crossCompression", "characteristicDensity", "bucklingClass",
         ];
         string[] whole = ["count", "webs", "riskCategory"];
-        string[] emptyAllowed = ["leakage", "strengths", "openings", "levels", "bays", "byOthers", "wall", "actions", "coefficients"];
+        string[] emptyAllowed = ["leakage", "strengths", "openings", "levels", "bays", "byOthers", "below", "wall", "actions", "coefficients"];
         string[] libraryId = ["material", "profile"];
-        string[] words = ["format", "designBasis", "floodZone", "kind", "family", "shape"];
+        string[] words = ["format", "designBasis", "floodZone", "kind", "family", "shape", "bucklingClass", "strengthReference"];
         var name = place.Name;
         return other switch
         {

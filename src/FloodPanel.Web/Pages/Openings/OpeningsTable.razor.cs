@@ -40,7 +40,7 @@ public sealed partial class OpeningsTable
     private static string BarrierOf(Opening opening)
     {
         var barrier = opening.Barrier;
-        var logs = barrier.Logs.Count == 1 ? "1 log" : $"{barrier.Logs.Count} logs";
+        var logs = barrier.Logs.TotalCount == 1 ? "1 log" : $"{barrier.Logs.TotalCount} logs";
         return barrier.Bays.Count switch
         {
             <= 1 => logs,
