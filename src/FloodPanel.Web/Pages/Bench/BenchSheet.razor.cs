@@ -9,6 +9,7 @@ public sealed partial class BenchSheet
     private (DrawingInput?, string?, bool) drawn;
     private MarkupString elevation;
     private MarkupString section;
+    private (string Title, MarkupString Drawing)[] details = [];
     private bool changed;
 
     /// <summary>What to draw.</summary>
@@ -31,6 +32,7 @@ public sealed partial class BenchSheet
         if (!same)
         {
             elevation = new MarkupString(SvgWriter.WriteText(ElevationDrawing.Draw(Input)));
+            details = [.. DetailDrawings.Of(Input).Select(scene => (scene.Title, new MarkupString(SvgWriter.WriteText(scene))))];
         }
 
         if (!same || drawn.Item2 != Case)
