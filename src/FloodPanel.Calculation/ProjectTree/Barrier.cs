@@ -12,6 +12,9 @@ public sealed record Barrier
     /// <summary>The posts between the bays; null when there is one bay.</summary>
     public PostSet? Posts { get; init; }
 
+    /// <summary>The plate under each post; null when there is none to be checked here.</summary>
+    public BasePlateInput? BasePlate { get; init; }
+
     /// <summary>Checks declared to be made by somebody else.</summary>
     public ValueList<DesignedByOthers> ByOthers { get; init; } = [];
 }
