@@ -1,6 +1,7 @@
 using FloodPanel.Calculation.Actions;
 using FloodPanel.Calculation.Actions.Debris;
 using FloodPanel.Calculation.Actions.Waves;
+using FloodPanel.Calculation.Guides;
 using FloodPanel.Calculation.Handling;
 using FloodPanel.Calculation.ProjectTree;
 using FloodPanel.Calculation.Water;
@@ -41,6 +42,11 @@ public static class Cautions
         if (model.Post is { } post)
         {
             Strengths(notes, NeededChecks.Posts, post);
+        }
+
+        if (opening.Barrier.Guides is { } guides)
+        {
+            notes.AddRange(GuideNotes.Of(opening, guides));
         }
 
         Declarations(notes, opening);

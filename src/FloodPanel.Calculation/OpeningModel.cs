@@ -48,6 +48,7 @@ public sealed class OpeningModel
             PostWidth = posts.Width;
         }
 
+        GuideMaterial = opening.Barrier.Guides is { } guides ? library.Find(guides.Material) : null;
         var groundDepth = FloodLevels.Depth(site.DesignFloodLevel, opening.GroundLevel ?? opening.SillLevel);
         Wave = WaveModel.Of(opening.Actions.Wave, UnitWeight, RetainedDepth, groundDepth, Height);
         Debris = DebrisModel.Of(
@@ -127,6 +128,9 @@ public sealed class OpeningModel
 
     /// <summary>Width of a post across the opening [m].</summary>
     public double PostWidth { get; }
+
+    /// <summary>What the guides are made of; null where none are entered.</summary>
+    public Material? GuideMaterial { get; }
 
     /// <summary>Number of posts [-].</summary>
     public int PostCount => Bays.Count - 1;

@@ -126,6 +126,7 @@ internal static class Example
                 Width = 0.1,
                 DeflectionLimit = 120,
             },
+            Guides = Guides,
             ByOthers = [new DesignedByOthers("anchors", "N. Lund", "A-12")],
         },
         Leakage = new LeakageInput
@@ -138,6 +139,34 @@ internal static class Example
             SumpVolume = 0.12,
             PumpMargin = 2,
             BackFlowClosed = true,
+        },
+    };
+
+    private static GuideSet Guides => new()
+    {
+        Mounting = GuideMounting.DryFace,
+        Material = new LibraryMaterial("s275"),
+        LipThickness = 0.007,
+        LipLever = 0.025,
+        BaseThickness = 0.009,
+        LoadOffset = 0.035,
+        BearingDistance = 0.045,
+        BearingWidth = 0.022,
+        WallBearing = 4.5e6,
+        WallBearingSource = "EN 1996-1-1",
+        Fasteners = new GuideFasteners
+        {
+            Pitch = 0.3,
+            EndDistance = 0.12,
+            EdgeDistance = 0.11,
+            HoleDiameter = 0.013,
+            ValuesFor = DesignBasisKind.Eurocode,
+            Tension = 4200,
+            Shear = 5100,
+            MinimumEdge = 0.1,
+            MinimumSpacing = 0.15,
+            InteractionLimit = 1.1,
+            Source = "Pull tests of March",
         },
     };
 

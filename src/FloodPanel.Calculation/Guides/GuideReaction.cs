@@ -88,7 +88,7 @@ public static class GuideReaction
     }
 
     /// <summary>The log that presses hardest on the guide, from 0; −1 where none presses towards the protected side.</summary>
-    private static int PeakLog(
+    internal static int PeakLog(
         ReadOnlySpan<FactoredLoad> logLoads, double tributary, ReadOnlySpan<double> logHeights, GuideImpact impact)
     {
         var (peak, greatest) = (-1, 0.0);

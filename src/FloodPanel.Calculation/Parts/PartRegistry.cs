@@ -1,4 +1,5 @@
 using FloodPanel.Calculation.Cases;
+using FloodPanel.Calculation.Guides;
 
 namespace FloodPanel.Calculation.Parts;
 
@@ -16,10 +17,10 @@ internal static class PartRegistry
     [
         NotEntered(NeededChecks.BasePlates, model => model.Post is not null, new(
             $"The base plates of the posts have no inputs: enter a base plate, or declare it designed by others.")),
-        NotEntered(NeededChecks.Anchors, _ => true, new(
-            $"The anchors have no inputs: enter them, or declare them designed by others.")),
-        NotEntered(NeededChecks.Guides, _ => true, new(
-            $"The guides have no inputs: enter their mounting and dimensions, or declare them designed by others.")),
+        NotEntered(NeededChecks.Anchors, model => model.Post is not null, new(
+            $"The anchors of the base plates have no inputs: enter them, or declare them designed by others.")),
+        new(FastenerReport.Of, FastenerReport.Gaps),
+        new(GuideReport.Of, GuideReport.Gaps),
         NotEntered(NeededChecks.SupportingWall, _ => true, new(
             $"The wall behind has no resistance entered: enter it with its source, or declare it designed by others.")),
     ];

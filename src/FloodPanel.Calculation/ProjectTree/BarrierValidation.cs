@@ -31,6 +31,7 @@ internal static class BarrierValidation
             Posts(barrier, posts, $"{path}.posts", problems, library);
         }
 
+        GuideValidation.Validate(barrier, path, problems, library);
         ByOthers(barrier, path, problems);
     }
 

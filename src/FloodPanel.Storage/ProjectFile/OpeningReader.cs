@@ -44,11 +44,11 @@ internal static class OpeningReader
             Logs = barrier.NeededObject("logs") is { } logs ? ReadLogs(logs) : new LogStack(),
             Bays = (barrier.Need("bays", "a list of clear widths")?.AsList() ?? []).Select(b => b.AsNumber()).ToValueList(),
             Posts = barrier.Object("posts") is { } posts ? ReadPosts(posts) : null,
+            Guides = barrier.Object("guides") is { } guides ? GuideFile.Read(guides) : null,
             ByOthers = barrier.List("byOthers").Select(ReadByOthers).ToValueList(),
         };
         barrier.NotHeldYet("basePlate", "base plates");
         barrier.NotHeldYet("anchors", "anchors");
-        barrier.NotHeldYet("guides", "guides");
         barrier.NotHeldYet("footing", "footings");
         barrier.Close();
         return read;

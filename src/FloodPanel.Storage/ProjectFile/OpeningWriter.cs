@@ -58,6 +58,7 @@ internal static class OpeningWriter
 
         json.WriteEndArray();
         WritePosts(json, barrier.Posts);
+        GuideFile.Write(json, barrier.Guides);
         json.WriteStartArray("byOthers");
         foreach (var declared in barrier.ByOthers)
         {

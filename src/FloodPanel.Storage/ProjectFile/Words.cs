@@ -46,6 +46,11 @@ internal static class FileWords
         ("timber-frame", WallKind.TimberFrame),
         ("steel-frame", WallKind.SteelFrame));
 
+    public static readonly Words<GuideMounting> Mounting = new(
+        ("wet-face", GuideMounting.WetFace),
+        ("dry-face", GuideMounting.DryFace),
+        ("reveal", GuideMounting.Reveal));
+
     public static readonly Words<LeakConvention> Leak = new(
         ("width", LeakConvention.Width),
         ("seal", LeakConvention.Seal));

@@ -14,11 +14,13 @@ internal static class Barriers
         from areAlike in Gen.Elements(false, true)
         from posts in Posts
         from byOthers in ByOthers
+        from guides in GuideSets.Of(logs)
         select new Barrier
         {
             Logs = logs,
             Bays = areAlike ? Enumerable.Repeat(bays[0], bayCount).ToValueList() : bays.ToValueList(),
             Posts = bayCount > 1 ? posts : null,
+            Guides = guides,
             ByOthers = byOthers,
         };
 

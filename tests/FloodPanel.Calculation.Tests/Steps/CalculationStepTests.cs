@@ -43,6 +43,7 @@ public class CalculationStepTests
         var workings = result.Cases.SelectMany(c => c.Logs.Select(l => l.LineLoadWorking)
                 .Concat(c.Actions.Select(a => a.Working))
                 .Concat(c.Guides.Select(g => g.Working))
+                .Concat(c.Parts.SelectMany(p => p.Workings))
                 .Append(c.ResultantWorking))
             .Concat(result.Schedule.Select(s => s.Working))
             .Append(result.Levels);
@@ -51,8 +52,8 @@ public class CalculationStepTests
     }
 
     private static IEnumerable<Check> Checks(OpeningResult result) => result.Cases
-        .SelectMany(c => c.Logs.SelectMany(l => new[] { l.BendingCheck, l.ShearCheck, l.DeflectionCheck })
-            .Concat(c.Posts.SelectMany(p => new[] { p.BendingCheck, p.ShearCheck, p.DeflectionCheck })))
-        .OfType<Check>()
+        .SelectMany(c => c.Logs.SelectMany(l => l.Checks)
+            .Concat(c.Posts.SelectMany(p => p.Checks))
+            .Concat(c.Parts.SelectMany(p => p.Checks)))
         .Append(result.Freeboard);
 }

@@ -61,6 +61,11 @@ public class RefusalTests
     [InlineData("openings[0].barrier.posts.material.density")]
     [InlineData("openings[0].barrier.posts.material.elasticModulus")]
     [InlineData("openings[0].barrier.posts.profile.shape")]
+    [InlineData("openings[0].barrier.guides.material")]
+    [InlineData("openings[0].barrier.guides.lipThickness")]
+    [InlineData("openings[0].barrier.guides.bearingDistance")]
+    [InlineData("openings[0].barrier.guides.fasteners")]
+    [InlineData("openings[0].barrier.guides.fasteners.pitch")]
     [InlineData("openings[0].actions.flow.velocity")]
     [InlineData("openings[0].actions.line.force")]
     public void Read_RequiredFieldMissing_IsNamed(string path)
@@ -77,7 +82,6 @@ public class RefusalTests
     [Theory]
     [InlineData("basePlate", "openings[0].barrier.basePlate: The value is an object; allowed is null, because this version does not hold base plates yet.")]
     [InlineData("anchors", "openings[0].barrier.anchors: The value is an object; allowed is null, because this version does not hold anchors yet.")]
-    [InlineData("guides", "openings[0].barrier.guides: The value is an object; allowed is null, because this version does not hold guides yet.")]
     [InlineData("footing", "openings[0].barrier.footing: The value is an object; allowed is null, because this version does not hold footings yet.")]
     public void Read_PartNotHeldYet_IsRefused(string name, string expected)
     {
@@ -184,11 +188,12 @@ public class RefusalTests
             "ownBasis", "leakage", "strengths", "openings", "levels", "wall", "actions", "flow", "wave", "debris", "coefficients", "wind", "line", "posts", "byOthers", "groundLevel",
             "protectedSideLevel", "response", "bendingStrength", "shearStrength", "allowableBending", "allowableShear",
             "below", "ultimateStrength", "weldedYield", "weldedUltimate", "shearModulus", "crossStrength", "crossCompression", "characteristicDensity", "bucklingClass",
+            "guides", "wallBearing", "tension", "shear", "minimumEdge", "minimumSpacing",
         ];
         string[] whole = ["count", "webs", "riskCategory"];
         string[] emptyAllowed = ["leakage", "strengths", "openings", "levels", "bays", "byOthers", "below", "wall", "actions", "coefficients"];
         string[] libraryId = ["material", "profile"];
-        string[] words = ["format", "designBasis", "floodZone", "kind", "family", "shape", "bucklingClass", "strengthReference"];
+        string[] words = ["format", "designBasis", "floodZone", "kind", "family", "shape", "bucklingClass", "strengthReference", "mounting", "valuesFor"];
         var name = place.Name;
         return other switch
         {

@@ -1,0 +1,39 @@
+using FloodPanel.Calculation.ProjectTree;
+
+namespace FloodPanel.Calculation.Tests.Guides;
+
+public class GuideNotesTests
+{
+    [Theory]
+    [InlineData(WallKind.ReinforcedConcrete, null)]
+    [InlineData(WallKind.Masonry, "guide-fasteners-masonry")]
+    [InlineData(WallKind.CavityMasonry, "guide-fasteners-masonry")]
+    [InlineData(WallKind.TimberFrame, "guide-fasteners-frame")]
+    [InlineData(WallKind.SteelFrame, "guide-fasteners-frame")]
+    public void Notes_GuidesOnAWall_WarnOfItsFasteners(WallKind wall, string? code) => Assert.Equal(
+        code is null ? [] : [code],
+        Codes(Refused.With((Opening o) => o with { Wall = wall, Barrier = o.Barrier with { Guides = SampleGuides.Reveal } })));
+
+    [Fact]
+    public void Notes_NoGuides_NothingAboutThem() =>
+        Assert.Empty(Codes(Refused.With((Opening o) => o with { Wall = WallKind.Masonry })));
+
+    /// <summary>End bearing 40 mm.</summary>
+    [Theory]
+    [InlineData(0, false)]
+    [InlineData(0.0199, true)]
+    [InlineData(0.02, false)]
+    public void Notes_LipLever_LessThanHalfOfTheEndBearing(double lever, bool noted) => Assert.Equal(
+        noted ? ["guide-lip-lever"] : [], Codes(SampleGuides.With(SampleGuides.Reveal with { LipLever = lever })));
+
+    /// <summary>Strip 40 mm from the fasteners.</summary>
+    [Theory]
+    [InlineData(0.04, true)]
+    [InlineData(0.041, false)]
+    public void Notes_WetFace_FastenersUnloadedWhileNothingTips(double offset, bool noted) => Assert.Equal(
+        noted ? ["guide-wet-face"] : [],
+        Codes(SampleGuides.With(SampleGuides.Reveal with { Mounting = GuideMounting.WetFace, LoadOffset = offset })));
+
+    private static IEnumerable<string> Codes(Project project) => SampleProject.Result(project).Notes
+        .Select(note => note.Code).Where(code => code.StartsWith("guide-", StringComparison.Ordinal));
+}
