@@ -8,7 +8,7 @@ namespace FloodPanel.Calculation;
 
 /// <summary>
 /// One load case of an opening in numbers only, without working. The same object may be filled again and again
-/// for models with the same counts of logs and bays; filling it allocates nothing.
+/// for models with the same counts of logs and bays; filling it allocates nothing, a post with a raker excepted.
 /// </summary>
 public sealed class CaseEvaluation
 {
@@ -60,9 +60,7 @@ public sealed class CaseEvaluation
         FillLogs(model, kind);
         for (var post = 0; post < posts.Length; post++)
         {
-            posts[post] = Cantilever.Respond(
-                Diagram, model.Post!, model.PostTributary(post), model.FaceLength, model.CosRake,
-                CaseForces.OnPost(model, kind, post), CaseForces.JudgesDeflection(kind));
+            posts[post] = Post(model, kind, post);
         }
 
         LeftGuide = Guide(model, kind, 0);
@@ -101,6 +99,14 @@ public sealed class CaseEvaluation
                     logLoads[index], span, model.LogMember(index), CaseForces.OnLog(model, kind, bay, index), judgesDeflection);
             }
         }
+    }
+
+    private PostResponse Post(OpeningModel model, CaseKind kind, int post)
+    {
+        var (force, judged) = (CaseForces.OnPost(model, kind, post), CaseForces.JudgesDeflection(kind));
+        return model.Raker is null
+            ? Cantilever.Respond(Diagram, model.Post!, model.PostTributary(post), model.FaceLength, model.CosRake, force, judged)
+            : PropResponse.Respond(model, Diagram, post, force, judged);
     }
 
     private GuideResponse Guide(OpeningModel model, CaseKind kind, int bay) => GuideReaction.Of(

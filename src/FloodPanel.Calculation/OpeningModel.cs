@@ -2,6 +2,7 @@ using FloodPanel.Calculation.Actions;
 using FloodPanel.Calculation.Actions.Debris;
 using FloodPanel.Calculation.Actions.Waves;
 using FloodPanel.Calculation.Cases;
+using FloodPanel.Calculation.Posts;
 using FloodPanel.Calculation.ProjectTree;
 using FloodPanel.Calculation.Water;
 
@@ -46,6 +47,7 @@ public sealed class OpeningModel
         {
             Post = Member.Of(posts.Material, posts.Profile, posts.DeflectionLimit, basis, library);
             PostWidth = posts.Width;
+            Raker = posts.Raker is { } raker ? RakerModel.Of(raker, Rake, basis, library) : null;
         }
 
         GuideMaterial = opening.Barrier.Guides is { } guides ? library.Find(guides.Material) : null;
@@ -125,6 +127,9 @@ public sealed class OpeningModel
 
     /// <summary>The posts; null when there is one bay.</summary>
     public Member? Post { get; }
+
+    /// <summary>The raker of each post; null when there is none.</summary>
+    public RakerModel? Raker { get; }
 
     /// <summary>Width of a post across the opening [m].</summary>
     public double PostWidth { get; }

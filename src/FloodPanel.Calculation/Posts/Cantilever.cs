@@ -5,12 +5,29 @@ namespace FloodPanel.Calculation.Posts;
 /// <summary>What a post feels and how far that goes towards what it may carry.</summary>
 /// <param name="BaseShear">V, design shear at the base [N], normal to the face.</param>
 /// <param name="BaseMoment">M, design moment at the base [N·m].</param>
-/// <param name="TipDeflection">δ, unfactored deflection of the tip [m].</param>
+/// <param name="TipDeflection">δ, unfactored deflection of the tip [m]; with a raker, the greatest along the post.</param>
 /// <param name="Bending">Utilisation in bending [-]; 0 when the stress is missing, see <see cref="Member.IsComplete"/>.</param>
 /// <param name="ShearUse">Utilisation in shear [-]; 0 when the stress is missing.</param>
 /// <param name="DeflectionUse">Utilisation of the deflection limit [-]; 0 when deflection is not judged.</param>
+/// <param name="Prop">What a raker takes and leaves; null where there is none.</param>
 public readonly record struct PostResponse(
-    double BaseShear, double BaseMoment, double TipDeflection, double Bending, double ShearUse, double DeflectionUse);
+    double BaseShear,
+    double BaseMoment,
+    double TipDeflection,
+    double Bending,
+    double ShearUse,
+    double DeflectionUse,
+    PropResponse? Prop = null)
+{
+    /// <summary>M, greatest design moment in the post [N·m]: at the base of a cantilever.</summary>
+    public double PeakMoment => Prop?.PeakMoment ?? BaseMoment;
+
+    /// <summary>V, greatest design shear force in the post [N]: at the base of a cantilever.</summary>
+    public double PeakShear => Prop?.PeakShear ?? BaseShear;
+
+    /// <summary>Design uplift on the base along the post [N], ≥ 0; 0 without a raker.</summary>
+    public double Uplift => Prop?.Uplift ?? 0;
+}
 
 /// <summary>
 /// A post fixed at its base and free at its top, loaded by the pressure diagram over a tributary width and by a force.

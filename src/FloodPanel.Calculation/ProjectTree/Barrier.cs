@@ -86,6 +86,12 @@ public sealed record PostSet
 
     /// <summary>n in the deflection limit post length / n [-], > 0.</summary>
     public double DeflectionLimit { get; init; } = 100;
+
+    /// <summary>True when a post of aluminium is welded at its base, where it then has the strength beside a weld only.</summary>
+    public bool WeldedBase { get; init; }
+
+    /// <summary>A strut on the dry side of each post; null when there is none.</summary>
+    public RakerInput? Raker { get; init; }
 }
 
 /// <summary>A needed check that somebody else makes.</summary>

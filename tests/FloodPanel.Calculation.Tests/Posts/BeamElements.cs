@@ -42,7 +42,7 @@ internal static class BeamElements
         return (moved[2 * count - 2], -atBase[0], -atBase[1]);
     }
 
-    private static Matrix<double> ElementStiffness(double l) => Matrix<double>.Build.DenseOfArray(new[,]
+    public static Matrix<double> ElementStiffness(double l) => Matrix<double>.Build.DenseOfArray(new[,]
     {
         { 12 / (l * l * l), 6 / (l * l), -12 / (l * l * l), 6 / (l * l) },
         { 6 / (l * l), 4 / l, -6 / (l * l), 2 / l },
@@ -50,7 +50,7 @@ internal static class BeamElements
         { 6 / (l * l), 2 / l, -6 / (l * l), 4 / l },
     });
 
-    private static double[] NodalLoads(Func<double, double> load, double start, double l)
+    public static double[] NodalLoads(Func<double, double> load, double start, double l)
     {
         var loads = new double[4];
         for (var point = 0; point < 3; point++)
