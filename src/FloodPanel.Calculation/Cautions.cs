@@ -4,6 +4,7 @@ using FloodPanel.Calculation.Actions.Waves;
 using FloodPanel.Calculation.Guides;
 using FloodPanel.Calculation.Handling;
 using FloodPanel.Calculation.ProjectTree;
+using FloodPanel.Calculation.Walls;
 using FloodPanel.Calculation.Water;
 
 namespace FloodPanel.Calculation;
@@ -11,12 +12,6 @@ namespace FloodPanel.Calculation;
 /// <summary>Cautions and results not covered, each only where it applies.</summary>
 public static class Cautions
 {
-    /// <summary>USACE, MP SL-85-5 (1985): unreinforced masonry carries about 3 ft (0.9 m) of water.</summary>
-    private const double MasonryDepth = 0.9;
-
-    /// <summary>CLG/Defra (2007): more than 0.6 m of difference may damage standard masonry (secondary source).</summary>
-    private const double CavityMasonryDepth = 0.6;
-
     /// <summary>Printed wherever a result is printed.</summary>
     public static Note CalculationAid { get; } = new("calculation-aid", new(
         $"This is a calculation aid. It must be checked by a licensed engineer and follow local codes. A barrier can fail or be overtopped: people leave when told to."));
@@ -58,7 +53,13 @@ public static class Cautions
 
         Lifting(notes, schedule);
         Floating(notes, holdDowns);
-        Walls(notes, opening, FloodLevels.Depth(site.DesignFloodLevel, Math.Min(opening.SillLevel, opening.GroundLevel ?? opening.SillLevel)));
+        Walls(notes, opening.Wall, WallDepth.Against(site, opening));
+        if (opening.Barrier.Footing is not null)
+        {
+            notes.Add(new("ground-values", new(
+                $"The footing stands on values of the ground that a geotechnical engineer must confirm; drains, scour and passing pipes under it are not in the calculation.")));
+        }
+
         notes.Add(CalculationAid);
         return notes;
     }
@@ -140,25 +141,19 @@ public static class Cautions
         }
     }
 
-    private static void Walls(List<Note> notes, Opening opening, double depth)
+    private static void Walls(List<Note> notes, WallKind wall, double depth)
     {
-        switch (opening.Wall)
+        if (WallDepth.Limit(wall) is { } limit && depth > limit.Depth)
         {
-            case WallKind.Masonry when depth > MasonryDepth:
-                notes.Add(WallNote("an unreinforced masonry wall", depth, MasonryDepth));
-                break;
-            case WallKind.CavityMasonry when depth > CavityMasonryDepth:
-                notes.Add(WallNote("a cavity masonry wall", depth, CavityMasonryDepth));
-                break;
-            case WallKind.TimberFrame or WallKind.SteelFrame when depth > 0:
-                notes.Add(new("wall-depth", new(
-                    $"{Length(depth)} of water stands against a framed wall, which carries less than masonry: have the wall checked before water is held against it.")));
-                break;
+            notes.Add(new("wall-depth", new(
+                $"{Length(depth)} of water stands against {WallDepth.Name(wall)}; about {Length(limit.Depth)} is the published limit without damage. Holding water higher can bring the wall down.")));
+        }
+        else if (wall is WallKind.TimberFrame or WallKind.SteelFrame && depth > 0)
+        {
+            notes.Add(new("wall-depth", new(
+                $"{Length(depth)} of water stands against a framed wall, which carries less than masonry: have the wall checked before water is held against it.")));
         }
     }
-
-    private static Note WallNote(string wall, double depth, double limit) => new("wall-depth", new(
-        $"{Length(depth)} of water stands against {wall}; about {Length(limit)} is the published limit without damage. Holding water higher can bring the wall down."));
 
     private static Quantity Length(double value) => new(value, Dimension.Length);
 

@@ -130,6 +130,7 @@ public static class Validation
         ActionValidation.Validate(opening, path, problems, library);
         BarrierValidation.Validate(opening, path, problems, library);
         ValidateLeakage(opening.Leakage, $"{path}.leakage", problems);
+        FootingValidation.Validate(opening.WallBehind, $"{path}.wall", problems);
     }
 
     private static void ValidateLeakage(LeakageInput? leakage, string path, ProblemList problems)

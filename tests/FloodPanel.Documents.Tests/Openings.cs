@@ -46,6 +46,16 @@ internal static class Openings
                     },
                 },
             }, u),
+        ["footing"] = u => Sample.Input(
+            Sample.Garage with
+            {
+                Barrier = Sample.Garage.Barrier with { Footing = new() { Width = 2.4, Thickness = 0.5, BarrierFromFloodEdge = 1.5, CutOff = 0.8 } },
+            }, u),
+        ["narrow-footing"] = u => Sample.Input(
+            Sample.Garage with
+            {
+                Barrier = Sample.Garage.Barrier with { Footing = new() { Width = 0.4, Thickness = 0.2, BarrierFromFloodEdge = 0.1 } },
+            }, u),
         ["mixed-stack"] = u => Sample.Input(
             Sample.Garage with
             {

@@ -76,6 +76,7 @@ internal static class Example
         RakeDegrees = 12.5,
         ProtectedSideLevel = 11.55,
         Wall = WallKind.CavityMasonry,
+        WallBehind = new WallInput { LineResistance = 12e3, TotalResistance = 9e3, Source = "Drawing W-1" },
         Actions = new ActionSet
         {
             Flow = new FlowInput { Velocity = 1.2, ShapeCoefficient = 1.5 },
@@ -127,6 +128,24 @@ internal static class Example
                 DeflectionLimit = 120,
             },
             Guides = Guides,
+            Footing = new FootingInput
+            {
+                Width = 2.2,
+                Thickness = 0.55,
+                BarrierFromFloodEdge = 1.3,
+                Density = 2350,
+                Friction = 0.45,
+                Adhesion = 2e3,
+                AllowableBearing = 90e3,
+                CutOff = 0.8,
+                Soil = CreepSoil.FineSand,
+                SlidingFactor = 1.4,
+                OverturningFactor = 1.6,
+                FlotationFactor = 1.2,
+                ContactShare = 0.75,
+                CarriesGuides = true,
+                Source = "Report G-2",
+            },
             ByOthers = [new DesignedByOthers("anchors", "N. Lund", "A-12")],
         },
         Leakage = new LeakageInput

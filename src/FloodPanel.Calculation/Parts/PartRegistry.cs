@@ -1,5 +1,7 @@
 using FloodPanel.Calculation.Cases;
+using FloodPanel.Calculation.Footings;
 using FloodPanel.Calculation.Guides;
+using FloodPanel.Calculation.Walls;
 
 namespace FloodPanel.Calculation.Parts;
 
@@ -21,8 +23,8 @@ internal static class PartRegistry
             $"The anchors of the base plates have no inputs: enter them, or declare them designed by others.")),
         new(FastenerReport.Of, FastenerReport.Gaps),
         new(GuideReport.Of, GuideReport.Gaps),
-        NotEntered(NeededChecks.SupportingWall, _ => true, new(
-            $"The wall behind has no resistance entered: enter it with its source, or declare it designed by others.")),
+        new(WallReport.Of, WallReport.Gaps),
+        new(FootingReport.Of, FootingReport.Gaps),
     ];
 
     /// <summary>The parts with their checks under a load case.</summary>

@@ -18,6 +18,9 @@ public sealed record Barrier
     /// <summary>The guides at both ends; null where nobody has entered them.</summary>
     public GuideSet? Guides { get; init; }
 
+    /// <summary>A footing or sill beam under the barrier, or null.</summary>
+    public FootingInput? Footing { get; init; }
+
     /// <summary>Checks declared to be made by somebody else.</summary>
     public ValueList<DesignedByOthers> ByOthers { get; init; } = [];
 }

@@ -32,6 +32,11 @@ internal static class BarrierValidation
         }
 
         GuideValidation.Validate(barrier, path, problems, library);
+        if (barrier.Footing is { } footing)
+        {
+            FootingValidation.Validate(footing, $"{path}.footing", problems);
+        }
+
         ByOthers(barrier, path, problems);
     }
 

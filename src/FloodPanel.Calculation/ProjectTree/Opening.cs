@@ -30,6 +30,9 @@ public sealed record Opening
     /// <summary>What the wall around the opening is made of.</summary>
     public WallKind Wall { get; init; } = WallKind.ReinforcedConcrete;
 
+    /// <summary>How that wall is judged, or null where nobody has said.</summary>
+    public WallInput? WallBehind { get; init; }
+
     /// <summary>The actions to be considered besides still water.</summary>
     public ActionSet Actions { get; init; } = new();
 

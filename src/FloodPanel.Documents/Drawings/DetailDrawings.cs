@@ -4,7 +4,10 @@ namespace FloodPanel.Documents.Drawings;
 public static class DetailDrawings
 {
     // Each draws what it finds inputs for, and nothing else.
-    private static readonly Func<DrawingInput, IEnumerable<Scene>>[] Sources = [];
+    private static readonly Func<DrawingInput, IEnumerable<Scene>>[] Sources =
+    [
+        FootingDrawing.Of,
+    ];
 
     /// <summary>The details of a barrier; a part without inputs has none.</summary>
     /// <param name="input">What to draw.</param>

@@ -21,7 +21,8 @@ internal static class OpeningReader
             ClearHeight = opening.Number("clearHeight"),
             RakeDegrees = opening.Number("rake", blank.RakeDegrees),
             ProtectedSideLevel = opening.NumberOrNull("protectedSideLevel"),
-            Wall = ReadWall(opening.Object("wall"), blank.Wall),
+            Wall = ReadWall(opening.Object("wall"), blank.Wall, out var behind),
+            WallBehind = behind,
             Actions = opening.Object("actions") is { } actions ? ActionReader.Read(actions) : blank.Actions,
             Barrier = opening.NeededObject("barrier") is { } barrier ? ReadBarrier(barrier) : blank.Barrier,
             Leakage = opening.Object("leakage") is { } leakage ? LeakageFile.Read(leakage) : null,
@@ -30,9 +31,18 @@ internal static class OpeningReader
         return read;
     }
 
-    private static WallKind ReadWall(FileObject? wall, WallKind fallback)
+    private static WallKind ReadWall(FileObject? wall, WallKind fallback, out WallInput? behind)
     {
         var kind = wall?.Word("kind", FileWords.Wall, fallback) ?? fallback;
+        behind = wall?.WordOrNull("measure", FileWords.WallMeasure) is { } measure
+            ? new WallInput
+            {
+                Measure = measure,
+                LineResistance = wall.NumberOrNull("lineResistance"),
+                TotalResistance = wall.NumberOrNull("totalResistance"),
+                Source = wall.Text("source", ""),
+            }
+            : null;
         wall?.Close();
         return kind;
     }
@@ -45,11 +55,11 @@ internal static class OpeningReader
             Bays = (barrier.Need("bays", "a list of clear widths")?.AsList() ?? []).Select(b => b.AsNumber()).ToValueList(),
             Posts = barrier.Object("posts") is { } posts ? ReadPosts(posts) : null,
             Guides = barrier.Object("guides") is { } guides ? GuideFile.Read(guides) : null,
+            Footing = barrier.Object("footing") is { } footing ? FootingFile.Read(footing) : null,
             ByOthers = barrier.List("byOthers").Select(ReadByOthers).ToValueList(),
         };
         barrier.NotHeldYet("basePlate", "base plates");
         barrier.NotHeldYet("anchors", "anchors");
-        barrier.NotHeldYet("footing", "footings");
         barrier.Close();
         return read;
     }

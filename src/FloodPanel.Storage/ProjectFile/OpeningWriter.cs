@@ -18,6 +18,14 @@ internal static class OpeningWriter
         json.WriteNumberOrNull("protectedSideLevel", opening.ProtectedSideLevel);
         json.WriteStartObject("wall");
         json.WriteString("kind", FileWords.Wall.Of(opening.Wall));
+        if (opening.WallBehind is { } behind)
+        {
+            json.WriteString("measure", FileWords.WallMeasure.Of(behind.Measure));
+            json.WriteNumberIfAny("lineResistance", behind.LineResistance);
+            json.WriteNumberIfAny("totalResistance", behind.TotalResistance);
+            json.WriteString("source", behind.Source);
+        }
+
         json.WriteEndObject();
         ActionWriter.Write(json, opening.Actions);
         WriteBarrier(json, opening.Barrier);
@@ -59,6 +67,7 @@ internal static class OpeningWriter
         json.WriteEndArray();
         WritePosts(json, barrier.Posts);
         GuideFile.Write(json, barrier.Guides);
+        FootingFile.Write(json, barrier.Footing);
         json.WriteStartArray("byOthers");
         foreach (var declared in barrier.ByOthers)
         {

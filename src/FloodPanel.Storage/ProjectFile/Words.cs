@@ -51,6 +51,24 @@ internal static class FileWords
         ("dry-face", GuideMounting.DryFace),
         ("reveal", GuideMounting.Reveal));
 
+    public static readonly Words<WallMeasure> WallMeasure = new(
+        ("resistance", Calculation.ProjectTree.WallMeasure.Resistance),
+        ("published-depth", Calculation.ProjectTree.WallMeasure.PublishedDepth));
+
+    public static readonly Words<CreepSoil> Soil = new(
+        ("very-fine-sand-or-silt", CreepSoil.VeryFineSandOrSilt),
+        ("fine-sand", CreepSoil.FineSand),
+        ("medium-sand", CreepSoil.MediumSand),
+        ("coarse-sand", CreepSoil.CoarseSand),
+        ("fine-gravel", CreepSoil.FineGravel),
+        ("medium-gravel", CreepSoil.MediumGravel),
+        ("coarse-gravel", CreepSoil.CoarseGravel),
+        ("boulders", CreepSoil.Boulders),
+        ("soft-clay", CreepSoil.SoftClay),
+        ("medium-clay", CreepSoil.MediumClay),
+        ("hard-clay", CreepSoil.HardClay),
+        ("hardpan", CreepSoil.Hardpan));
+
     public static readonly Words<LeakConvention> Leak = new(
         ("width", LeakConvention.Width),
         ("seal", LeakConvention.Seal));

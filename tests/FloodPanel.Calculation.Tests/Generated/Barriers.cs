@@ -15,6 +15,7 @@ internal static class Barriers
         from posts in Posts
         from byOthers in ByOthers
         from guides in GuideSets.Of(logs)
+        from footing in Grounds.Footing
         select new Barrier
         {
             Logs = logs,
@@ -22,6 +23,7 @@ internal static class Barriers
             Posts = bayCount > 1 ? posts : null,
             Guides = guides,
             ByOthers = byOthers,
+            Footing = footing,
         };
 
     private static Gen<LogStack> Logs =>

@@ -52,6 +52,7 @@ public static class Scenarios
         from clearHeight in Numbers.From(0.5, 3, 0.005)
         from rake in Gen.OneOf(Gen.Constant(0.0), Numbers.From(0, 60, 0.5))
         from wall in Gen.Elements(Enum.GetValues<WallKind>())
+        from behind in Grounds.Wall
         from barrier in Barriers.Any
         from actions in Actions(barrier, rake)
         select new Opening
@@ -63,6 +64,7 @@ public static class Scenarios
             ClearHeight = clearHeight,
             RakeDegrees = rake,
             Wall = wall,
+            WallBehind = behind,
             Actions = actions,
             Barrier = barrier,
         };

@@ -73,6 +73,10 @@ public class DrawingTests
         yield return ("owner's sheet", OpeningSheet.Draw(input, new Sheet(174, 61, 2.25)));
         yield return ("section", SectionDrawing.Draw(input, "design-flood"));
         yield return ("section brim-full", SectionDrawing.Draw(input, "brim-full"));
+        foreach (var detail in DetailDrawings.Of(input))
+        {
+            yield return (detail.Title, detail);
+        }
     }
 
     private static IEnumerable<SheetPoint> Points(IEnumerable<Shape> shapes) => shapes.SelectMany(s => s switch

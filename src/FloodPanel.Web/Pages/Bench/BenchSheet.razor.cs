@@ -45,6 +45,9 @@ public sealed partial class BenchSheet
 
     protected override bool ShouldRender() => changed;
 
+    // "Footing, design flood" is found as "footing".
+    private static string NameOf(string title) => title.Split(',')[0].ToLowerInvariant().Replace(' ', '-');
+
     private static bool Matches(DrawingInput before, DrawingInput now) =>
         ReferenceEquals(before.Result, now.Result) && before.Units == now.Units && before.Revision == now.Revision
         && ReferenceEquals(before.Project, now.Project);

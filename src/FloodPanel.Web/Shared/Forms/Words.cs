@@ -19,6 +19,24 @@ public static class Words
         _ => throw new ArgumentOutOfRangeException(nameof(wall), wall, null),
     };
 
+    /// <summary>Name of a ground.</summary>
+    public static string OfSoil(CreepSoil soil) => soil switch
+    {
+        CreepSoil.VeryFineSandOrSilt => "Very fine sand or silt",
+        CreepSoil.FineSand => "Fine sand",
+        CreepSoil.MediumSand => "Medium sand",
+        CreepSoil.CoarseSand => "Coarse sand",
+        CreepSoil.FineGravel => "Fine gravel",
+        CreepSoil.MediumGravel => "Medium gravel",
+        CreepSoil.CoarseGravel => "Coarse gravel with cobbles",
+        CreepSoil.Boulders => "Boulders, cobbles, gravel",
+        CreepSoil.SoftClay => "Soft clay",
+        CreepSoil.MediumClay => "Medium clay",
+        CreepSoil.HardClay => "Hard clay",
+        CreepSoil.Hardpan => "Hardpan",
+        _ => throw new ArgumentOutOfRangeException(nameof(soil), soil, null),
+    };
+
     /// <summary>Name of a material family.</summary>
     public static string Of(MaterialFamily family) => family switch
     {
