@@ -56,6 +56,16 @@ internal static class Openings
             {
                 Barrier = Sample.Garage.Barrier with { Footing = new() { Width = 0.4, Thickness = 0.2, BarrierFromFloodEdge = 0.1 } },
             }, u),
+        ["guide-reveal"] = u => Guides(new(), u),
+        ["guide-wet-face"] = u => Guides(new() { Mounting = GuideMounting.WetFace, LipLever = 0, BearingDistance = 0.08, LoadOffset = 0.08 }, u),
+        ["guide-wet-face-tipping"] = u => Guides(new() { Mounting = GuideMounting.WetFace, LipThickness = 0.012, LoadOffset = 0.15 }, u),
+        ["guide-dry-face"] = u => Guides(new() { Mounting = GuideMounting.DryFace, BearingDistance = 0.08, LoadOffset = 0.13 }, u),
+        ["guide-dry-face-behind"] = u => Guides(new() { Mounting = GuideMounting.DryFace, LoadOffset = 0.06, LipLever = 0.025 }, u),
+        ["guide-far-edge"] = u => Guides(new() { Fasteners = new() { EdgeDistance = 3 } }, u),
+        ["guide-far-edge-dry"] = u => Guides(new() { Mounting = GuideMounting.DryFace, Fasteners = new() { EdgeDistance = 3 } }, u),
+        ["guide-wide"] = u => Guides(new() { Mounting = GuideMounting.DryFace, BearingDistance = 1, BearingWidth = 1, LoadOffset = 1, LipLever = 0.5, LipThickness = 0.1, BaseThickness = 0.1 }, u),
+        ["guide-small"] = u => Guides(
+            new() { LipThickness = 0.002, LipLever = 0.004, BaseThickness = 0.002, LoadOffset = 0.006, BearingDistance = 0.004, BearingWidth = 0.002, Fasteners = new() { EdgeDistance = 0.006, HoleDiameter = 0.003 } }, u),
         ["mixed-stack"] = u => Sample.Input(
             Sample.Garage with
             {
@@ -88,6 +98,9 @@ internal static class Openings
         ["odd-names"] = u => Sample.Input(
             Sample.Garage with { Name = "Door\u0001\n<b>\uFFFE & \uD83D\uDEB0" }, u, Sample.Project with { Name = "\uD800" }),
     };
+
+    private static DrawingInput Guides(GuideSet guides, UnitSystem units) => Sample.Input(
+        Sample.Garage with { Wall = WallKind.Masonry, Barrier = Sample.Garage.Barrier with { Guides = guides with { Material = Sample.Alloy } } }, units);
 
     public static IEnumerable<string> Names => All.Keys;
 

@@ -28,6 +28,12 @@ internal static class GuideNotes
                 $"Lip lever is {Section(guides.LipLever)}, less than half of the end bearing, {Section(half)}: the load of a log acts in the middle of its bearing."));
         }
 
+        if (guides.Mounting != GuideMounting.Reveal && guides.LoadOffset - half < guides.Fasteners.HoleDiameter)
+        {
+            yield return new("guide-over-fasteners", new(
+                $"The logs bear to {Section(guides.LoadOffset - half)} from the fasteners of their guides: nothing is left for their heads."));
+        }
+
         if (guides.Mounting == GuideMounting.WetFace && GuideStatics.Of(guides).Tension == 0)
         {
             yield return new("guide-wet-face", new(

@@ -26,6 +26,15 @@ public class GuideNotesTests
     public void Notes_LipLever_LessThanHalfOfTheEndBearing(double lever, bool noted) => Assert.Equal(
         noted ? ["guide-lip-lever"] : [], Codes(SampleGuides.With(SampleGuides.Reveal with { LipLever = lever })));
 
+    /// <summary>End bearing 40 mm, holes of 12 mm: the load at least 32 mm from the fasteners on a face.</summary>
+    [Theory]
+    [InlineData(GuideMounting.DryFace, 0.0319, true)]
+    [InlineData(GuideMounting.DryFace, 0.0321, false)]
+    [InlineData(GuideMounting.Reveal, 0.02, false)]
+    public void Notes_LogsOverTheFasteners_OnAFace(GuideMounting mounting, double offset, bool noted) => Assert.Equal(
+        noted ? ["guide-over-fasteners"] : [],
+        Codes(SampleGuides.With(SampleGuides.Reveal with { Mounting = mounting, LoadOffset = offset })));
+
     /// <summary>Strip 40 mm from the fasteners.</summary>
     [Theory]
     [InlineData(0.04, true)]

@@ -31,6 +31,10 @@ public sealed partial class BenchForm
     [Parameter, EditorRequired]
     public Library Library { get; set; } = null!;
 
+    /// <summary>The design basis of the project.</summary>
+    [Parameter, EditorRequired]
+    public DesignBasisKind Basis { get; set; }
+
     /// <summary>Raised with each edit.</summary>
     [Parameter, EditorRequired]
     public EventCallback<OpeningEdit> OnEdit { get; set; }
