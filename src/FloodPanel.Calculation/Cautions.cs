@@ -1,6 +1,7 @@
 using FloodPanel.Calculation.Actions;
 using FloodPanel.Calculation.Actions.Debris;
 using FloodPanel.Calculation.Actions.Waves;
+using FloodPanel.Calculation.Anchors;
 using FloodPanel.Calculation.Guides;
 using FloodPanel.Calculation.Handling;
 using FloodPanel.Calculation.ProjectTree;
@@ -51,6 +52,7 @@ public static class Cautions
                 $"Nobody has confirmed that water cannot come back behind the barrier through drains, vents and cavities: check each way, and close it or fit a valve.")));
         }
 
+        notes.AddRange(AnchorReport.Notes(opening));
         Lifting(notes, schedule);
         Floating(notes, holdDowns);
         Walls(notes, opening.Wall, WallDepth.Against(site, opening));

@@ -1,3 +1,4 @@
+using FloodPanel.Calculation.Anchors;
 using FloodPanel.Calculation.Cases;
 using FloodPanel.Calculation.Footings;
 using FloodPanel.Calculation.Guides;
@@ -19,8 +20,7 @@ internal static class PartRegistry
     [
         NotEntered(NeededChecks.BasePlates, model => model.Post is not null, new(
             $"The base plates of the posts have no inputs: enter a base plate, or declare it designed by others.")),
-        NotEntered(NeededChecks.Anchors, model => model.Post is not null, new(
-            $"The anchors of the base plates have no inputs: enter them, or declare them designed by others.")),
+        new((model, _, numbers) => AnchorReport.Of(model, numbers), AnchorReport.Gaps),
         new(FastenerReport.Of, FastenerReport.Gaps),
         new(GuideReport.Of, GuideReport.Gaps),
         new(WallReport.Of, WallReport.Gaps),

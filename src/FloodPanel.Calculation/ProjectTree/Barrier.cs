@@ -15,6 +15,9 @@ public sealed record Barrier
     /// <summary>The plate under each post; null when there is none to be checked here.</summary>
     public BasePlateInput? BasePlate { get; init; }
 
+    /// <summary>The anchors of each base plate; null where nobody has entered them.</summary>
+    public AnchorInput? Anchors { get; init; }
+
     /// <summary>The guides at both ends; null where nobody has entered them.</summary>
     public GuideSet? Guides { get; init; }
 

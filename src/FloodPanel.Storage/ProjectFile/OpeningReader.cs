@@ -54,12 +54,12 @@ internal static class OpeningReader
             Logs = barrier.NeededObject("logs") is { } logs ? ReadLogs(logs) : new LogStack(),
             Bays = (barrier.Need("bays", "a list of clear widths")?.AsList() ?? []).Select(b => b.AsNumber()).ToValueList(),
             Posts = barrier.Object("posts") is { } posts ? ReadPosts(posts) : null,
+            Anchors = barrier.Object("anchors") is { } anchors ? AnchorFile.Read(anchors) : null,
             Guides = barrier.Object("guides") is { } guides ? GuideFile.Read(guides) : null,
             Footing = barrier.Object("footing") is { } footing ? FootingFile.Read(footing) : null,
             ByOthers = barrier.List("byOthers").Select(ReadByOthers).ToValueList(),
         };
         barrier.NotHeldYet("basePlate", "base plates");
-        barrier.NotHeldYet("anchors", "anchors");
         barrier.Close();
         return read;
     }

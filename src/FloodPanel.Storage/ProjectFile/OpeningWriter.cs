@@ -66,6 +66,7 @@ internal static class OpeningWriter
 
         json.WriteEndArray();
         WritePosts(json, barrier.Posts);
+        AnchorFile.Write(json, barrier.Anchors);
         GuideFile.Write(json, barrier.Guides);
         FootingFile.Write(json, barrier.Footing);
         json.WriteStartArray("byOthers");

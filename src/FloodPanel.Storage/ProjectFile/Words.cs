@@ -51,6 +51,16 @@ internal static class FileWords
         ("dry-face", GuideMounting.DryFace),
         ("reveal", GuideMounting.Reveal));
 
+    public static readonly Words<AnchorMethod> AnchorMethod = new(
+        ("approval", Calculation.ProjectTree.AnchorMethod.Approval),
+        ("aci-318", Calculation.ProjectTree.AnchorMethod.Aci318),
+        ("en-1992-4", Calculation.ProjectTree.AnchorMethod.En1992));
+
+    public static readonly Words<AnchorKind> AnchorKind = new(
+        ("headed", Calculation.ProjectTree.AnchorKind.Headed),
+        ("hooked", Calculation.ProjectTree.AnchorKind.Hooked),
+        ("post-installed", Calculation.ProjectTree.AnchorKind.PostInstalled));
+
     public static readonly Words<WallMeasure> WallMeasure = new(
         ("resistance", Calculation.ProjectTree.WallMeasure.Resistance),
         ("published-depth", Calculation.ProjectTree.WallMeasure.PublishedDepth));
