@@ -87,7 +87,8 @@ public class FootingReportTests
         var (before, after) = (Checks(scenario, footing), Checks(scenario, change(footing)));
         foreach (var (name, use) in before.Where(pair => pair.Key != except && after.ContainsKey(pair.Key)))
         {
-            Assert.True(after[name] <= use * (1 + 1e-9), $"{name}: {use:R} became {after[name]:R}");
+            // Rounding of a resultant through the very middle counts as nothing.
+            Assert.True(after[name] <= use * (1 + 1e-9) + 1e-12, $"{name}: {use:R} became {after[name]:R}");
         }
     }
 
