@@ -66,6 +66,9 @@ internal static class Openings
         ["guide-wide"] = u => Guides(new() { Mounting = GuideMounting.DryFace, BearingDistance = 1, BearingWidth = 1, LoadOffset = 1, LipLever = 0.5, LipThickness = 0.1, BaseThickness = 0.1 }, u),
         ["guide-small"] = u => Guides(
             new() { LipThickness = 0.002, LipLever = 0.004, BaseThickness = 0.002, LoadOffset = 0.006, BearingDistance = 0.004, BearingWidth = 0.002, Fasteners = new() { EdgeDistance = 0.006, HoleDiameter = 0.003 } }, u),
+        ["anchors"] = u => Anchored(u, new() { Method = AnchorMethod.Aci318, Kind = AnchorKind.Headed, HeadArea = 500e-6, EdgeProtected = 0.15, EdgeLeft = 0.2 }),
+        ["anchors-by-approval"] = u => Anchored(u, new() { TensionResistance = 20e3, ShearResistance = 15e3 }),
+        ["anchors-in-a-beam"] = u => Anchored(u, new() { Method = AnchorMethod.En1992, Depth = 0.2, EdgeFlood = 0.08, EdgeProtected = 0.08, EdgeLeft = 1.4, EdgeRight = 1.4 }),
         ["mixed-stack"] = u => Sample.Input(
             Sample.Garage with
             {
@@ -105,4 +108,7 @@ internal static class Openings
     public static IEnumerable<string> Names => All.Keys;
 
     public static DrawingInput Input(string name, UnitSystem units) => All[name](units);
+
+    private static DrawingInput Anchored(UnitSystem units, AnchorInput anchors) => Sample.Input(
+        Sample.Garage with { Barrier = Sample.Garage.Barrier with { BasePlate = new() { Material = Sample.Alloy }, Anchors = anchors } }, units);
 }
