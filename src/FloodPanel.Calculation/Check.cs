@@ -39,4 +39,10 @@ public sealed record Check(
 
     /// <summary>What is not shown to pass fails, NaN and negatives included.</summary>
     public bool Passes => Utilisation is >= 0 and <= 1;
+
+    /// <summary>True for a rule of detailing, a least edge distance or spacing: it is kept or broken, and no load uses it up.</summary>
+    public bool IsDetailing { get; init; }
+
+    /// <summary>A rule of detailing governs only when it is broken.</summary>
+    public bool MayGovern => !(IsDetailing && Passes);
 }

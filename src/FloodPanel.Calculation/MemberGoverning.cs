@@ -59,7 +59,7 @@ public sealed record MemberGoverning(
         var all = cases.SelectMany(c => checks(c).Select(check => (Case: c, Check: check))).ToArray();
         if (all.Length > 0)
         {
-            var (@case, check) = all.MaxBy(pair => pair.Check.Utilisation);
+            var (@case, check) = all.MaxBy(pair => (pair.Check.MayGovern, pair.Check.Utilisation));
             rows.Add(row(@case, check));
         }
     }

@@ -62,7 +62,7 @@ internal static class VerdictRules
         Governing? worst = freeboard.Passes ? null : new(freeboard.Name, null, freeboard.Utilisation, "");
         foreach (var (check, caseName, member) in Checks(cases))
         {
-            if (worst is null || check.Utilisation > worst.Utilisation)
+            if (check.MayGovern && (worst is null || check.Utilisation > worst.Utilisation))
             {
                 worst = new(check.Name, caseName, check.Utilisation, member);
             }

@@ -32,5 +32,13 @@ public class CheckTests
     [Fact]
     public void Passes_DemandNotANumber_Fails() => Assert.False(Of(double.NaN, 10).Passes);
 
+    [Theory]
+    [InlineData(false, 9, true)]
+    [InlineData(false, 11, true)]
+    [InlineData(true, 9, false)]
+    [InlineData(true, 11, true)]
+    public void MayGovern_RuleOfDetailing_OnlyWhenItIsBroken(bool isDetailing, double demand, bool governs) =>
+        Assert.Equal(governs, (Of(demand, 10) with { IsDetailing = isDetailing }).MayGovern);
+
     private static Check Of(double demand, double capacity) => new("c", "C", "s", Dimension.Force, demand, capacity, []);
 }

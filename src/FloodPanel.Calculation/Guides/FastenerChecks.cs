@@ -68,7 +68,7 @@ internal static class FastenerChecks
         steps.Given("c_min", least, Dimension.SectionLength);
         steps.Given("c_1", fasteners.EdgeDistance, Dimension.SectionLength);
         steps.Add("u", "c_min/c_1", least / fasteners.EdgeDistance, Dimension.Ratio);
-        return new("fastener-edge-distance", "Edge distance to the arris", fasteners.Source.Trim(), Dimension.SectionLength, least, fasteners.EdgeDistance, steps.Done());
+        return new("fastener-edge-distance", "Edge distance to the arris", fasteners.Source.Trim(), Dimension.SectionLength, least, fasteners.EdgeDistance, steps.Done()) { IsDetailing = true };
     }
 
     /// <summary>Spacing; null without the least one.</summary>
@@ -87,7 +87,7 @@ internal static class FastenerChecks
         steps.Given("N", row.Spaces, Dimension.Count);
         steps.Add("s", "(H − 2·e_1)/N", row.Spacing, Dimension.SectionLength);
         steps.Add("u", "s_min/s", least / row.Spacing, Dimension.Ratio);
-        return new("fastener-spacing", "Spacing of the fasteners", guide.Guides.Fasteners.Source.Trim(), Dimension.SectionLength, least, row.Spacing, steps.Done());
+        return new("fastener-spacing", "Spacing of the fasteners", guide.Guides.Fasteners.Source.Trim(), Dimension.SectionLength, least, row.Spacing, steps.Done()) { IsDetailing = true };
     }
 
     /// <summary>What the worst fastener receives, where no value is there to hold it against; nothing where the wall takes it all.</summary>

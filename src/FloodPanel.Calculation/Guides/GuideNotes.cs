@@ -5,6 +5,9 @@ namespace FloodPanel.Calculation.Guides;
 /// <summary>Cautions about guides and their fasteners.</summary>
 internal static class GuideNotes
 {
+    /// <summary>Lengths that agree to this are equal [m].</summary>
+    private const double Rounding = 1e-9;
+
     /// <summary>The notes of a barrier with guides.</summary>
     /// <remarks>Tests in masonry: NCMA TEK 12-3C (2013): at least five to ASTM E488, allowable load 20 % of their mean.</remarks>
     public static IEnumerable<Note> Of(Opening opening, GuideSet guides)
@@ -22,10 +25,12 @@ internal static class GuideNotes
         }
 
         var half = opening.Barrier.Logs.EndBearing / 2;
-        if (guides.LipLever > 0 && guides.LipLever < half)
+        var least = guides.Mounting == GuideMounting.Reveal ? Math.Max(half, guides.LoadOffset - guides.BaseThickness)
+            : guides.LipLever > 0 ? half : 0;
+        if (guides.LipLever < least - Rounding)
         {
             yield return new("guide-lip-lever", new(
-                $"Lip lever is {Section(guides.LipLever)}, less than half of the end bearing, {Section(half)}: the load of a log acts in the middle of its bearing."));
+                $"Lip lever is {Section(guides.LipLever)}; a log presses in the middle of its bearing, {Section(least)} from the root of the lip."));
         }
 
         if (guides.Mounting != GuideMounting.Reveal && guides.LoadOffset - half < guides.Fasteners.HoleDiameter)

@@ -18,13 +18,20 @@ public class GuideNotesTests
     public void Notes_NoGuides_NothingAboutThem() =>
         Assert.Empty(Codes(Refused.With((Opening o) => o with { Wall = WallKind.Masonry })));
 
-    /// <summary>End bearing 40 mm.</summary>
+    /// <summary>End bearing 40 mm; in a reveal the load 30 mm from its surface, 20 mm from a base of 10 mm.</summary>
     [Theory]
-    [InlineData(0, false)]
-    [InlineData(0.0199, true)]
-    [InlineData(0.02, false)]
-    public void Notes_LipLever_LessThanHalfOfTheEndBearing(double lever, bool noted) => Assert.Equal(
-        noted ? ["guide-lip-lever"] : [], Codes(SampleGuides.With(SampleGuides.Reveal with { LipLever = lever })));
+    [InlineData(GuideMounting.DryFace, 0.0199, true)]
+    [InlineData(GuideMounting.DryFace, 0.02, false)]
+    [InlineData(GuideMounting.DryFace, 0, false)]
+    [InlineData(GuideMounting.Reveal, 0.0199, true)]
+    [InlineData(GuideMounting.Reveal, 0.02, false)]
+    [InlineData(GuideMounting.Reveal, 0, true)]
+    public void Notes_LipLever_ShorterThanFromTheLoadToTheRoot(GuideMounting mounting, double lever, bool noted)
+    {
+        var guides = SampleGuides.Reveal with { Mounting = mounting, LipLever = lever, LoadOffset = mounting == GuideMounting.Reveal ? 0.03 : 0.04 };
+
+        Assert.Equal(noted ? ["guide-lip-lever"] : [], Codes(SampleGuides.With(guides)));
+    }
 
     /// <summary>End bearing 40 mm, holes of 12 mm: the load at least 32 mm from the fasteners on a face.</summary>
     [Theory]

@@ -146,6 +146,19 @@ public class GuideReportTests
         Assert.Equal([sentence], GuideGaps(result));
     }
 
+    /// <summary>A least edge distance that is kept uses nothing up; broken, it governs.</summary>
+    [Theory]
+    [InlineData(0.099, false)]
+    [InlineData(0.5, true)]
+    public void Governing_LeastEdgeDistance_OnlyWhenItIsBroken(double least, bool governs)
+    {
+        var strong = SampleGuides.WithFasteners(f => f with { MinimumEdge = least, Tension = 60_000, Shear = 80_000 });
+
+        var governing = SampleProject.Result(SampleGuides.OneBay(strong)).Verdict.Governing!;
+
+        Assert.Equal(governs, governing.Check == "fastener-edge-distance");
+    }
+
     /// <summary>Values without a source are held against nothing; the forces are there all the same.</summary>
     [Fact]
     public void Of_NoSource_ForcesWithoutChecks()
