@@ -55,7 +55,7 @@ internal static class ApprovalChecks
         var steps = new StepList(3);
         steps.Given($"{symbol}_min", least, Dimension.SectionLength);
         steps.Given(symbol, there, Dimension.SectionLength);
-        return Closed(name, title, source, Dimension.SectionLength, $"{symbol}_min/{symbol}", least, there, steps);
+        return Closed(name, title, source, Dimension.SectionLength, $"{symbol}_min/{symbol}", least, there, steps) with { IsDetailing = true };
     }
 
     private static Check Closed(
