@@ -4,6 +4,7 @@ using FloodPanel.Calculation.Actions.Waves;
 using FloodPanel.Calculation.Anchors;
 using FloodPanel.Calculation.Guides;
 using FloodPanel.Calculation.Handling;
+using FloodPanel.Calculation.Posts;
 using FloodPanel.Calculation.ProjectTree;
 using FloodPanel.Calculation.Walls;
 using FloodPanel.Calculation.Water;
@@ -38,6 +39,7 @@ public static class Cautions
         if (model.Post is { } post)
         {
             Strengths(notes, NeededChecks.Posts, post);
+            notes.AddRange(PostNotes.Of(post, model.Basis));
         }
 
         if (opening.Barrier.Guides is { } guides)

@@ -47,6 +47,7 @@ public sealed class OpeningModel
         {
             Post = Member.Of(posts.Material, posts.Profile, posts.DeflectionLimit, basis, library);
             PostWidth = posts.Width;
+            PlateMaterial = opening.Barrier.BasePlate is { } plate ? library.Find(plate.Material) : null;
             Raker = posts.Raker is { } raker ? RakerModel.Of(raker, Rake, basis, library) : null;
         }
 
@@ -130,6 +131,9 @@ public sealed class OpeningModel
 
     /// <summary>The raker of each post; null when there is none.</summary>
     public RakerModel? Raker { get; }
+
+    /// <summary>Material of the base plates; null when there are none.</summary>
+    public Material? PlateMaterial { get; }
 
     /// <summary>Width of a post across the opening [m].</summary>
     public double PostWidth { get; }

@@ -8,11 +8,12 @@ namespace FloodPanel.Calculation.Tests;
 public class CautionsTests
 {
     [Fact]
-    public void Notes_NothingSpecial_OnlyTheSafetyWords()
+    public void Notes_NothingSpecial_WhatPostsLeaveOutAndTheSafetyWords()
     {
-        var note = Assert.Single(Notes((LogStack l) => l with { Sealed = false }));
+        var notes = Notes((LogStack l) => l with { Sealed = false });
 
-        Assert.Equal("calculation-aid", note.Code);
+        Assert.Equal(["post-no-interaction", "post-lateral", "calculation-aid"], notes.Select(n => n.Code));
+        var note = notes[^1];
         Assert.Equal(
             "This is a calculation aid. It must be checked by a licensed engineer and follow local codes. A barrier can fail or be overtopped: people leave when told to.",
             note.Text.ToString());

@@ -98,7 +98,7 @@ internal static class CaseReport
             var response = numbers.Posts[post];
             var setting = new PostChecks.Setting(
                 numbers.Diagram, model.Post!, model.PostTributary(post), model.FaceLength, model.Rake,
-                CaseForces.OnPost(model, kind, post));
+                CaseForces.OnPost(model, kind, post), model.Raker);
             results[post] = new()
             {
                 Index = post + 1,
@@ -111,6 +111,7 @@ internal static class CaseReport
                 MomentWorking = model.Post!.Bending is null ? PostChecks.Moment(response, setting) : null,
                 ShearWorking = model.Post.Shear is null ? PostChecks.ShearForce(response, setting) : null,
                 DeflectionWorking = judged ? null : PostChecks.DeflectionOnly(response, setting),
+                Others = [.. PostFurtherChecks.Of(model, post, response, judged)],
             };
         }
 

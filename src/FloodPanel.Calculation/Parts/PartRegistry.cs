@@ -2,6 +2,8 @@ using FloodPanel.Calculation.Anchors;
 using FloodPanel.Calculation.Cases;
 using FloodPanel.Calculation.Footings;
 using FloodPanel.Calculation.Guides;
+using FloodPanel.Calculation.PostBases;
+using FloodPanel.Calculation.Posts;
 using FloodPanel.Calculation.Walls;
 
 namespace FloodPanel.Calculation.Parts;
@@ -18,8 +20,8 @@ internal static class PartRegistry
 {
     private static readonly PartSource[] Sources =
     [
-        NotEntered(NeededChecks.BasePlates, model => model.Post is not null, new(
-            $"The base plates of the posts have no inputs: enter a base plate, or declare it designed by others.")),
+        new(BasePlateReport.Of, BasePlateReport.Gaps),
+        new(PostReport.Of, PostReport.Gaps),
         new((model, _, numbers) => AnchorReport.Of(model, numbers), AnchorReport.Gaps),
         new(FastenerReport.Of, FastenerReport.Gaps),
         new(GuideReport.Of, GuideReport.Gaps),

@@ -79,6 +79,40 @@ public static class FilletWelds
         return throat * ultimate / (Math.Sqrt(3) * correlation * PartialFactor);
     }
 
+    /// <summary>Comparison stress of a fillet in its throat, √(2·q_n² + 3·q_v²)/a.</summary>
+    /// <param name="across">q_n, force per length across the weld, normal to the plate [N/m].</param>
+    /// <param name="along">q_v, force per length along the weld [N/m].</param>
+    /// <param name="throat">a [m], > 0.</param>
+    /// <returns>[Pa], to be compared with f_w/γ_Mw.</returns>
+    /// <exception cref="ArgumentOutOfRangeException">An argument is out of range or not finite.</exception>
+    /// <remarks>
+    /// Source: EN 1999-1-1, 8.6.3.3: √(σ² + 3·(τ² + τ_l²)) with σ = τ = q_n/(√2·a) in a throat at 45° and τ_l = q_v/a (from memory).
+    /// </remarks>
+    public static double ThroatStress(double across, double along, double throat)
+    {
+        Guard.Finite(across);
+        Guard.Finite(along);
+        Guard.Positive(throat);
+
+        return Math.Sqrt(2 * across * across + 3 * along * along) / throat;
+    }
+
+    /// <summary>Nominal strength of an aluminium fillet per length in US practice, min(0.6·0.85·F_f·0.707·w, 0.6·F_tuw·w).</summary>
+    /// <param name="leg">w [m], > 0.</param>
+    /// <param name="filler">F_f, tensile ultimate strength of the filler [Pa], > 0.</param>
+    /// <param name="beside">F_tuw, of the parts beside the weld [Pa], > 0.</param>
+    /// <returns>[N/m].</returns>
+    /// <exception cref="ArgumentOutOfRangeException">An argument is not above zero.</exception>
+    /// <remarks>Source: Aluminum Design Manual 2020, J.2; both taken in shear, which is safe across the weld.</remarks>
+    public static double NominalAluminiumUs(double leg, double filler, double beside)
+    {
+        Guard.Positive(leg);
+        Guard.Positive(filler);
+        Guard.Positive(beside);
+
+        return Math.Min(0.6 * 0.85 * filler * Throat * leg, 0.6 * beside * leg);
+    }
+
     /// <summary>W_line, section modulus of a weld line round a rectangle, d²/3 + b·d.</summary>
     /// <param name="width">b, across the opening [m], > 0.</param>
     /// <param name="depth">d, in the direction of the water [m], > 0.</param>

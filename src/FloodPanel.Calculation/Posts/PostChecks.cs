@@ -14,10 +14,14 @@ internal static class PostChecks
     /// <param name="Length">ℓ, length of the post [m].</param>
     /// <param name="Rake">θ [rad].</param>
     /// <param name="Force">F, a force on the post [N].</param>
+    /// <param name="Raker">The raker; null for none.</param>
     internal readonly record struct Setting(
-        PressureDiagram Diagram, Member Post, double Tributary, double Length, double Rake, ConcentratedForce Force)
+        PressureDiagram Diagram, Member Post, double Tributary, double Length, double Rake, ConcentratedForce Force, RakerModel? Raker = null)
     {
         public bool HasForce => Force.Characteristic != 0;
+
+        /// <summary>The load along the post, with the factors of the design basis.</summary>
+        public SlopeLoad Load => new(Diagram, Force, Tributary, Math.Cos(Rake), IsDesign: true);
     }
 
     /// <summary>Bending: M = b_t·Σγ·w·z/cos θ + γ_F·F·z_F/cos θ against M_R = f_b·W; null without a design bending stress.</summary>
@@ -34,8 +38,8 @@ internal static class PostChecks
         steps.Add("M_R", "f_b·W", setting.Post.MomentResistance, Dimension.Moment);
         steps.Add("u", "M/M_R", response.Bending, Dimension.Ratio);
         return new(
-            "post-bending", "Post bending", setting.Post.BendingSource, Dimension.Moment,
-            response.BaseMoment, setting.Post.MomentResistance, steps.Done());
+            "post-bending", "Post bending", Source(setting, setting.Post.BendingSource), Dimension.Moment,
+            response.PeakMoment, setting.Post.MomentResistance, steps.Done());
     }
 
     /// <summary>Shear: V = b_t·Σγ·w + γ_F·F against V_R = f_v·A_v; null without a design shear stress.</summary>
@@ -52,8 +56,8 @@ internal static class PostChecks
         steps.Add("V_R", "f_v·A_v", setting.Post.ShearResistance, Dimension.Force);
         steps.Add("u", "V/V_R", response.ShearUse, Dimension.Ratio);
         return new(
-            "post-shear", "Post shear", setting.Post.ShearSource, Dimension.Force,
-            response.BaseShear, setting.Post.ShearResistance, steps.Done());
+            "post-shear", "Post shear", Source(setting, setting.Post.ShearSource), Dimension.Force,
+            response.PeakShear, setting.Post.ShearResistance, steps.Done());
     }
 
     /// <summary>Deflection of the tip, unfactored, against ℓ/n.</summary>
@@ -65,21 +69,26 @@ internal static class PostChecks
         steps.Add("δ_lim", "ℓ/n", limit, Dimension.Deflection);
         steps.Add("u", "δ/δ_lim", response.DeflectionUse, Dimension.Ratio);
         return new(
-            "post-deflection", "Post deflection", $"{UnitLoad}; limit chosen by the user",
+            "post-deflection", "Post deflection", $"{(setting.Raker is null ? UnitLoad : PropResponse.Source)}; limit chosen by the user",
             Dimension.Deflection, response.TipDeflection, limit, steps.Done());
     }
 
     /// <summary>How the moment came about, where no bending check tells it.</summary>
     public static Working Moment(in PostResponse response, Setting setting) =>
-        new("Moment at the base of the post", Cantilever.Source, MomentSteps(response, setting).Done());
+        new(setting.Raker is null ? "Moment at the base of the post" : "Moment in the post", Source(setting, Cantilever.Source), MomentSteps(response, setting).Done());
 
     /// <summary>How the shear force came about, where no shear check tells it.</summary>
     public static Working ShearForce(in PostResponse response, Setting setting) =>
-        new("Shear force at the base of the post", Cantilever.Source, ShearSteps(response, setting).Done());
+        new(setting.Raker is null ? "Shear force at the base of the post" : "Shear force in the post", Source(setting, Cantilever.Source), ShearSteps(response, setting).Done());
 
     /// <summary>How the deflection came about, where it is not judged.</summary>
     public static Working DeflectionOnly(in PostResponse response, Setting setting) =>
-        new("Deflection of the tip of the post", UnitLoad, DeflectionSteps(response, setting).Done());
+        new(
+            setting.Raker is null ? "Deflection of the tip of the post" : "Deflection of the post",
+            setting.Raker is null ? UnitLoad : PropResponse.Source,
+            DeflectionSteps(response, setting).Done());
+
+    private static string Source(Setting setting, string source) => setting.Raker is null ? source : $"{PropResponse.Source}; {source}";
 
     private static StepList MomentSteps(in PostResponse response, Setting setting)
     {
@@ -88,7 +97,15 @@ internal static class PostChecks
         var toSlope = setting.Rake == 0 ? "" : "/cos(θ)";
         var distributed = count == 0 ? "" : $"b_t·({PieceSymbols.Sum(count, n => $"γ_{n}·w_{n}·z_{n}")}){toSlope}";
         AddForce(steps, setting, withFactor: true);
-        steps.Add("M", DiagramWorking.Joined(distributed, setting.HasForce ? $"γ_F·F·z_F{toSlope}" : ""), response.BaseMoment, Dimension.Moment);
+        var formula = DiagramWorking.Joined(distributed, setting.HasForce ? $"γ_F·F·z_F{toSlope}" : "");
+        if (response.Prop is not { } prop)
+        {
+            steps.Add("M", formula, response.BaseMoment, Dimension.Moment);
+            return steps;
+        }
+
+        steps.Add("M_0", formula, prop.CantileverMoment, Dimension.Moment);
+        RakerSteps.Moment(steps, prop, setting.Raker!, setting.Post, setting.Load);
         return steps;
     }
 
@@ -98,12 +115,25 @@ internal static class PostChecks
         var count = setting.Diagram.Pieces.Length;
         AddForce(steps, setting, withFactor: true);
         var distributed = count == 0 ? "" : $"b_t·({PieceSymbols.SumOfDesignForces(count)})";
-        steps.Add("V", DiagramWorking.Joined(distributed, setting.HasForce ? "γ_F·F" : ""), response.BaseShear, Dimension.Force);
+        var formula = DiagramWorking.Joined(distributed, setting.HasForce ? "γ_F·F" : "");
+        if (response.Prop is not { } prop)
+        {
+            steps.Add("V", formula, response.BaseShear, Dimension.Force);
+            return steps;
+        }
+
+        steps.Add("V_0", formula, prop.CantileverShear, Dimension.Force);
+        RakerSteps.Shear(steps, prop, setting.Load, Math.Min(setting.Raker!.Head, setting.Length));
         return steps;
     }
 
     private static StepList DeflectionSteps(in PostResponse response, Setting setting)
     {
+        if (setting.Raker is not null)
+        {
+            return ProppedDeflection(response, setting);
+        }
+
         var toSlope = 1 / Math.Cos(setting.Rake);
         var steps = new StepList(40);
         DiagramWorking.AddRake(steps.Steps, setting.Rake);
@@ -126,6 +156,15 @@ internal static class PostChecks
         steps.Given("E", setting.Post.Material.ElasticModulus, Dimension.ElasticModulus);
         steps.Given("I", setting.Post.Section.Inertia, Dimension.SecondMoment);
         steps.Add("δ", tip.Length == 0 ? "" : $"({tip})/(6·E·I)", response.TipDeflection, Dimension.Deflection);
+        return steps;
+    }
+
+    /// <summary>The greatest deflection along the post comes from the stiffness solution as it is.</summary>
+    private static StepList ProppedDeflection(in PostResponse response, Setting setting)
+    {
+        var steps = new StepList(5);
+        steps.Given("ℓ", setting.Length, Dimension.Length);
+        steps.Given("δ", response.TipDeflection, Dimension.Deflection);
         return steps;
     }
 

@@ -11,6 +11,8 @@ namespace FloodPanel.Calculation.Posts;
 /// <param name="Compression">N, axial force of the raker [N], the greater of both.</param>
 /// <param name="Uplift">T_u, tension in the post and uplift on its base [N].</param>
 /// <param name="Thrust">H, horizontal force on the foot of the raker [N].</param>
+/// <param name="FixedBaseMoment">M_f, base moment with a fixed base [N·m].</param>
+/// <param name="CantileverShear">V_0, base shear without the raker [N].</param>
 /// <param name="CantileverMoment">M_0, base moment without the raker [N·m].</param>
 /// <param name="HeadDeflection">δ_0, deflection of the post at the head without the raker, design load [m].</param>
 /// <param name="PeakMoment">M, greatest moment in the post [N·m].</param>
@@ -23,6 +25,8 @@ public sealed record PropResponse(
     double Compression,
     double Uplift,
     double Thrust,
+    double FixedBaseMoment,
+    double CantileverShear,
     double CantileverMoment,
     double HeadDeflection,
     double PeakMoment,
@@ -69,6 +73,8 @@ public sealed record PropResponse(
             greatest / raker.CosNormal,
             greatest * raker.LiftRatio,
             greatest / raker.CosNormal * raker.ThrustRatio,
+            atBaseFixed.Moment(0),
+            load.Between(0, double.PositiveInfinity).Zero,
             load.Between(0, double.PositiveInfinity).First,
             atBaseFixed.Deflection(head) + atBaseFixed.HeadForce * head * head * head / (3 * stiffness),
             isPinned ? other.Moment : own.Moment,

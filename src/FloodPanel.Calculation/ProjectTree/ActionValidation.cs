@@ -61,20 +61,11 @@ internal static class ActionValidation
 
     private static void LineHeight(Opening opening, LineInput line, string path, ProblemList problems, Library library)
     {
-        // Heights that are refused themselves say nothing about the line load.
-        var length = 0.0;
-        foreach (var group in opening.Barrier.Logs.Groups)
+        if (BarrierHeight.Of(opening, library) is not { } height)
         {
-            if (library.Find(group.Profile) is not { } profile
-                || !Fields.ProfileHeight.Allows(profile.Height) || !Fields.LogCount.Allows(group.Count))
-            {
-                return;
-            }
-
-            length += group.Count * profile.Height;
+            return;
         }
 
-        var height = length * Math.Cos(double.DegreesToRadians(opening.RakeDegrees));
         if (line.Height > height + FloodLevels.HeightTolerance)
         {
             problems.Add($"{path}.height", $"Line load height is {new Quantity(line.Height, Dimension.Length):typed}; allowed is up to the top of the barrier, {new Quantity(height, Dimension.Length)}.");

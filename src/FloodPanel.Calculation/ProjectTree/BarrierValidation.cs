@@ -31,6 +31,7 @@ internal static class BarrierValidation
             Posts(barrier, posts, $"{path}.posts", problems, library);
         }
 
+        PostBaseValidation.Validate(opening, path, problems, library);
         AnchorValidation.Validate(barrier.Anchors, $"{path}.anchors", problems);
         GuideValidation.Validate(barrier, path, problems, library);
         if (barrier.Footing is { } footing)

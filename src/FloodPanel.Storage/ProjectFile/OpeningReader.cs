@@ -54,12 +54,12 @@ internal static class OpeningReader
             Logs = barrier.NeededObject("logs") is { } logs ? ReadLogs(logs) : new LogStack(),
             Bays = (barrier.Need("bays", "a list of clear widths")?.AsList() ?? []).Select(b => b.AsNumber()).ToValueList(),
             Posts = barrier.Object("posts") is { } posts ? ReadPosts(posts) : null,
+            BasePlate = barrier.Object("basePlate") is { } plate ? PostBaseFile.ReadPlate(plate) : null,
             Anchors = barrier.Object("anchors") is { } anchors ? AnchorFile.Read(anchors) : null,
             Guides = barrier.Object("guides") is { } guides ? GuideFile.Read(guides) : null,
             Footing = barrier.Object("footing") is { } footing ? FootingFile.Read(footing) : null,
             ByOthers = barrier.List("byOthers").Select(ReadByOthers).ToValueList(),
         };
-        barrier.NotHeldYet("basePlate", "base plates");
         barrier.Close();
         return read;
     }
@@ -109,8 +109,9 @@ internal static class OpeningReader
             Profile = SectionReader.ReadProfile(posts),
             Width = posts.Number("width", blank.Width),
             DeflectionLimit = posts.Number("deflectionLimit", blank.DeflectionLimit),
+            WeldedBase = posts.Flag("weldedBase", blank.WeldedBase),
+            Raker = posts.Object("raker") is { } raker ? PostBaseFile.ReadRaker(raker) : null,
         };
-        posts.NotHeldYet("raker", "rakers");
         posts.Close();
         return read;
     }

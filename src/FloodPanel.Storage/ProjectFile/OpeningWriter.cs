@@ -66,6 +66,7 @@ internal static class OpeningWriter
 
         json.WriteEndArray();
         WritePosts(json, barrier.Posts);
+        PostBaseFile.Write(json, barrier.BasePlate);
         AnchorFile.Write(json, barrier.Anchors);
         GuideFile.Write(json, barrier.Guides);
         FootingFile.Write(json, barrier.Footing);
@@ -131,6 +132,12 @@ internal static class OpeningWriter
         SectionWriter.Write(json, posts.Profile);
         json.WriteNumber("width", posts.Width);
         json.WriteNumber("deflectionLimit", posts.DeflectionLimit);
+        if (posts.WeldedBase)
+        {
+            json.WriteBoolean("weldedBase", true);
+        }
+
+        PostBaseFile.Write(json, posts.Raker);
         json.WriteEndObject();
     }
 }

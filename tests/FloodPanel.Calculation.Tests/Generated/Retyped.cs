@@ -57,7 +57,34 @@ internal sealed class Retyped(UnitSystem system)
             Material = Of((Material)posts.Material),
             Profile = Of((Profile)posts.Profile),
             Width = Read(posts.Width, Fields.PostWidth),
+            Raker = Of(posts.Raker),
         },
+        BasePlate = Of(barrier.BasePlate),
+    };
+
+    private RakerInput? Of(RakerInput? raker) => raker is null ? null : raker with
+    {
+        Material = Of((Material)raker.Material),
+        Profile = Of((Profile)raker.Profile),
+        HeadHeight = Read(raker.HeadHeight, RakerFields.HeadHeight),
+        FootDistance = Read(raker.FootDistance, RakerFields.FootDistance),
+        LengthFactor = Read(raker.LengthFactor, RakerFields.LengthFactor),
+        Play = Read(raker.Play, RakerFields.Play),
+        FootResistance = Read(raker.FootResistance, RakerFields.FootResistance),
+    };
+
+    private BasePlateInput? Of(BasePlateInput? plate) => plate is null ? null : plate with
+    {
+        Material = Of((Material)plate.Material),
+        Length = Read(plate.Length, BasePlateFields.Length),
+        Width = Read(plate.Width, BasePlateFields.Width),
+        Thickness = Read(plate.Thickness, BasePlateFields.Thickness),
+        RodDistance = Read(plate.RodDistance, BasePlateFields.RodDistance),
+        ConcreteStrength = Read(plate.ConcreteStrength, BasePlateFields.ConcreteStrength),
+        AreaRatio = Read(plate.AreaRatio, BasePlateFields.AreaRatio),
+        GroutThickness = Read(plate.GroutThickness, BasePlateFields.GroutThickness),
+        WeldLeg = Read(plate.WeldLeg, BasePlateFields.WeldLeg),
+        WeldStrength = Read(plate.WeldStrength, BasePlateFields.WeldStrength),
     };
 
     private Material Of(Material material) => material with

@@ -53,7 +53,8 @@ public static class Scenarios
         from rake in Gen.OneOf(Gen.Constant(0.0), Numbers.From(0, 60, 0.5))
         from wall in Gen.Elements(Enum.GetValues<WallKind>())
         from behind in Grounds.Wall
-        from barrier in Barriers.Any
+        from plain in Barriers.Any
+        from barrier in PostBases.Under(plain, Height(plain, rake), rake)
         from actions in Actions(barrier, rake)
         select new Opening
         {

@@ -1,5 +1,6 @@
 using FloodPanel.Calculation.Actions;
 using FloodPanel.Calculation.Posts;
+using FloodPanel.Calculation.ProjectTree;
 using FloodPanel.Calculation.Tests.Generated;
 using FsCheck.Xunit;
 
@@ -39,8 +40,9 @@ public class CantileverTests
 
     /// <summary>Base shear and moment with factors, and the tip by the unit-load theorem, each by Gauss's rule.</summary>
     [Property(MaxTest = 100, Arbitrary = [typeof(Scenarios)])]
-    public void Respond_AnyOpening_AgreesWithQuadrature(Scenario scenario)
+    public void Respond_AnyOpening_AgreesWithQuadrature(Scenario generated)
     {
+        var scenario = generated.With((Opening o) => o with { Barrier = o.Barrier with { Posts = o.Barrier.Posts is { } p ? p with { Raker = null } : null } });
         var model = scenario.Model;
         Assert.All(scenario.Result.Cases.Where(c => c.Name is not ("debris" or "line")), @case =>
         {
