@@ -126,6 +126,31 @@ internal static class Example
                 Profile = new ISection { Height = 0.1, Depth = 0.12, Flange = 0.01, Web = 0.006 },
                 Width = 0.1,
                 DeflectionLimit = 120,
+                WeldedBase = true,
+                Raker = new RakerInput
+                {
+                    Material = EveryFigure,
+                    Profile = new RectangularTube { Height = 0.06, Depth = 0.06, Wall = 0.004 },
+                    HeadHeight = 0.95,
+                    FootDistance = 1.25,
+                    LengthFactor = 0.9,
+                    Play = 0.0015,
+                    FootResistance = 14e3,
+                },
+            },
+            BasePlate = new BasePlateInput
+            {
+                Material = EveryFigure,
+                Length = 0.32,
+                Width = 0.21,
+                Thickness = 0.022,
+                RodDistance = 0.12,
+                RodsPerRow = 3,
+                ConcreteStrength = 30e6,
+                AreaRatio = 2.5,
+                GroutThickness = 0.03,
+                WeldLeg = 0.007,
+                WeldStrength = 480e6,
             },
             Anchors = new AnchorInput
             {

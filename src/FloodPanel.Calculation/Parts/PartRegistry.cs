@@ -35,7 +35,4 @@ internal static class PartRegistry
 
     /// <summary>Why needed checks have no result; a needed check without a gap is complete.</summary>
     public static IEnumerable<PartGap> Gaps(OpeningModel model) => Sources.SelectMany(source => source.Gaps(model));
-
-    private static PartSource NotEntered(string check, Func<OpeningModel, bool> isNeeded, Sentence text) => new(
-        (_, _, _) => [], model => isNeeded(model) ? [new(check, new($"{check}-missing", text))] : []);
 }

@@ -54,7 +54,7 @@ internal static class PostBaseValidation
         problems.Check(BasePlateFields.WeldStrength, plate.WeldStrength, path);
         if (length && rods && plate.RodDistance >= plate.Length / 2)
         {
-            problems.Add($"{path}.rodDistance", $"Rods from the middle is {Section(plate.RodDistance):typed}; allowed is less than half of the plate length, {Section(plate.Length / 2):typed}.");
+            problems.Add($"{path}.rodDistance", $"Distance of the rods from the middle is {Section(plate.RodDistance):typed}; allowed is less than half of the plate length, {Section(plate.Length / 2):typed}.");
         }
 
         if (opening.Barrier.Posts is not { } posts || library.Find(posts.Profile) is not { } post
@@ -76,7 +76,7 @@ internal static class PostBaseValidation
 
         if (rods && plate.RodDistance <= post.Depth / 2)
         {
-            problems.Add($"{path}.rodDistance", $"Rods from the middle is {Section(plate.RodDistance):typed}; allowed is more than half of the depth of the post, {Section(post.Depth / 2):typed}: rods beside the post are not covered.");
+            problems.Add($"{path}.rodDistance", $"Distance of the rods from the middle is {Section(plate.RodDistance):typed}; allowed is more than half of the depth of the post, {Section(post.Depth / 2):typed}: rods beside the post are not covered.");
         }
     }
 

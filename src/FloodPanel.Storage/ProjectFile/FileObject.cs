@@ -81,15 +81,6 @@ internal sealed class FileObject
     /// <summary>The items; none when the list is absent or null.</summary>
     public List<FileValue> List(string name) => Present(name)?.AsList() ?? [];
 
-    /// <summary>Accepts only null for a field that this version names but does not hold.</summary>
-    public void NotHeldYet(string name, string what)
-    {
-        if (Present(name) is { } value)
-        {
-            value.Refuse($"null, because this version does not hold {what} yet");
-        }
-    }
-
     /// <summary>Refuses every field that was not asked for.</summary>
     public void Close()
     {

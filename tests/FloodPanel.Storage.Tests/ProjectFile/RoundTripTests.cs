@@ -85,7 +85,7 @@ public class RoundTripTests
         Assert.Equal(
             "id name sillLevel groundLevel clearWidth clearHeight rake protectedSideLevel wall actions barrier leakage",
             Names(file["openings"]![0]!));
-        Assert.Equal("logs bays posts anchors guides footing byOthers", Names(file["openings"]![0]!["barrier"]!));
+        Assert.Equal("logs bays posts basePlate anchors guides footing byOthers", Names(file["openings"]![0]!["barrier"]!));
         Assert.Equal("flow wave debris wind line", Names(file["openings"]![0]!["actions"]!));
     }
 
