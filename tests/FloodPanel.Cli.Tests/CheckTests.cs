@@ -70,7 +70,7 @@ public class CheckTests
         Assert.Equal("kind resultant centreOfPressure", Names(loadCase["actions"]![0]!));
         Assert.Equal("index bay bottom top lineLoad moment shear deflection utilisation", Names(loadCase["logs"]![0]!));
         Assert.Equal("bending shear deflection", Names(loadCase["logs"]![0]!["utilisation"]!));
-        Assert.Equal("index baseShear baseMoment tipDeflection utilisation", Names(loadCase["posts"]![0]!));
+        Assert.Equal("index baseShear baseMoment tipDeflection utilisation checks", Names(loadCase["posts"]![0]!));
         Assert.Equal("side reaction peakLineReaction", Names(loadCase["guides"]![0]!));
         Assert.Equal("code text", Names(opening["notes"]![0]!));
     }

@@ -96,9 +96,13 @@ internal static class BasePlateReport
         shear.Add("V_1", "V/(2·n)", setting.Response.ShearPerRod, Dimension.Force);
         var workings = new List<Working>
         {
-            new("Tension of a row of rods", BasePlates.Source, setting.UntilTension().Done()),
             new("Shear of each rod", "Equal shares", shear.Done()),
         };
+        if (setting.Response.Kind != BearingKind.NoTension)
+        {
+            workings.Insert(0, new("Tension of a row of rods", BasePlates.Source, setting.UntilTension().Done()));
+        }
+
         if (Triangle(setting) is { } triangle)
         {
             workings.Add(triangle);
@@ -110,7 +114,7 @@ internal static class BasePlateReport
     private static Working? Triangle(PlateSetting setting)
     {
         var (plate, response) = (setting.Plate, setting.Response);
-        if (response.Kind == BearingKind.AllTension || BasePlates.TriangularLength(
+        if (response.Kind != BearingKind.StressBlock || BasePlates.TriangularLength(
                 response.BearingStrength, plate.Width, setting.Reach, plate.RodDistance, -setting.Uplift, setting.Moment) is not { } length)
         {
             return null;

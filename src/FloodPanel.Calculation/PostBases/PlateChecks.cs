@@ -16,17 +16,34 @@ internal static class PlateChecks
             return null;
         }
 
+        if (setting.Response.Kind == BearingKind.NoTension)
+        {
+            return Pressure(setting);
+        }
+
         var capacity = setting.PerLength * setting.Reach * setting.Reach / 2;
         var steps = setting.Forces();
         setting.Bearing(steps);
         steps.Add("M_c", "q·r²/2", capacity, Dimension.Moment);
         steps.Add("u", "M_f/M_c", setting.AboutRods / capacity, Dimension.Ratio);
-        var kind = setting.Basis.Kind;
-        var block = kind == DesignBasisKind.Eurocode ? BlockEurocode : BasePlates.Source;
         return new(
-            "base-plate-bearing", "Bearing of the concrete under the plate", $"{block}; {ConcreteBearing.Source(kind)}", Dimension.Moment,
+            "base-plate-bearing", "Bearing of the concrete under the plate", BearingSource(setting.Basis.Kind), Dimension.Moment,
             setting.AboutRods, capacity, steps.Done());
     }
+
+    /// <summary>f_p against f_max where the concrete alone balances the moment.</summary>
+    private static Check Pressure(PlateSetting setting)
+    {
+        var response = setting.Response;
+        var steps = setting.UntilTension();
+        steps.Add("u", "f_p/f_max", response.Bearing / response.BearingStrength, Dimension.Ratio);
+        return new(
+            "base-plate-bearing", "Bearing of the concrete under the plate", BearingSource(setting.Basis.Kind), Dimension.Stress,
+            response.Bearing, response.BearingStrength, steps.Done());
+    }
+
+    private static string BearingSource(DesignBasisKind kind) =>
+        $"{(kind == DesignBasisKind.Eurocode ? BlockEurocode : BasePlates.Source)}; {ConcreteBearing.Source(kind)}";
 
     /// <summary>Thickness needed where the concrete presses; null where nothing does.</summary>
     public static Check? PressedSide(PlateSetting setting, DesignStress stress)
@@ -48,7 +65,7 @@ internal static class PlateChecks
             "l", setting.Post.Profile is ISection ? "max((N_p − 0.95·d)/2, (B − 0.80·b)/2)" : "max((N_p − 0.95·d)/2, (B − 0.95·b)/2)",
             overhang, Dimension.SectionLength);
         var isLong = response.BlockLength >= overhang;
-        steps.Add("m_c", isLong ? "q/B·l²/2" : "q/B·Y·(l − Y/2)", moment, Dimension.Force);
+        steps.Add("m_c", isLong ? "f_p·l²/2" : "f_p·Y·(l − Y/2)", moment, Dimension.Force);
         steps.Stress("f_b", stress);
         steps.Add("t_c", isElastic ? "√(6·m_c/f_b)" : "√(4·m_c/f_b)", needed, Dimension.SectionLength);
         var source = isElastic ? "Plate bending at the elastic moment, as the spread of EN 1993-1-8, 6.2.5(4)" : "AISC Design Guide 1, 3rd ed., 4.3";

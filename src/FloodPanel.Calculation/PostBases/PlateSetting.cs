@@ -30,8 +30,11 @@ internal sealed class PlateSetting
     /// <summary>V [N].</summary>
     public double Shear { get; }
 
-    /// <summary>T_u, uplift by a raker [N].</summary>
+    /// <summary>T_u, uplift by a raker [N]; negative where it presses down.</summary>
     public double Uplift { get; }
+
+    /// <summary>The uplift, where there is any: pressing down spares a weld.</summary>
+    public double Lift => Math.Max(0, Uplift);
 
     public BasePlateResponse Response { get; }
 
@@ -78,15 +81,23 @@ internal sealed class PlateSetting
         }
 
         Bearing(steps);
+        if (Response.Kind == BearingKind.NoTension)
+        {
+            steps.Add("Y", "N_p + 2·M/T_u", Response.BlockLength, Dimension.SectionLength);
+            steps.Add("f_p", "(0 − T_u)/(B·Y)", Response.Bearing, Dimension.Stress);
+            return steps;
+        }
+
         if (Response.IsBalanced)
         {
             steps.Add("Y", "r − √(r² − 2·M_f/q)", Response.BlockLength, Dimension.SectionLength);
-            steps.Add("T", "q·Y + T_u", Response.Tension, Dimension.Force);
+            steps.Add("T", "max(0, q·Y + T_u)", Response.Tension, Dimension.Force);
+            steps.Add("f_p", Response.BlockLength > 0 ? "f_max" : "", Response.Bearing, Dimension.Stress);
         }
         else
         {
             steps.Add("Y", "r", Response.BlockLength, Dimension.SectionLength);
-            steps.Add("T", "M_f/(r/2) + T_u", Response.Tension, Dimension.Force);
+            steps.Add("T", "max(0, M_f/(r/2) + T_u)", Response.Tension, Dimension.Force);
         }
 
         return steps;

@@ -54,13 +54,13 @@ internal static class WeldChecks
         {
             var web = d - 2 * section.Flange;
             yield return (
-                new("weld-flange", "Weld of the flange", (setting.Moment / d + setting.Uplift / 2) / b, 0, 1.5),
+                new("weld-flange", "Weld of the flange", (setting.Moment / d + setting.Lift / 2) / b, 0, 1.5),
                 () => Flange(setting));
             yield return (new("weld-web", "Weld of the web", 0, setting.Shear / (2 * web), 1), () => Web(setting, section));
             yield break;
         }
 
-        var across = setting.Moment / FilletWelds.RectangleModulus(b, d) + setting.Uplift / (2 * (b + d));
+        var across = setting.Moment / FilletWelds.RectangleModulus(b, d) + setting.Lift / (2 * (b + d));
         yield return (new("weld", "Weld round the post", across, setting.Shear / (2 * d), 1), () => Round(setting));
     }
 
@@ -71,7 +71,7 @@ internal static class WeldChecks
     {
         var steps = Given(setting);
         steps.Given("b", setting.Post.Section.Height, Dimension.SectionLength);
-        steps.Add("q_n", "(M/d + T_u/2)/b", (setting.Moment / setting.Post.Section.Depth + setting.Uplift / 2) / setting.Post.Section.Height, Dimension.LineForce);
+        steps.Add("q_n", "(M/d + T_u/2)/b", (setting.Moment / setting.Post.Section.Depth + setting.Lift / 2) / setting.Post.Section.Height, Dimension.LineForce);
         steps.Given("q_v", 0, Dimension.LineForce);
         return steps;
     }
@@ -95,7 +95,7 @@ internal static class WeldChecks
         steps.Given("b", b, Dimension.SectionLength);
         steps.Given("V", setting.Shear, Dimension.Force);
         steps.Add("W_l", "d²/3 + b·d", modulus, Dimension.SectionArea);
-        steps.Add("q_n", "M/W_l + T_u/(2·(b + d))", setting.Moment / modulus + setting.Uplift / (2 * (b + d)), Dimension.LineForce);
+        steps.Add("q_n", "M/W_l + T_u/(2·(b + d))", setting.Moment / modulus + setting.Lift / (2 * (b + d)), Dimension.LineForce);
         steps.Add("q_v", "V/(2·d)", setting.Shear / (2 * d), Dimension.LineForce);
         return steps;
     }
@@ -104,7 +104,7 @@ internal static class WeldChecks
     {
         var steps = new StepList(18);
         steps.Given("M", setting.Moment, Dimension.Moment);
-        steps.Given("T_u", setting.Uplift, Dimension.Force);
+        steps.Given("T_u", setting.Lift, Dimension.Force);
         steps.Given("d", setting.Post.Section.Depth, Dimension.SectionLength);
         return steps;
     }

@@ -25,7 +25,7 @@ public readonly record struct PostResponse(
     /// <summary>V, greatest design shear force in the post [N]: at the base of a cantilever.</summary>
     public double PeakShear => Prop?.PeakShear ?? BaseShear;
 
-    /// <summary>Design uplift on the base along the post [N], ≥ 0; 0 without a raker.</summary>
+    /// <summary>Design uplift on the base along the post [N], negative where it is pressed down; 0 without a raker.</summary>
     public double Uplift => Prop?.Uplift ?? 0;
 }
 

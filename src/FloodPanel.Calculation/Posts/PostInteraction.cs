@@ -2,7 +2,7 @@ using FloodPanel.Calculation.ProjectTree;
 
 namespace FloodPanel.Calculation.Posts;
 
-/// <summary>Bending together with shear, and with the tension that a raker puts into the post.</summary>
+/// <summary>Bending together with shear, and with the axial force that a raker puts into the post.</summary>
 public static class PostInteraction
 {
     /// <summary>ρ, part of the yield strength that shear takes from the webs.</summary>
@@ -81,7 +81,7 @@ public static class PostInteraction
         return kind == DesignBasisKind.Eurocode ? Eurocode(steps, response, post) : Aluminium(steps, response, post);
     }
 
-    /// <summary>M and the tension T_u of a raker; null without one or without a design stress.</summary>
+    /// <summary>M and the axial force T_u of a raker; null without one or without a design stress.</summary>
     internal static Check? WithTension(in PostResponse response, Member post)
     {
         if (response.Prop is not { } prop || post.Bending is not { } stress)
@@ -89,17 +89,17 @@ public static class PostInteraction
             return null;
         }
 
-        var combined = response.PeakMoment / post.Section.Modulus + prop.Uplift / post.Section.Area;
+        var combined = response.PeakMoment / post.Section.Modulus + Math.Abs(prop.Uplift) / post.Section.Area;
         var steps = new StepList(8);
         steps.Given("M", response.PeakMoment, Dimension.Moment);
         steps.Given("T_u", prop.Uplift, Dimension.Force);
         steps.Given("W", post.Section.Modulus, Dimension.SectionModulus);
         steps.Given("A", post.Section.Area, Dimension.SectionArea);
-        steps.Add("σ", "M/W + T_u/A", combined, Dimension.Stress);
+        steps.Add("σ", "M/W + √(T_u²)/A", combined, Dimension.Stress);
         steps.Stress("f_b", stress);
         steps.Add("u", "σ/f_b", combined / stress.Value, Dimension.Ratio);
         return new(
-            "post-bending-tension", "Post bending and tension", $"Elastic stresses added; {stress.Source}", Dimension.Stress,
+            "post-bending-axial", "Post bending and axial force", $"Elastic stresses added; {stress.Source}", Dimension.Stress,
             combined, stress.Value, steps.Done());
     }
 

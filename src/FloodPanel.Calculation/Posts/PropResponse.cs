@@ -9,7 +9,7 @@ namespace FloodPanel.Calculation.Posts;
 /// <param name="FixedHeadForce">R_f, force of the raker normal to the post with a fixed base [N].</param>
 /// <param name="PinnedHeadForce">R_p, the same with a base that turns [N].</param>
 /// <param name="Compression">N, axial force of the raker [N], the greater of both.</param>
-/// <param name="Uplift">T_u, tension in the post and uplift on its base [N].</param>
+/// <param name="Uplift">T_u, tension in the post and uplift on its base [N]; negative where the raker presses a raked post down.</param>
 /// <param name="Thrust">H, horizontal force on the foot of the raker [N].</param>
 /// <param name="FixedBaseMoment">M_f, base moment with a fixed base [N·m].</param>
 /// <param name="CantileverShear">V_0, base shear without the raker [N].</param>

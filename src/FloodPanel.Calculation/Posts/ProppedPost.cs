@@ -3,9 +3,9 @@ using MathNet.Numerics.LinearAlgebra;
 namespace FloodPanel.Calculation.Posts;
 
 /// <summary>
-/// A post held by a raker, by direct stiffness: beam elements from the base to the head and from the head to the top, the raker a spring
-/// k = E·A/L·cos²φ at the head. The loads of an element stand on its nodes by its shape functions, so that its nodes are exact; between
-/// them moments, shears and deflections follow by integration.
+/// A post held by a raker, by direct stiffness: a beam element from the base to the head, the raker a spring k = E·A/L·cos²φ at the head, the part
+/// above hanging on the head by its shear and moment. The loads of the element stand on its nodes by its shape functions, so that these are exact;
+/// between them moments, shears and deflections follow by integration.
 /// </summary>
 public sealed class ProppedPost
 {
@@ -45,18 +45,18 @@ public sealed class ProppedPost
             return new(load, length, stiffness, head, 0, 0);
         }
 
-        var (all, forces) = Assemble(load, head < length ? [0, head, length] : [0, head], stiffness);
-        const int atHead = 2;
-        all[atHead, atHead] += raker.Stiffness;
-        forces[atHead] += raker.Stiffness * raker.Play;
+        var (all, forces) = Assemble(load, head, stiffness, raker);
+
+        // With a base that turns, play only leans the whole post over.
+        forces[forces.Count - 1] = isPinned ? 0 : raker.Play;
         var held = isPinned ? 1 : 2;
         var moved = all.SubMatrix(held, all.RowCount - held, held, all.RowCount - held)
-            .Cholesky().Solve(forces.SubVector(held, forces.Count - held));
-        var force = raker.Stiffness * (moved[atHead - held] - raker.Play);
+            .LU().Solve(forces.SubVector(held, forces.Count - held));
+        var force = moved[^1] * stiffness;
 
         // A raker that is not reached does not pull; a base that turns always reaches it.
         return isPinned || force > 0
-            ? new(load, length, stiffness, head, force, isPinned ? moved[0] : 0)
+            ? new(load, length, stiffness, head, force, isPinned ? moved[0] + raker.Play / head : 0)
             : new(load, length, stiffness, head, 0, 0);
     }
 
@@ -146,24 +146,28 @@ public sealed class ProppedPost
     /// <summary>6·E·I times the deflection at s under a unit force at t.</summary>
     private static double Influence(double s, double t) => s <= t ? s * s * (3 * t - s) : t * t * (3 * s - t);
 
-    private static (Matrix<double> Stiffness, Vector<double> Forces) Assemble(SlopeLoad load, double[] nodes, double stiffness)
+    /// <summary>
+    /// Stiffness and loads over E·I, and a last line for the raker: v at the head less R/k is the play. Its flexibility, not its stiffness, so
+    /// that a stiff raker costs no digits.
+    /// </summary>
+    private static (Matrix<double> Stiffness, Vector<double> Forces) Assemble(SlopeLoad load, double head, double stiffness, RakerModel raker)
     {
-        var all = Matrix<double>.Build.Dense(2 * nodes.Length, 2 * nodes.Length);
-        var forces = Vector<double>.Build.Dense(2 * nodes.Length);
-        for (var i = 0; i + 1 < nodes.Length; i++)
-        {
-            var (from, to) = (nodes[i], i + 2 < nodes.Length ? nodes[i + 1] : double.PositiveInfinity);
-            var size = nodes[i + 1] - from;
-            AddStiffness(all, 2 * i, size, stiffness);
-            AddLoads(forces, 2 * i, size, from, load.Between(from, to));
-        }
-
+        const int atHead = 2, last = 4;
+        var all = Matrix<double>.Build.Dense(last + 1, last + 1);
+        var forces = Vector<double>.Build.Dense(last + 1);
+        (all[last, atHead], all[atHead, last], all[last, last]) = (1, 1, -stiffness / raker.Stiffness);
+        AddStiffness(all, head);
+        AddLoads(forces, head, load.Between(0, head));
+        var above = load.Between(head, double.PositiveInfinity);
+        forces[atHead] += above.Zero;
+        forces[atHead + 1] += above.First - head * above.Zero;
+        forces.Divide(stiffness, forces);
         return (all, forces);
     }
 
-    private static void AddStiffness(Matrix<double> all, int at, double l, double stiffness)
+    private static void AddStiffness(Matrix<double> all, double l)
     {
-        var (force, turn, near, far) = (12 * stiffness / (l * l * l), 6 * stiffness / (l * l), 4 * stiffness / l, 2 * stiffness / l);
+        var (force, turn, near, far) = (12 / (l * l * l), 6 / (l * l), 4 / l, 2 / l);
         double[,] element =
         {
             { force, turn, -force, turn },
@@ -175,20 +179,18 @@ public sealed class ProppedPost
         {
             for (var column = 0; column < 4; column++)
             {
-                all[at + row, at + column] += element[row, column];
+                all[row, column] += element[row, column];
             }
         }
     }
 
-    /// <summary>∫q·N ds of the four cubic shape functions, from the moments of the load about the start of the element.</summary>
-    private static void AddLoads(Vector<double> forces, int at, double l, double from, LoadMoments about)
+    /// <summary>∫q·N ds of the four cubic shape functions, from the moments of the load about the base.</summary>
+    private static void AddLoads(Vector<double> forces, double l, LoadMoments about)
     {
-        var first = (about.First - from * about.Zero) / l;
-        var second = (about.Second - 2 * from * about.First + from * from * about.Zero) / (l * l);
-        var third = (about.Third - 3 * from * about.Second + 3 * from * from * about.First - from * from * from * about.Zero) / (l * l * l);
-        forces[at] += about.Zero - 3 * second + 2 * third;
-        forces[at + 1] += l * (first - 2 * second + third);
-        forces[at + 2] += 3 * second - 2 * third;
-        forces[at + 3] += l * (third - second);
+        var (first, second, third) = (about.First / l, about.Second / (l * l), about.Third / (l * l * l));
+        forces[0] += about.Zero - 3 * second + 2 * third;
+        forces[1] += l * (first - 2 * second + third);
+        forces[2] += 3 * second - 2 * third;
+        forces[3] += l * (third - second);
     }
 }
