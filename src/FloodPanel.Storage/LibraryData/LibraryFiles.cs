@@ -8,6 +8,8 @@ public static class LibraryFiles
     private static readonly string[] MaterialColumns =
     [
         "id", "title", "family", "density_kg_m3", "elastic_modulus_GPa", "bending_strength_MPa", "shear_strength_MPa",
+        "ultimate_strength_MPa", "welded_yield_MPa", "welded_ultimate_MPa", "shear_modulus_GPa", "cross_strength_MPa",
+        "cross_compression_MPa", "characteristic_density_kg_m3", "buckling_class", "strength_reference",
         "source", "shear_source", "evidence",
     ];
 
@@ -50,6 +52,15 @@ public static class LibraryFiles
         ElasticModulus = row.Number("elastic_modulus_GPa", Fields.ElasticModulus),
         BendingStrength = row.Number("bending_strength_MPa", Fields.BendingStrength),
         ShearStrength = row.Number("shear_strength_MPa", Fields.ShearStrength),
+        UltimateStrength = row.NumberOrNull("ultimate_strength_MPa", MaterialFields.UltimateStrength),
+        WeldedYield = row.NumberOrNull("welded_yield_MPa", MaterialFields.WeldedYield),
+        WeldedUltimate = row.NumberOrNull("welded_ultimate_MPa", MaterialFields.WeldedUltimate),
+        ShearModulus = row.NumberOrNull("shear_modulus_GPa", MaterialFields.ShearModulus),
+        CrossStrength = row.NumberOrNull("cross_strength_MPa", MaterialFields.CrossStrength),
+        CrossCompression = row.NumberOrNull("cross_compression_MPa", MaterialFields.CrossCompression),
+        CharacteristicDensity = row.NumberOrNull("characteristic_density_kg_m3", MaterialFields.CharacteristicDensity),
+        BucklingClass = row.WordOrNull("buckling_class", FileWords.Buckling),
+        Reference = row.Word("strength_reference", FileWords.Reference),
     };
 
     private static Rectangle ReadRectangle(LibraryRow row)

@@ -47,6 +47,10 @@ internal sealed class LibraryRow(CsvReader csv, string file, List<string> proble
         return value;
     }
 
+    /// <summary>The word; null where the field is empty.</summary>
+    public T? WordOrNull<T>(string column, Words<T> words)
+        where T : struct => csv.GetString(column).Length == 0 ? null : Word(column, words);
+
     /// <summary>A number in the unit in which its dimension is shown, which is the one named in the column's header.</summary>
     public double Number(string column, Field field)
     {
@@ -60,6 +64,9 @@ internal sealed class LibraryRow(CsvReader csv, string file, List<string> proble
         Refuse($"{column} is \"{text}\"; allowed is a number {field.Allowed}");
         return 0;
     }
+
+    /// <summary>The number; null where the field is empty.</summary>
+    public double? NumberOrNull(string column, Field field) => csv.GetString(column).Length == 0 ? null : Number(column, field);
 
     public int WholeNumber(string column, Field field)
     {
