@@ -19,6 +19,28 @@ public class CheckTests
         Assert.Empty(run.Result["openings"]![0]!["missing"]!.AsArray());
     }
 
+    /// <summary>A wall with a resistance is a part in each case, with its checks; without inputs there is no list.</summary>
+    [Fact]
+    public void Check_WallWithResistance_WritesItsChecksInEachCase()
+    {
+        using var file = new ProjectOnDisk(project => project["openings"]![0]!["wall"] = JsonNode.Parse(
+            """{ "kind": "reinforced-concrete", "measure": "resistance", "totalResistance": 50000, "source": "Drawing W-1" }"""));
+
+        var cases = Invocation.Of("check", file.Path).Result["openings"]![0]!["cases"]!.AsArray();
+
+        Assert.All(cases, loadCase =>
+        {
+            var part = loadCase!["parts"]![0]!;
+            Assert.Equal(("supporting-wall", "left wall"), (part["check"]!.GetValue<string>(), part["member"]!.GetValue<string>()));
+            var check = part["checks"]![0]!;
+            Assert.Equal("wall-reaction", check["name"]!.GetValue<string>());
+            Assert.Equal(loadCase["guides"]![0]!["reaction"]!.GetValue<double>(), check["demand"]!.GetValue<double>());
+            Assert.Equal(check["demand"]!.GetValue<double>() / 50_000, check["utilisation"]!.GetValue<double>(), 1e-12);
+        });
+        var plain = Invocation.Of("check", Invocation.Sample("sample-project.json")).Result["openings"]![0]!["cases"]!.AsArray();
+        Assert.All(plain, loadCase => Assert.Null(loadCase!["parts"]));
+    }
+
     [Fact]
     public void Check_OpeningWithChecksMissing_Returns1()
     {
