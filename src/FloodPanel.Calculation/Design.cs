@@ -1,5 +1,6 @@
 using FloodPanel.Calculation.Actions;
 using FloodPanel.Calculation.Cases;
+using FloodPanel.Calculation.Covers;
 using FloodPanel.Calculation.Handling;
 using FloodPanel.Calculation.Leakage;
 using FloodPanel.Calculation.Parts;
@@ -11,12 +12,26 @@ namespace FloodPanel.Calculation;
 /// <summary>The entry to the calculation: pure, synchronous, without I/O.</summary>
 public static class Design
 {
-    /// <summary>Calculates every opening of a project.</summary>
+    /// <summary>Calculates every opening and cover of a project.</summary>
     /// <param name="project">A project without problems, see <see cref="Validation.Validate"/>.</param>
     /// <param name="library">The materials and profiles it may name.</param>
-    /// <exception cref="ArgumentException">The site or an opening has problems that <see cref="Validation.Validate"/> would name.</exception>
+    /// <exception cref="ArgumentException">The site, an opening or a cover has problems that <see cref="Validation.Validate"/> would name.</exception>
     public static ProjectResult Run(Project project, Library library) =>
-        new(project, [.. project.Openings.Select(o => Evaluate(project, o, library))]);
+        new(
+            project,
+            [.. project.Openings.Select(o => Evaluate(project, o, library))],
+            [.. project.Covers.Select(c => Evaluate(project, c, library))]);
+
+    /// <summary>Calculates one cover of a project.</summary>
+    /// <param name="project">The project: its site and design basis apply.</param>
+    /// <param name="cover">A cover without problems, see <see cref="Validation.Validate"/>.</param>
+    /// <param name="library">The materials that it may name.</param>
+    /// <exception cref="ArgumentException">The site or the cover has problems that <see cref="Validation.Validate"/> would name.</exception>
+    public static CoverResult Evaluate(Project project, Cover cover, Library library)
+    {
+        RefuseProblems(Validation.Problems(project, cover, library), nameof(cover));
+        return CoverReport.Of(project.Site, cover, library.BasisOf(project), library);
+    }
 
     /// <summary>Calculates one opening of a project.</summary>
     /// <param name="project">The project: its site and design basis apply.</param>

@@ -1,5 +1,6 @@
 using FloodPanel.Calculation.Actions;
 using FloodPanel.Calculation.Cases;
+using FloodPanel.Calculation.Covers;
 using FloodPanel.Calculation.Handling;
 using FloodPanel.Calculation.Leakage;
 using FloodPanel.Calculation.Parts;
@@ -10,7 +11,8 @@ namespace FloodPanel.Calculation;
 /// <summary>The calculation of a project: never stored, always made anew from the inputs.</summary>
 /// <param name="Project">The inputs.</param>
 /// <param name="Openings">One result for each opening, in their order.</param>
-public sealed record ProjectResult(Project Project, IReadOnlyList<OpeningResult> Openings);
+/// <param name="Covers">One result for each cover, in their order.</param>
+public sealed record ProjectResult(Project Project, IReadOnlyList<OpeningResult> Openings, IReadOnlyList<CoverResult> Covers);
 
 /// <summary>May the barrier be used as it stands?</summary>
 public enum VerdictKind

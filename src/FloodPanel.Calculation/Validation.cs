@@ -38,6 +38,11 @@ public static class Validation
             ValidateOpening(project.Site, opening, path, problems, library);
         }
 
+        for (var i = 0; i < project.Covers.Count; i++)
+        {
+            CoverValidation.Validate(project.Site, project.Covers[i], $"covers[{i}]", problems, library);
+        }
+
         return problems.Problems;
     }
 
@@ -51,6 +56,16 @@ public static class Validation
         BasisValidation.Validate(project, problems);
         ValidateSite(project.Site, problems);
         ValidateOpening(project.Site, opening, "openings[0]", problems, library);
+        return problems.Problems;
+    }
+
+    /// <summary>Problems of one cover, the site and the basis, with the paths that they have in a project of their own.</summary>
+    internal static IReadOnlyList<InputProblem> Problems(Project project, Cover cover, Library library)
+    {
+        var problems = new ProblemList();
+        BasisValidation.Validate(project, problems);
+        ValidateSite(project.Site, problems);
+        CoverValidation.Validate(project.Site, cover, "covers[0]", problems, library);
         return problems.Problems;
     }
 

@@ -93,7 +93,7 @@ internal static class CaseWriter
         json.WriteEndArray();
     }
 
-    private static void WriteChecks(Utf8JsonWriter json, IReadOnlyList<Check> checks)
+    internal static void WriteChecks(Utf8JsonWriter json, IReadOnlyList<Check> checks)
     {
         json.WriteStartArray("checks");
         foreach (var check in checks)

@@ -20,8 +20,9 @@ internal static class CheckCommand
         var result = Design.Run(project, library);
         output.Write(ResultWriter.Write(result));
 
-        // Without an opening nothing was shown to be adequate.
-        var allAdequate = result.Openings.Count > 0 && result.Openings.All(o => o.Verdict.Kind == VerdictKind.Adequate);
+        // Without an opening or a cover nothing was shown to be adequate.
+        VerdictKind[] verdicts = [.. result.Openings.Select(o => o.Verdict.Kind), .. result.Covers.Select(c => c.Kind)];
+        var allAdequate = verdicts.Length > 0 && verdicts.All(kind => kind == VerdictKind.Adequate);
         return allAdequate ? ExitCode.Adequate : ExitCode.NotAdequate;
     }
 

@@ -31,6 +31,7 @@ internal static class ResultWriter
             }
 
             json.WriteEndArray();
+            CoverWriter.Write(json, result.Covers);
             json.WriteEndObject();
         }
 
@@ -99,7 +100,7 @@ internal static class ResultWriter
         json.WriteEndObject();
     }
 
-    private static void WriteNotes(Utf8JsonWriter json, IReadOnlyList<Note> notes)
+    internal static void WriteNotes(Utf8JsonWriter json, IReadOnlyList<Note> notes)
     {
         json.WriteStartArray("notes");
         foreach (var note in notes)
@@ -113,7 +114,7 @@ internal static class ResultWriter
         json.WriteEndArray();
     }
 
-    private static string Word(VerdictKind verdict) => verdict switch
+    internal static string Word(VerdictKind verdict) => verdict switch
     {
         VerdictKind.Adequate => "adequate",
         VerdictKind.Inadequate => "inadequate",

@@ -79,6 +79,37 @@ public class CheckTests
         Assert.Empty(run.Result["openings"]!.AsArray());
     }
 
+    /// <summary>A cover counts as an opening does: its verdict decides too, and it may stand alone.</summary>
+    [Theory]
+    [InlineData(0.01, "adequate", 0)]
+    [InlineData(0.001, "inadequate", 1)]
+    public void Check_ProjectOfACover_VerdictDecides(double thickness, string verdict, int exitCode)
+    {
+        using var file = new ProjectOnDisk(project =>
+        {
+            project["openings"] = new JsonArray();
+            project["site"] = JsonNode.Parse("""{ "designStillWaterLevel": 12.35 }""");
+            project["covers"] = new JsonArray(JsonNode.Parse($$"""
+                {
+                  "name": "Vent", "plate": { "shape": "rectangle", "width": 0.6, "height": 0.4 }, "level": 11.4, "material": "s235",
+                  "thickness": {{thickness.ToString(System.Globalization.CultureInfo.InvariantCulture)}},
+                  "pressing": "unseating", "fasteners": { "pitch": 0.1, "tension": 2000, "source": "Approval" }
+                }
+                """));
+        });
+
+        var run = Invocation.Of("check", file.Path);
+
+        var cover = run.Result["covers"]![0]!;
+        Assert.Equal((exitCode, ""), (run.ExitCode, run.Errors));
+        Assert.Equal(verdict, cover["verdict"]!.GetValue<string>());
+        Assert.Equal("name verdict depth edgeReaction cornerForce fasteners checks notes", Names(cover));
+        Assert.Equal(
+            ["cover-bending", "cover-deflection", "cover-fastener-tension"],
+            cover["checks"]!.AsArray().Select(c => c!["name"]!.GetValue<string>()));
+        Assert.Equal(0.95, cover["depth"]!.GetValue<double>());
+    }
+
     [Fact]
     public void Check_Result_HasTheNamesOfTheFormat()
     {

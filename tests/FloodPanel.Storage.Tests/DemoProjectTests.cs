@@ -30,4 +30,13 @@ public class DemoProjectTests
             openings.Where(o => o.Verdict.Kind != VerdictKind.Inadequate),
             o => Assert.InRange(o.Verdict.Governing!.Utilisation, 0.4, 0.95));
     }
+
+    [Fact]
+    public void Demo_Calculated_CoverIsAdequateAndNotIdle()
+    {
+        var cover = Assert.Single(Design.Run(Example.Read(file), library).Covers);
+
+        Assert.Equal(VerdictKind.Adequate, cover.Kind);
+        Assert.InRange(cover.Governing!.Utilisation, 0.4, 0.95);
+    }
 }

@@ -51,6 +51,7 @@ internal static class Example
             Levels = [new LevelPoint(0.01, 12.2), new LevelPoint(0.005, 12.35)],
         },
         Openings = [Dock, Hatch],
+        Covers = [Vent, Port],
     };
 
     public static string SamplePath(string name) => Path.Combine(AppContext.BaseDirectory, "Samples", name);
@@ -244,6 +245,30 @@ internal static class Example
             InteractionLimit = 1.1,
             Source = "Pull tests of March",
         },
+    };
+
+    private static Cover Vent => new()
+    {
+        Name = "Cellar vent",
+        Plate = new RectangleCover { Width = 0.75, Height = 0.45, Support = RectangleSupport.ThreeEdges },
+        Level = 11.2,
+        Material = new LibraryMaterial("s275"),
+        Thickness = 0.008,
+        PoissonRatio = 0.29,
+        DeflectionLimit = 180,
+        Pressing = CoverPressing.Unseating,
+        Fasteners = new CoverFasteners { Pitch = 0.14, GasketLoad = 900, FixingLever = 0.035, Tension = 5200, Source = "Approval C-3" },
+    };
+
+    private static Cover Port => new()
+    {
+        Name = "Cable port",
+        Plate = new CircleCover { Diameter = 0.35, Support = CircleSupport.Clamped },
+        Position = CoverPosition.Flat,
+        Level = 10.9,
+        Material = EveryFigure,
+        Thickness = 0.005,
+        Fasteners = new CoverFasteners { Pitch = 0.1 },
     };
 
     private static Opening Hatch => new()

@@ -29,6 +29,9 @@ public sealed record Project
 
     /// <summary>The gaps to be closed.</summary>
     public ValueList<Opening> Openings { get; init; } = [];
+
+    /// <summary>Plates over vents, hatches and odd gaps.</summary>
+    public ValueList<Cover> Covers { get; init; } = [];
 }
 
 /// <summary>The rule set for factors on loads and strengths.</summary>

@@ -15,5 +15,6 @@ public static class VerificationTable
         .. MemberRows.Rows(),
         .. GuideRows.Rows(),
         .. LeakageRows.Rows(),
+        .. CoverRows.Rows(),
     ];
 }

@@ -96,6 +96,7 @@ public static class ProjectFileReader
             OwnBasis = file.Object("ownBasis") is { } basis ? BasisReader.Read(basis, kind) : null,
             Site = file.NeededObject("site") is { } site ? ReadSite(site) : blank.Site,
             Openings = file.List("openings").Select(OpeningReader.Read).ToValueList(),
+            Covers = file.List("covers").Select(CoverFile.Read).ToValueList(),
         };
         file.Close();
         return project;

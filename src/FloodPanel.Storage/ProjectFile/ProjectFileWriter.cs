@@ -61,6 +61,7 @@ public static class ProjectFileWriter
         }
 
         json.WriteEndArray();
+        CoverFile.Write(json, project.Covers);
         json.WriteEndObject();
     }
 

@@ -81,7 +81,7 @@ public class RoundTripTests
     {
         var file = Example.FullJson();
 
-        Assert.Equal("format version name reference client address engineer designBasis ownBasis site openings", Names(file));
+        Assert.Equal("format version name reference client address engineer designBasis ownBasis site openings covers", Names(file));
         Assert.Equal(
             "id name sillLevel groundLevel clearWidth clearHeight rake protectedSideLevel wall actions barrier leakage",
             Names(file["openings"]![0]!));
