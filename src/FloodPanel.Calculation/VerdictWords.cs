@@ -44,9 +44,12 @@ internal static class VerdictWords
         var check = Capitalised(governing.Check);
         var where = governing.Case is { } name ? $" in the {CaseNames.InWords(name)} case" : "";
         var utilisation = Shown(governing.Utilisation);
-        return kind == VerdictKind.Inadequate
-            ? $"{check}{where} governs, at {utilisation} of the allowable."
-            : $"Of what is checked, {check.ToLowerInvariant()}{where} governs, at {utilisation} of the allowable.";
+        return kind switch
+        {
+            VerdictKind.Inadequate => $"{check}{where} governs, at {utilisation} of the allowable.",
+            VerdictKind.Adequate => $"Every check made here passes; {check.ToLowerInvariant()}{where} governs, at {utilisation} of the allowable.",
+            _ => $"Of what is checked, {check.ToLowerInvariant()}{where} governs, at {utilisation} of the allowable.",
+        };
     }
 
     private static string Capitalised(string check)

@@ -28,7 +28,7 @@ public class VerdictWordsTests
     {
         var project = Refused.With((Barrier b) => b with { ByOthers = SampleProject.AllByOthers });
 
-        Assert.StartsWith("Adequate. Of what is checked, ", SampleProject.Result(project).Verdict.Sentence.ToString(), StringComparison.Ordinal);
+        Assert.StartsWith("Adequate. Every check made here passes; ", SampleProject.Result(project).Verdict.Sentence.ToString(), StringComparison.Ordinal);
     }
 
     /// <summary>A barrier of 1.2 m, counted as 1.201 m, where 1.81 m is wanted.</summary>

@@ -19,10 +19,12 @@ internal sealed record AnchorPlan(double Left, double Right, double Bottom, doub
         var depth = isConcrete ? BreakoutBody.Of(layout, 1, anchors.Depth).Depth : 0;
         var reach = 1.5 * depth;
 
-        // A far edge is cut a little beyond the body, or beyond the plate.
-        double Shown(double? edge, double beyondPlate) => edge ?? Math.Max(1.15 * reach, beyondPlate);
-        var (left, right) = (half + Shown(layout.Left, plate.Width / 2 - half + 0.05), half + Shown(layout.Right, plate.Width / 2 - half + 0.05));
-        var (flood, ahead) = (row + Shown(layout.Flood, plate.Length / 2 - row + 0.05), row + Shown(layout.Protected, plate.Length / 2 - row + 0.05));
+        // A far edge is cut a little beyond the bodies, or beyond the plate.
+        var spread = isConcrete && layout.Protected is { } edge ? 1.5 * edge : 0;
+        double Shown(double? given, double widest, double beyondPlate) => given ?? Math.Max(1.1 * widest, beyondPlate);
+        double Beside(double? given) => half + Shown(given, Math.Max(reach, spread), plate.Width / 2 - half + 0.05);
+        double Along(double? given) => row + Shown(given, reach, plate.Length / 2 - row + 0.05);
+        var (left, right, flood, ahead) = (Beside(layout.Left), Beside(layout.Right), Along(layout.Flood), Along(layout.Protected));
         var tension = !isConcrete ? null : new PlanBox(
             -half - Math.Min(reach, layout.Left ?? reach), -row - Math.Min(reach, layout.Flood ?? reach),
             half + Math.Min(reach, layout.Right ?? reach), -row + Math.Min(reach, layout.Protected + layout.RowSpacing ?? reach));
