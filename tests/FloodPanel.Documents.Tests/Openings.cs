@@ -66,6 +66,13 @@ internal static class Openings
         ["guide-wide"] = u => Guides(new() { Mounting = GuideMounting.DryFace, BearingDistance = 1, BearingWidth = 1, LoadOffset = 1, LipLever = 0.5, LipThickness = 0.1, BaseThickness = 0.1 }, u),
         ["guide-small"] = u => Guides(
             new() { LipThickness = 0.002, LipLever = 0.004, BaseThickness = 0.002, LoadOffset = 0.006, BearingDistance = 0.004, BearingWidth = 0.002, Fasteners = new() { EdgeDistance = 0.006, HoleDiameter = 0.003 } }, u),
+        ["raker"] = u => Propped(u, 0, new() { Material = Sample.Alloy with { BendingStrength = 160e6 }, HeadHeight = 0.9, FootDistance = 0.8 }),
+        ["raker-on-a-raked-post"] = u => Propped(u, 30, new() { Material = Sample.Alloy, HeadHeight = 0.5, FootDistance = 1.6 }),
+        ["raker-far-foot"] = u => Propped(u, 0, new() { Material = Sample.Alloy with { Family = MaterialFamily.Timber }, HeadHeight = 0.3, FootDistance = 12 }),
+        ["base-plate"] = u => Plated(u, new ISection { Height = 0.1, Depth = 0.1, Flange = 0.01, Web = 0.006 }, new() { WeldLeg = 0.006, GroutThickness = 0.025 }),
+        ["base-plate-tube"] = u => Plated(u, new RectangularTube { Height = 0.1, Depth = 0.1, Wall = 0.006 }, new() { RodsPerRow = 1 }),
+        ["base-plate-hollow"] = u => Plated(u, new HollowRectangle { Height = 0.12, Depth = 0.08, Face = 0.004, Web = 0.003, Webs = 3 }, new() { RodsPerRow = 4, Width = 1.2 }),
+        ["base-plate-bar"] = u => Plated(u, new Rectangle { Height = 0.03, Depth = 0.08 }, new() { Length = 0.12, Width = 0.05, RodDistance = 0.05 }),
         ["anchors"] = u => Anchored(u, new() { Method = AnchorMethod.Aci318, Kind = AnchorKind.Headed, HeadArea = 500e-6, EdgeProtected = 0.15, EdgeLeft = 0.2 }),
         ["anchors-by-approval"] = u => Anchored(u, new() { TensionResistance = 20e3, ShearResistance = 15e3 }),
         ["anchors-in-a-beam"] = u => Anchored(u, new() { Method = AnchorMethod.En1992, Depth = 0.2, EdgeFlood = 0.08, EdgeProtected = 0.08, EdgeLeft = 1.4, EdgeRight = 1.4 }),
@@ -108,6 +115,23 @@ internal static class Openings
     public static IEnumerable<string> Names => All.Keys;
 
     public static DrawingInput Input(string name, UnitSystem units) => All[name](units);
+
+    private static DrawingInput Propped(UnitSystem units, double rake, RakerInput raker) => Sample.Input(
+        Sample.Garage with
+        {
+            RakeDegrees = rake,
+            Barrier = Sample.Garage.Barrier with { Posts = Sample.Garage.Barrier.Posts! with { Raker = raker with { Profile = new RectangularTube { Height = 0.05, Depth = 0.05, Wall = 0.004 } } } },
+        }, units);
+
+    private static DrawingInput Plated(UnitSystem units, Profile post, BasePlateInput plate) => Sample.Input(
+        Sample.Garage with
+        {
+            Barrier = Sample.Garage.Barrier with
+            {
+                Posts = Sample.Garage.Barrier.Posts! with { Profile = post },
+                BasePlate = plate with { Material = Sample.Alloy },
+            },
+        }, units);
 
     private static DrawingInput Anchored(UnitSystem units, AnchorInput anchors) => Sample.Input(
         Sample.Garage with { Barrier = Sample.Garage.Barrier with { BasePlate = new() { Material = Sample.Alloy }, Anchors = anchors } }, units);

@@ -6,6 +6,8 @@ public static class DetailDrawings
     // Each draws what it finds inputs for, and nothing else.
     private static readonly Func<DrawingInput, IEnumerable<Scene>>[] Sources =
     [
+        RakerDrawing.Of,
+        BasePlatePlan.Of,
         AnchorDrawing.Of,
         GuideDrawing.Of,
         FootingDrawing.Of,
