@@ -8,11 +8,11 @@ namespace FloodPanel.Calculation.Tests;
 public class CautionsTests
 {
     [Fact]
-    public void Notes_NothingSpecial_WhatPostsLeaveOutAndTheSafetyWords()
+    public void Notes_NothingSpecial_WhatPostsLackAndTheSafetyWords()
     {
         var notes = Notes((LogStack l) => l with { Sealed = false });
 
-        Assert.Equal(["post-no-interaction", "post-lateral", "calculation-aid"], notes.Select(n => n.Code));
+        Assert.Equal(["post-lateral", "calculation-aid"], notes.Select(n => n.Code));
         var note = notes[^1];
         Assert.Equal(
             "This is a calculation aid. It must be checked by a licensed engineer and follow local codes. A barrier can fail or be overtopped: people leave when told to.",

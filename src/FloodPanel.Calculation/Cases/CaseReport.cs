@@ -98,7 +98,7 @@ internal static class CaseReport
             var response = numbers.Posts[post];
             var setting = new PostChecks.Setting(
                 numbers.Diagram, model.Post!, model.PostTributary(post), model.FaceLength, model.Rake,
-                CaseForces.OnPost(model, kind, post), model.Raker);
+                CaseForces.OnPost(model, kind, post), model.Basis, model.Raker);
             results[post] = new()
             {
                 Index = post + 1,

@@ -91,8 +91,8 @@ internal sealed class PlateSetting
         if (Response.IsBalanced)
         {
             steps.Add("Y", "r − √(r² − 2·M_f/q)", Response.BlockLength, Dimension.SectionLength);
-            steps.Add("T", "max(0, q·Y + T_u)", Response.Tension, Dimension.Force);
             steps.Add("f_p", Response.BlockLength > 0 ? "f_max" : "", Response.Bearing, Dimension.Stress);
+            steps.Add("T", "max(0, q·Y + T_u)", Response.Tension, Dimension.Force);
         }
         else
         {

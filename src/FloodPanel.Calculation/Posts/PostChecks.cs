@@ -1,4 +1,5 @@
 using FloodPanel.Calculation.Actions;
+using FloodPanel.Calculation.ProjectTree;
 
 namespace FloodPanel.Calculation.Posts;
 
@@ -14,9 +15,10 @@ internal static class PostChecks
     /// <param name="Length">ℓ, length of the post [m].</param>
     /// <param name="Rake">θ [rad].</param>
     /// <param name="Force">F, a force on the post [N].</param>
+    /// <param name="Basis">The design basis.</param>
     /// <param name="Raker">The raker; null for none.</param>
     internal readonly record struct Setting(
-        PressureDiagram Diagram, Member Post, double Tributary, double Length, double Rake, ConcentratedForce Force, RakerModel? Raker = null)
+        PressureDiagram Diagram, Member Post, double Tributary, double Length, double Rake, ConcentratedForce Force, DesignBasis Basis, RakerModel? Raker)
     {
         public bool HasForce => Force.Characteristic != 0;
 
@@ -38,7 +40,7 @@ internal static class PostChecks
         steps.Add("M_R", "f_b·W", setting.Post.MomentResistance, Dimension.Moment);
         steps.Add("u", "M/M_R", response.Bending, Dimension.Ratio);
         return new(
-            "post-bending", "Post bending", Source(setting, setting.Post.BendingSource), Dimension.Moment,
+            "post-bending", "Post bending", Source(setting, setting.Post.BendingSource + PostNotes.BesideBending(setting.Post)), Dimension.Moment,
             response.PeakMoment, setting.Post.MomentResistance, steps.Done());
     }
 
@@ -56,7 +58,7 @@ internal static class PostChecks
         steps.Add("V_R", "f_v·A_v", setting.Post.ShearResistance, Dimension.Force);
         steps.Add("u", "V/V_R", response.ShearUse, Dimension.Ratio);
         return new(
-            "post-shear", "Post shear", Source(setting, setting.Post.ShearSource), Dimension.Force,
+            "post-shear", "Post shear", Source(setting, setting.Post.ShearSource + PostNotes.BesideShear(setting.Post, setting.Basis)), Dimension.Force,
             response.PeakShear, setting.Post.ShearResistance, steps.Done());
     }
 

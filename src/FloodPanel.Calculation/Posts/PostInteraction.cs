@@ -99,7 +99,7 @@ public static class PostInteraction
         steps.Stress("f_b", stress);
         steps.Add("u", "σ/f_b", combined / stress.Value, Dimension.Ratio);
         return new(
-            "post-bending-axial", "Post bending and axial force", $"Elastic stresses added; {stress.Source}", Dimension.Stress,
+            "post-axial", "Post bending and axial force", $"Elastic stresses added; {stress.Source}", Dimension.Stress,
             combined, stress.Value, steps.Done());
     }
 

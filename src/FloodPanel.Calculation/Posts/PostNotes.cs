@@ -2,32 +2,38 @@ using FloodPanel.Calculation.ProjectTree;
 
 namespace FloodPanel.Calculation.Posts;
 
-/// <summary>Says of the posts which checks are left out, and why.</summary>
+/// <summary>Which checks of a post are left out: why none is needed stands beside the check of its kind, what no method covers is a note.</summary>
 internal static class PostNotes
 {
+    /// <summary>Words for the source of the bending check where lateral-torsional buckling needs none; empty else.</summary>
+    public static string BesideBending(Member post) => post.Profile switch
+    {
+        HollowRectangle or RectangularTube => "; no lateral-torsional buckling, a closed section is stiff in torsion",
+        Rectangle when !IsDeepBar(post) => "; no lateral-torsional buckling, a bar no deeper than wide",
+        _ => "",
+    };
+
+    /// <summary>Words for the source of the shear check where no rule asks for its interaction with bending; empty else.</summary>
+    public static string BesideShear(Member post, DesignBasis basis) =>
+        post.Material.Family == MaterialFamily.Steel && basis.Kind != DesignBasisKind.Eurocode
+            ? "; AISC 360 asks for no interaction with bending"
+            : "";
+
+    /// <summary>Lateral-torsional buckling that can occur and is not checked.</summary>
     public static IEnumerable<Note> Of(Member post, DesignBasis basis)
     {
-        if (post.Material.Family == MaterialFamily.Steel && basis.Kind != DesignBasisKind.Eurocode)
+        if (PostLateral.CanOccur(post) && !PostLateral.IsCovered(post, basis))
         {
-            yield return new("post-no-interaction", new(
-                $"Posts: bending and shear are checked each by itself; AISC 360 asks for no interaction of them."));
+            yield return Lateral(new(
+                $"Posts: lateral-torsional buckling is not checked: it needs the bending strength of a steel or aluminium that the design basis covers."));
         }
-
-        if (Lateral(post, basis) is { } lateral)
+        else if (post.Profile is GivenProperties || IsDeepBar(post))
         {
-            yield return new("post-lateral", lateral);
+            yield return Lateral(new($"Posts: lateral-torsional buckling is not covered for this section; check it by hand."));
         }
     }
 
-    private static Sentence? Lateral(Member post, DesignBasis basis) => post.Profile switch
-    {
-        HollowRectangle or RectangularTube => new(
-            $"Posts: no check of lateral-torsional buckling, because a closed section is stiff in torsion."),
-        Rectangle when post.Section.Depth <= post.Section.Height => new(
-            $"Posts: no check of lateral-torsional buckling, because a bar that is no deeper than wide does not buckle so."),
-        ISection when PostLateral.IsCovered(post, basis) => null,
-        ISection => new(
-            $"Posts: lateral-torsional buckling is not checked: it needs the bending strength of a steel or aluminium that the design basis covers."),
-        _ => new($"Posts: lateral-torsional buckling is not covered for this section; check it by hand."),
-    };
+    private static bool IsDeepBar(Member post) => post.Profile is Rectangle && post.Section.Depth > post.Section.Height;
+
+    private static Note Lateral(Sentence text) => new("post-lateral", text);
 }

@@ -81,14 +81,14 @@ public class PostBaseSectionTests : BenchContext
     }
 
     [Fact]
-    public void Weld_Missing_GapStandsAmongTheCautions()
+    public void Weld_Missing_StandsAmongWhatIsStillToEnter()
     {
         var page = Open("garage");
 
         page.Find("[data-testid='switch-basePlate']").Change(true);
 
         Assert.Contains(
-            "The weld between post and base plate has no size: enter its leg.", page.Find("[data-testid=notes]").TextContent, StringComparison.Ordinal);
+            "The weld between post and base plate has no size: enter its leg.", page.Find("[data-testid=gaps]").TextContent, StringComparison.Ordinal);
     }
 
     [Fact]
