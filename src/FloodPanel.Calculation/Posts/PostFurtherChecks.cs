@@ -16,6 +16,7 @@ internal static class PostFurtherChecks
             PostInteraction.WithShear(response, member, model.Basis.Kind),
             PostInteraction.WithTension(response, member),
             PostLateral.Of(response, member, model.FaceLength, model.Basis),
+            .. PostWalls.Of(model, response),
             .. PostWelded.Of(model, response),
             model.Raker is { } raker ? RakerCompression.Of(response.Prop!, raker, model.Basis) : null,
             judgesDeflection ? PostDrift.Of(model, post, response) : null,

@@ -19,9 +19,14 @@ internal static class PostNotes
             ? "; AISC 360 asks for no interaction with bending"
             : "";
 
-    /// <summary>Lateral-torsional buckling that can occur and is not checked.</summary>
+    /// <summary>Buckling of the walls and lateral-torsional buckling that can occur and are not checked.</summary>
     public static IEnumerable<Note> Of(Member post, DesignBasis basis)
     {
+        foreach (var note in PostWalls.Notes(post, basis))
+        {
+            yield return note;
+        }
+
         if (PostLateral.CanOccur(post) && !PostLateral.IsCovered(post, basis))
         {
             yield return Lateral(new(

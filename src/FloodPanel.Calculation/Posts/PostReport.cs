@@ -24,13 +24,18 @@ internal static class PostReport
         return results;
     }
 
-    /// <summary>A weld beside which the strength is not known, a raker that no formula covers, a foot without an anchor.</summary>
+    /// <summary>Walls that no rule covers, a weld beside which the strength is not known, a raker that no formula covers, a foot without an anchor.</summary>
     public static IEnumerable<PartGap> Gaps(OpeningModel model)
     {
         if (PostWelded.IsWelded(model) && model.Post!.Material.WeldedYield is null)
         {
             yield return new(NeededChecks.Posts, new("post-welded-missing", new(
                 $"The posts are of aluminium and welded at their base: enter the yield beside a weld of their material.")));
+        }
+
+        if (model.Post is { } post && PostWalls.NotCovered(post, model.Basis) is { } walls)
+        {
+            yield return new(NeededChecks.Posts, walls);
         }
 
         if (model.Raker is not { } raker)

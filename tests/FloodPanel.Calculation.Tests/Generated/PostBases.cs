@@ -29,7 +29,8 @@ internal static class PostBases
         from yield in Numbers.Perhaps(Numbers.From(30e6, 200e6, 1e6))
         from welded in Numbers.Perhaps(Numbers.From(50e6, 250e6, 1e6))
         from shear in Numbers.Perhaps(Numbers.From(1e9, 80e9, 1e8))
-        select material with { UltimateStrength = ultimate, WeldedYield = yield, WeldedUltimate = welded, ShearModulus = shear };
+        from buckling in Gen.Elements<BucklingClass?>(null, BucklingClass.A, BucklingClass.B)
+        select material with { BucklingClass = buckling, UltimateStrength = ultimate, WeldedYield = yield, WeldedUltimate = welded, ShearModulus = shear };
 
     private static Gen<RakerInput> Raker(double height, double rake) =>
         from material in Members.Material
