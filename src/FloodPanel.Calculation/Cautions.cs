@@ -4,6 +4,7 @@ using FloodPanel.Calculation.Actions.Waves;
 using FloodPanel.Calculation.Anchors;
 using FloodPanel.Calculation.Guides;
 using FloodPanel.Calculation.Handling;
+using FloodPanel.Calculation.Logs;
 using FloodPanel.Calculation.Posts;
 using FloodPanel.Calculation.ProjectTree;
 using FloodPanel.Calculation.Walls;
@@ -36,6 +37,7 @@ public static class Cautions
         }
 
         Strengths(notes, NeededChecks.Logs, model.Runs.Select(run => run.Log).FirstOrDefault(log => !log.IsComplete) ?? model.Runs[0].Log);
+        notes.AddRange(LogNotes.Of(model));
         if (model.Post is { } post)
         {
             Strengths(notes, NeededChecks.Posts, post);

@@ -14,7 +14,7 @@ public sealed record LogRun(int First, int Count, Member Log)
         var first = 1;
         foreach (var group in stack.Groups)
         {
-            runs.Add(new(first, group.Count, Member.Of(group.Material, group.Profile, stack.DeflectionLimit, basis, library)));
+            runs.Add(new(first, group.Count, Member.Of(group.Material, group.Profile, stack.DeflectionLimit, basis, library, stack)));
             first += group.Count;
         }
 

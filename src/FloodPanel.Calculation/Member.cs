@@ -33,7 +33,7 @@ public sealed record Member(
     public bool IsComplete => Bending is not null && Shear is not null;
 
     internal static Member Of(
-        MaterialChoice material, ProfileChoice profile, double deflectionLimit, DesignBasis basis, Library library)
+        MaterialChoice material, ProfileChoice profile, double deflectionLimit, DesignBasis basis, Library library, LogStack? stack = null)
     {
         var found = library.Find(material)
             ?? throw new ArgumentException("the library does not hold the material", nameof(material));
@@ -43,8 +43,8 @@ public sealed record Member(
             found,
             shape,
             SectionProperties.Of(shape),
-            DesignStress.Bending(found, basis),
-            DesignStress.Shear(found, basis),
+            stack is null ? DesignStress.Bending(found, basis) : LogStress.Bending(found, shape, stack, basis),
+            stack is null ? DesignStress.Shear(found, basis) : LogStress.Shear(found, shape, stack, basis),
             deflectionLimit);
     }
 }

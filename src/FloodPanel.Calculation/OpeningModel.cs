@@ -2,6 +2,7 @@ using FloodPanel.Calculation.Actions;
 using FloodPanel.Calculation.Actions.Debris;
 using FloodPanel.Calculation.Actions.Waves;
 using FloodPanel.Calculation.Cases;
+using FloodPanel.Calculation.Logs;
 using FloodPanel.Calculation.Posts;
 using FloodPanel.Calculation.ProjectTree;
 using FloodPanel.Calculation.Water;
@@ -14,6 +15,7 @@ public sealed class OpeningModel
     private readonly Member[] logs;
     private readonly double[] slopes;
     private readonly double[] logHeights;
+    private LogStrength[]? logStrengths;
 
     /// <summary>Resolves an opening.</summary>
     /// <param name="site">Levels and water.</param>
@@ -119,6 +121,14 @@ public sealed class OpeningModel
     /// <summary>A log of the stack.</summary>
     /// <param name="index">Position in the stack from 0.</param>
     public Member LogMember(int index) => logs[index];
+
+    /// <summary>What a log resists besides bending and shear; worked out when first asked for.</summary>
+    internal LogStrength LogStrength(int index)
+    {
+        logStrengths ??= [.. Runs.SelectMany(run =>
+            Enumerable.Repeat(new LogStrength(run.Log, Opening.Barrier.Logs, Basis), run.Count))];
+        return logStrengths[index];
+    }
 
     /// <summary>e, length of log that bears at each end [m].</summary>
     public double EndBearing { get; }

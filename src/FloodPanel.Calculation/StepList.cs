@@ -37,6 +37,7 @@ internal readonly ref struct StepList(int capacity)
         if (stress.Strength is { } strength)
         {
             Given("f_k", strength, Dimension.Stress);
+            steps.AddRange(stress.Factors);
         }
 
         Add(symbol, stress.Formula, stress.Value, Dimension.Stress);

@@ -65,6 +65,19 @@ public sealed class PressureDiagram
         return sum;
     }
 
+    /// <summary>Factored pressure at a height [Pa]. At a step both sides count: ask just above or below it.</summary>
+    /// <param name="z">Height above the sill [m].</param>
+    public double DesignAt(double z)
+    {
+        var sum = 0.0;
+        foreach (ref readonly var piece in Pieces)
+        {
+            sum += piece.Factor * piece.At(z);
+        }
+
+        return sum;
+    }
+
     /// <summary>∫p dz over a band of height, without and with factors [N/m].</summary>
     /// <param name="bottom">Lower end [m].</param>
     /// <param name="top">Upper end [m].</param>

@@ -43,7 +43,7 @@ internal static class CaseReport
                 var twin = FirstBayAsWide(model.Bays, bay);
                 results[bay * count + index] = twin < bay
                     ? results[twin * count + index] with { Bay = bay + 1 }
-                    : Log(model, kind, numbers.Logs[bay * count + index], index, bay, working);
+                    : Log(model, kind, numbers, index, bay, working);
             }
         }
 
@@ -64,8 +64,9 @@ internal static class CaseReport
     }
 
     private static LogResult Log(
-        OpeningModel model, CaseKind kind, in LogResponse response, int index, int bay, Working lineLoad)
+        OpeningModel model, CaseKind kind, CaseEvaluation numbers, int index, int bay, Working lineLoad)
     {
+        var response = numbers.Logs[bay * model.LogCount + index];
         var (clear, bearing, log) = (model.Bays[bay], model.EndBearing, model.LogMember(index));
         var judged = CaseForces.JudgesDeflection(kind);
         return new()
@@ -86,6 +87,7 @@ internal static class CaseReport
             MomentWorking = log.Bending is null ? LogChecks.Moment(response, clear, bearing) : null,
             ShearWorking = log.Shear is null ? LogChecks.ShearForce(response, clear, bearing) : null,
             DeflectionWorking = judged ? null : LogChecks.DeflectionOnly(response, clear, bearing, log),
+            Others = LogFurtherChecks.Of(model, kind, numbers, index, bay),
         };
     }
 

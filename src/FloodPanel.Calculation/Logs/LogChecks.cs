@@ -83,7 +83,7 @@ public static class LogChecks
     internal static Working DeflectionOnly(in LogResponse response, double clearBay, double endBearing, Member log) =>
         new("Deflection of the log", Statics, DeflectionSteps(response, clearBay, endBearing, log).Done());
 
-    private static StepList MomentSteps(in LogResponse response, double clearBay, double endBearing)
+    internal static StepList MomentSteps(in LogResponse response, double clearBay, double endBearing)
     {
         var steps = Loads(clearBay, endBearing, "w", response.Load.Design, "P", response.Point.Design);
         var formula = response.Point.Design == 0 ? "w·L²/8" : "w·L²/8 + P·L/4";
@@ -91,14 +91,14 @@ public static class LogChecks
         return steps;
     }
 
-    private static StepList ShearSteps(in LogResponse response, double clearBay, double endBearing)
+    internal static StepList ShearSteps(in LogResponse response, double clearBay, double endBearing)
     {
         var steps = Loads(clearBay, endBearing, "w", response.Load.Design, "P", response.Point.Design);
         steps.Add("V", response.Point.Design == 0 ? "w·L/2" : "w·L/2 + P", response.Shear, Dimension.Force);
         return steps;
     }
 
-    private static StepList DeflectionSteps(in LogResponse response, double clearBay, double endBearing, Member log)
+    internal static StepList DeflectionSteps(in LogResponse response, double clearBay, double endBearing, Member log)
     {
         var point = response.Point.Characteristic;
         var steps = Loads(clearBay, endBearing, "w_k", response.Load.Characteristic, "P_k", point);
@@ -109,7 +109,7 @@ public static class LogChecks
         return steps;
     }
 
-    private static StepList Loads(
+    internal static StepList Loads(
         double clearBay, double endBearing, string lineSymbol, double line, string pointSymbol, double point)
     {
         var steps = new StepList(12);

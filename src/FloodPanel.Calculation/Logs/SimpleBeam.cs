@@ -23,6 +23,20 @@ public static class SimpleBeam
     public static double Deflection(double lineLoad, double span, double stiffness) =>
         5 * lineLoad * span * span * span * span / (384 * stiffness);
 
+    /// <summary>θ = w·L³/(24·E·I), rotation at the support [rad].</summary>
+    /// <param name="lineLoad">w [N/m].</param>
+    /// <param name="span">L [m].</param>
+    /// <param name="stiffness">E·I [N·m²], > 0.</param>
+    public static double EndRotation(double lineLoad, double span, double stiffness) =>
+        lineLoad * span * span * span / (24 * stiffness);
+
+    /// <summary>θ = P·L²/(16·E·I), rotation at the support under a force at mid-span [rad].</summary>
+    /// <param name="force">P [N].</param>
+    /// <param name="span">L [m].</param>
+    /// <param name="stiffness">E·I [N·m²], > 0.</param>
+    public static double PointEndRotation(double force, double span, double stiffness) =>
+        force * span * span / (16 * stiffness);
+
     /// <summary>M = P·L/4, moment at mid-span under a force there [N·m].</summary>
     /// <param name="force">P [N].</param>
     /// <param name="span">L [m].</param>

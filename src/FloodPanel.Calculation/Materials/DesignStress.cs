@@ -9,17 +9,24 @@ namespace FloodPanel.Calculation.Materials;
 /// <param name="Source">Where the factor stands, or that the stress was typed.</param>
 public sealed record DesignStress(double Value, double? Strength, string Formula, string Source)
 {
+    /// <summary>Steps of further factors that <see cref="Formula"/> uses.</summary>
+    public IReadOnlyList<CalculationStep> Factors { get; init; } = [];
+
     /// <summary>Design bending stress; null when neither an allowable nor a strength with a rule is there.</summary>
     /// <param name="material">The material.</param>
     /// <param name="basis">The design basis.</param>
     public static DesignStress? Bending(Material material, DesignBasis basis) =>
-        Of(material.AllowableBending, material.BendingStrength, basis.For(material.Family));
+        Of(material.AllowableBending, material.BendingStrength, Rule(material, basis));
 
     /// <summary>Design shear stress; null when neither an allowable nor a strength with a rule is there.</summary>
     /// <param name="material">The material.</param>
     /// <param name="basis">The design basis.</param>
     public static DesignStress? Shear(Material material, DesignBasis basis) =>
-        Of(material.AllowableShear, material.ShearStrength, basis.For(material.Family));
+        Of(material.AllowableShear, material.ShearStrength, Rule(material, basis));
+
+    /// <summary>No factor of a design basis goes with reference values of the NDS: they have adjustment factors of their own.</summary>
+    private static StrengthRule? Rule(Material material, DesignBasis basis) =>
+        material.Reference == StrengthReference.NdsReference ? null : basis.For(material.Family);
 
     private static DesignStress? Of(double? allowable, double? strength, StrengthRule? rule)
     {

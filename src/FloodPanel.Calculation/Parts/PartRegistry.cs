@@ -2,6 +2,7 @@ using FloodPanel.Calculation.Anchors;
 using FloodPanel.Calculation.Cases;
 using FloodPanel.Calculation.Footings;
 using FloodPanel.Calculation.Guides;
+using FloodPanel.Calculation.Logs;
 using FloodPanel.Calculation.PostBases;
 using FloodPanel.Calculation.Posts;
 using FloodPanel.Calculation.Walls;
@@ -20,6 +21,7 @@ internal static class PartRegistry
 {
     private static readonly PartSource[] Sources =
     [
+        new((_, _, _) => [], LogNotes.Gaps),
         new(BasePlateReport.Of, BasePlateReport.Gaps),
         new(PostReport.Of, PostReport.Gaps),
         new((model, _, numbers) => AnchorReport.Of(model, numbers), AnchorReport.Gaps),

@@ -58,6 +58,15 @@ public sealed record LogStack
     /// <summary>Other logs beneath these, the lowest group first; none where all are equal.</summary>
     public ValueList<LogGroup> Below { get; init; } = [];
 
+    /// <summary>Joints between logs and seals at their ends; null where tightness is not checked.</summary>
+    public LogJoint? Joint { get; init; }
+
+    /// <summary>What timber logs endure; null leaves the factor of the design basis as it is.</summary>
+    public TimberService? Timber { get; init; }
+
+    /// <summary>Factors on composite logs; null where none are chosen, so that only typed stresses count.</summary>
+    public CompositeService? Composite { get; init; }
+
     /// <summary>Number of logs in the whole stack [-].</summary>
     public int TotalCount => Count + Below.Sum(group => group.Count);
 

@@ -34,6 +34,9 @@ internal static class Barriers
         from clearance in Numbers.From(0, 0.015)
         from limit in Gen.Choose(100, 500)
         from below in Below
+        from joint in LogServices.Joint
+        from timber in LogServices.Timber
+        from composite in LogServices.Composite
         select new LogStack
         {
             Material = material,
@@ -43,6 +46,9 @@ internal static class Barriers
             FittingClearance = clearance,
             DeflectionLimit = limit,
             Below = below,
+            Joint = joint,
+            Timber = timber,
+            Composite = composite,
         };
 
     /// <summary>Mostly none; else one or two groups of other logs beneath.</summary>

@@ -15,6 +15,12 @@ internal static class Members
         from shearStrength in Numbers.Perhaps(Stress)
         from allowableBending in Numbers.Perhaps(Stress)
         from allowableShear in Numbers.Perhaps(Stress)
+        from ultimate in Numbers.Perhaps(Stress)
+        from cross in Numbers.Perhaps(Stress)
+        from shearModulus in Numbers.Perhaps(Numbers.From(1e8, 30e9, 1e8))
+        from ownDensity in Numbers.Perhaps(Numbers.From(300, 900, 10))
+        from buckling in Gen.Elements<BucklingClass?>(null, BucklingClass.A, BucklingClass.B)
+        from reference in Gen.Elements(StrengthReference.Characteristic, StrengthReference.Characteristic, StrengthReference.NdsReference)
         select new Material
         {
             Family = family,
@@ -24,6 +30,13 @@ internal static class Members
             ShearStrength = shearStrength,
             AllowableBending = allowableBending,
             AllowableShear = allowableShear,
+            UltimateStrength = ultimate,
+            CrossStrength = cross,
+            CrossCompression = cross,
+            ShearModulus = shearModulus,
+            CharacteristicDensity = ownDensity,
+            BucklingClass = buckling,
+            Reference = reference,
         };
 
     public static Gen<Profile> Profile { get; } =

@@ -1,0 +1,48 @@
+using FloodPanel.Calculation.ProjectTree;
+
+namespace FloodPanel.Calculation.Materials;
+
+/// <summary>Design stresses of logs, with what timber and composites have to endure. A typed allowable always wins.</summary>
+internal static class LogStress
+{
+    public static DesignStress? Bending(Material material, Profile profile, LogStack stack, DesignBasis basis) =>
+        (material.AllowableBending, material.BendingStrength) switch
+        {
+            ({ }, _) or (_, null) => DesignStress.Bending(material, basis),
+            (_, { } strength) => material.Family switch
+            {
+                MaterialFamily.Timber when stack.Timber is { } service => TimberStress.Bending(material, strength, profile, service, basis),
+                MaterialFamily.Composite when stack.Composite is { } service => Composite(strength, service),
+                _ => DesignStress.Bending(material, basis),
+            },
+        };
+
+    public static DesignStress? Shear(Material material, Profile profile, LogStack stack, DesignBasis basis) =>
+        (material.AllowableShear, material.ShearStrength) switch
+        {
+            ({ }, _) or (_, null) => DesignStress.Shear(material, basis),
+            (_, { } strength) => material.Family switch
+            {
+                MaterialFamily.Timber when stack.Timber is { } service => TimberStress.Shear(material, strength, profile, service, basis),
+                MaterialFamily.Composite when stack.Composite is { } service => Composite(strength, service),
+                _ => DesignStress.Shear(material, basis),
+            },
+        };
+
+    /// <summary>Across the fibres of a composite; null where its strength or its factors are missing.</summary>
+    public static DesignStress? Cross(Material material, LogStack stack) =>
+        material.Family == MaterialFamily.Composite && material.CrossStrength is { } strength && stack.Composite is { } service
+            ? Composite(strength, service)
+            : null;
+
+    private static DesignStress Composite(double strength, CompositeService service) => new(
+        service.ConversionFactor * strength / service.MaterialFactor, strength, "η_c·f_k/γ_M",
+        "strength by the product standard (EN 13706) over factors typed by the user")
+    {
+        Factors =
+        [
+            new("η_c", "", service.ConversionFactor, Dimension.Ratio),
+            new("γ_M", "", service.MaterialFactor, Dimension.Ratio),
+        ],
+    };
+}
