@@ -8,11 +8,11 @@ namespace FloodPanel.Calculation.Tests;
 public class CautionsTests
 {
     [Fact]
-    public void Notes_NothingSpecial_WhatPostsLackAndTheSafetyWords()
+    public void Notes_NothingSpecial_WhatLogsAndPostsLackAndTheSafetyWords()
     {
         var notes = Notes((LogStack l) => l with { Sealed = false });
 
-        Assert.Equal(["post-buckling-strength", "post-lateral", "calculation-aid"], notes.Select(n => n.Code));
+        Assert.Equal(["buckling-strength", "post-buckling-strength", "post-lateral", "calculation-aid"], notes.Select(n => n.Code));
         var note = notes[^1];
         Assert.Equal(
             "This is a calculation aid. It must be checked by a licensed engineer and follow local codes. A barrier can fail or be overtopped: people leave when told to.",

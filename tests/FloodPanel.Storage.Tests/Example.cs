@@ -104,6 +104,9 @@ internal static class Example
                 FittingClearance = 0.012,
                 Sealed = false,
                 SealPreload = 150,
+                Joint = new LogJoint { Travel = 0.006, SealCompression = 0.004 },
+                Timber = new TimberService { Duration = LoadDuration.MediumTerm, SizeFactor = 1.2 },
+                Composite = new CompositeService { MaterialFactor = 2.5, ConversionFactor = 0.6 },
                 Below =
                 [
                     new LogGroup { Material = new LibraryMaterial("en-aw-6005a-t6"), Profile = new RectangularTube { Height = 0.25, Depth = 0.08, Wall = 0.006 }, Count = 1 },

@@ -15,7 +15,7 @@ internal sealed class LogStrength
         Walls = ThinWalls.Of(log.Profile);
         Buckling = LocalBuckling.Of(log, basis);
         Seat = SeatResistance.Of(log, basis, Bearing);
-        Across = log.Material.Family == MaterialFamily.Timber ? TimberStress.Across(log.Material, stack.Timber, basis) : null;
+        Across = LogStress.Across(log.Material, stack, basis);
         Cross = LogStress.Cross(log.Material, stack);
         Combined = basis.Kind == DesignBasisKind.Eurocode && log.Material.Family == MaterialFamily.Aluminium ? 1.2 : 1;
     }

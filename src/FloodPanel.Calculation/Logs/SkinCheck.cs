@@ -25,7 +25,7 @@ public static class SkinCheck
         return 6 * pressure * width * width / (isOutstand ? 2 : 8) / (thickness * thickness);
     }
 
-    /// <summary>The check; null for a solid log, a dry one, and where no stress is known.</summary>
+    /// <summary>The check; null for a solid log, a dry one, and where the yield of a metal is not known: an allowable for bending alone says nothing of stresses together.</summary>
     internal static Check? Of(LogFurtherChecks.Setting setting, double pressure)
     {
         var log = setting.Strength.Log;
@@ -36,7 +36,7 @@ public static class SkinCheck
 
         return log.Material.Family == MaterialFamily.Composite
             ? setting.Strength.Cross is { } cross ? Across(pressure, walls, cross) : null
-            : log.Bending is { } stress ? Combined(setting, pressure, walls, stress) : null;
+            : log is { Bending: { } stress, Material.BendingStrength: not null } ? Combined(setting, pressure, walls, stress) : null;
     }
 
     private static Check Across(double pressure, ThinWalls walls, DesignStress stress)

@@ -3,8 +3,13 @@ using FloodPanel.Calculation.ProjectTree;
 namespace FloodPanel.Calculation.Materials;
 
 /// <summary>Design stresses of logs, with what timber and composites have to endure. A typed allowable always wins.</summary>
-internal static class LogStress
+public static class LogStress
 {
+    /// <summary>Design bending stress; null when it is missing or not covered.</summary>
+    /// <param name="material">The material.</param>
+    /// <param name="profile">The cross-section.</param>
+    /// <param name="stack">The stack, which says what its timber and composites endure.</param>
+    /// <param name="basis">The design basis.</param>
     public static DesignStress? Bending(Material material, Profile profile, LogStack stack, DesignBasis basis) =>
         (material.AllowableBending, material.BendingStrength) switch
         {
@@ -17,6 +22,11 @@ internal static class LogStress
             },
         };
 
+    /// <summary>Design shear stress along the log; null when it is missing or not covered.</summary>
+    /// <param name="material">The material.</param>
+    /// <param name="profile">The cross-section.</param>
+    /// <param name="stack">The stack, which says what its timber and composites endure.</param>
+    /// <param name="basis">The design basis.</param>
     public static DesignStress? Shear(Material material, Profile profile, LogStack stack, DesignBasis basis) =>
         (material.AllowableShear, material.ShearStrength) switch
         {
@@ -29,11 +39,20 @@ internal static class LogStress
             },
         };
 
-    /// <summary>Across the fibres of a composite; null where its strength or its factors are missing.</summary>
+    /// <summary>Design bending stress across the fibres of a composite; null when it is missing or not covered.</summary>
+    /// <param name="material">The material.</param>
+    /// <param name="stack">The stack, which says what its timber and composites endure.</param>
     public static DesignStress? Cross(Material material, LogStack stack) =>
         material.Family == MaterialFamily.Composite && material.CrossStrength is { } strength && stack.Composite is { } service
             ? Composite(strength, service)
             : null;
+
+    /// <summary>Design stress in compression across the grain of timber; null when it is missing or not covered.</summary>
+    /// <param name="material">The material.</param>
+    /// <param name="stack">The stack, which says what its timber and composites endure.</param>
+    /// <param name="basis">The design basis.</param>
+    public static DesignStress? Across(Material material, LogStack stack, DesignBasis basis) =>
+        material.Family == MaterialFamily.Timber ? TimberStress.Across(material, stack.Timber, basis) : null;
 
     private static DesignStress Composite(double strength, CompositeService service) => new(
         service.ConversionFactor * strength / service.MaterialFactor, strength, "η_c·f_k/γ_M",

@@ -20,6 +20,7 @@ internal static class BarrierValidation
         problems.Check(Fields.LogDeflectionLimit, logs.DeflectionLimit, $"{path}.logs");
         problems.Check(Fields.FittingClearance, logs.FittingClearance, $"{path}.logs");
         problems.Check(Fields.SealPreload, logs.SealPreload, $"{path}.logs");
+        LogServiceValidation.Validate(logs, $"{path}.logs", problems);
         if (logs.FittingClearance >= logs.EndBearing && logs.EndBearing > 0)
         {
             problems.Add($"{path}.logs.fittingClearance", $"Fitting clearance is {Section(logs.FittingClearance)}; allowed is less than the end bearing, {Section(logs.EndBearing)}, or a log can slip out of its guide.");

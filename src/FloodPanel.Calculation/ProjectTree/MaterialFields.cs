@@ -17,7 +17,7 @@ public static class MaterialFields
 
     /// <summary>Material.ShearModulus.</summary>
     public static Field ShearModulus { get; } = new("shearModulus", "Shear modulus", Dimension.ElasticModulus, 1e7, 1e12,
-        "Adds the shear deflection of composites.");
+        "Adds the shear deflection of timber and composites.");
 
     /// <summary>Material.CrossStrength.</summary>
     public static Field CrossStrength { get; } = new("crossStrength", "Strength across the fibres", Dimension.Stress, 0, 5e9,

@@ -1,3 +1,5 @@
+using FloodPanel.Calculation.ProjectTree;
+
 namespace FloodPanel.Calculation.Sections;
 
 /// <summary>Bending of aluminium sections by class, EN 1999-1-1, 6.1.4 and 6.2.5: M_R = α·W·f_o/γ_M1.</summary>
@@ -16,14 +18,9 @@ internal static class EurocodeAluminium
         public double Effective => Limits.EffectiveThickness(Relative);
     }
 
-    public static LocalBucklingResult Bending(Member member, ThinWalls walls, BendingStress stress, bool isWelded)
+    public static WallResistance Bending(Member member, ThinWalls walls, BendingStress stress, bool isWelded)
     {
-        if (member.Material.BucklingClass is not { } buckling)
-        {
-            return LocalBuckling.Gap("buckling-class", new(
-                $"Local buckling of aluminium needs the buckling class of the alloy: enter A (heat-treated) or B, or the walls are not checked."));
-        }
-
+        var buckling = member.Material.BucklingClass ?? BucklingClass.B;
         // Limits beside a weld go with the yield of the alloy itself, which makes them the stricter.
         var yield = isWelded ? member.Material.BendingStrength ?? stress.Yield : stress.Yield;
         var epsilon = Math.Sqrt(ReferenceYield / yield);
@@ -46,7 +43,8 @@ internal static class EurocodeAluminium
             : Plastic(steps, section, face, web);
         var moment = shape * stress.Design * section.Modulus;
         steps.Add("M_R", "α·f_b·W", moment, Dimension.Moment);
-        return new(new(moment, Source(face.Class, web.Class), steps.Done()), null);
+        var known = member.Material.BucklingClass is null ? "; buckling class unknown, taken as B" : "";
+        return new(moment, Source(face.Class, web.Class) + known, steps.Done());
     }
 
     private static string Source(int face, int web) =>

@@ -51,7 +51,7 @@ public static class LocalBuckling
 
         return (member.Material.Family, basis.Kind) switch
         {
-            (MaterialFamily.Aluminium, DesignBasisKind.Eurocode) => EurocodeAluminium.Bending(member, walls, stress, isWeldAffected),
+            (MaterialFamily.Aluminium, DesignBasisKind.Eurocode) => new(EurocodeAluminium.Bending(member, walls, stress, isWeldAffected), null),
             (MaterialFamily.Aluminium, _) => new(UsAluminium.Bending(member, walls, stress, basis.Kind, isWeldAffected), null),
             (_, DesignBasisKind.Eurocode) => SteelWalls.ByEurocode(member, walls, stress),
             _ => SteelWalls.ByAisc(member, walls, stress),

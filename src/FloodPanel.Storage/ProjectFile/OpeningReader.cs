@@ -78,6 +78,9 @@ internal static class OpeningReader
             Sealed = logs.Flag("sealed", blank.Sealed),
             SealPreload = logs.Number("sealPreload", blank.SealPreload),
             Below = logs.List("below").Select(ReadGroup).ToValueList(),
+            Joint = LogServiceFile.ReadJoint(logs),
+            Timber = LogServiceFile.ReadTimber(logs),
+            Composite = LogServiceFile.ReadComposite(logs),
         };
         logs.Close();
         return read;

@@ -96,6 +96,7 @@ internal static class OpeningWriter
         json.WriteBoolean("sealed", logs.Sealed);
         json.WriteNumber("sealPreload", logs.SealPreload);
         WriteBelow(json, logs.Below);
+        LogServiceFile.Write(json, logs);
         json.WriteEndObject();
     }
 

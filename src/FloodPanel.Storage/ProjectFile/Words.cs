@@ -79,6 +79,13 @@ internal static class FileWords
         ("hard-clay", CreepSoil.HardClay),
         ("hardpan", CreepSoil.Hardpan));
 
+    public static readonly Words<LoadDuration> Duration = new(
+        ("permanent", LoadDuration.Permanent),
+        ("long-term", LoadDuration.LongTerm),
+        ("medium-term", LoadDuration.MediumTerm),
+        ("short-term", LoadDuration.ShortTerm),
+        ("instantaneous", LoadDuration.Instantaneous));
+
     public static readonly Words<LeakConvention> Leak = new(
         ("width", LeakConvention.Width),
         ("seal", LeakConvention.Seal));

@@ -94,6 +94,19 @@ public class AluminumDesignManualTests
         Assert.Equal(0.36, Math.Cbrt(oneInch / 0.375), tolerance: 0.005);
     }
 
+    /// <summary>
+    /// Example 4: crippling over 0.10 in inside the span, 2.0 kips a web nominal, 1.0 kip allowed (1.95). The radius of the inner
+    /// corner is not in our extract; 1/8 in is assumed, which gives 2.04: the formula, from memory, is not confirmed further.
+    /// </summary>
+    [Fact]
+    public void Example4_SquareTube_WebCrippling()
+    {
+        var web = WebCrippling.Aluminium(0.095 * Inch, 25 * Ksi, Modulus, bearing: 0.10 * Inch, radius: Inch / 8, isEnd: false);
+
+        Assert.Equal(2.0, web / 4448.2216152605, tolerance: 0.05);
+        Assert.Equal(1.0, web / 1.95 / 4448.2216152605, tolerance: 0.05);
+    }
+
     private const double Inch = 0.0254;
     private const double Ksi = 4448.2216152605 / (Inch * Inch);
     private const double Modulus = 10_100 * Ksi;

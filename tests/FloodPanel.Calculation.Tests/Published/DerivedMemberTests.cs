@@ -49,6 +49,16 @@ public class DerivedMemberTests
         Assert.Equal(4.21, log.MomentResistance / 1000, tolerance: 0.005);
     }
 
+    /// <summary>The same log, skin 3 mm between ribs 95.75 mm apart under 8 kPa: p·b²/8 = 9.17 N·mm/mm, 6.1 MPa; sealed it floats with +56.4 N/m, see HoldDownTests.</summary>
+    [Fact]
+    public void SkinCheck_RibbedLog_StressBetweenRibs()
+    {
+        var stress = SkinCheck.Stress(8_000, ThinWalls.Of(RibbedLog)!.FacePart, 0.003, isOutstand: false);
+
+        Assert.Equal(9.17, stress * 0.003 * 0.003 / 6, tolerance: 0.005);
+        Assert.Equal(6.1, stress / 1e6, tolerance: 0.05);
+    }
+
     /// <summary>Post, 1.2 m of fresh water, tributary 2.0 m, no strut: 23.54 kN/m at the sill, V 14.13 kN, M 5.65 kN·m.</summary>
     [Fact]
     public void Cantilever_PostUnderFreshWater_BaseShearAndMoment()

@@ -103,14 +103,22 @@ public class LocalBucklingTests
     [Fact]
     public void Of_MissingInputs_NamesThem()
     {
-        var classless = Member(Alloy with { BucklingClass = null }, Tube(0.003), DesignBasisKind.Eurocode);
         var typed = Member(Alloy with { BendingStrength = null, AllowableBending = 100e6 }, Tube(0.003), DesignBasisKind.Eurocode);
         var given = Member(Alloy, new GivenProperties { Height = 0.1, Depth = 0.1, Modulus = 1e-5 }, DesignBasisKind.Eurocode);
 
-        Assert.Equal("buckling-class", LocalBuckling.Of(classless, DesignBases.Eurocode).Gap!.Code);
         Assert.Equal("buckling-strength", LocalBuckling.Of(typed, DesignBases.Eurocode).Gap!.Code);
         Assert.Equal("buckling-profile", LocalBuckling.Of(given, DesignBases.Eurocode).Gap!.Code);
         Assert.Equal(new(null, null), LocalBuckling.Of(Member(Alloy, new Rectangle { Height = 0.1, Depth = 0.1 }, DesignBasisKind.Eurocode), DesignBases.Eurocode));
+    }
+
+    [Fact]
+    public void Of_UnknownBucklingClass_IsTakenAsB()
+    {
+        var unknown = LocalBuckling.Of(Member(Alloy with { BucklingClass = null }, Tube(0.003), DesignBasisKind.Eurocode), DesignBases.Eurocode);
+        var named = LocalBuckling.Of(Member(Alloy with { BucklingClass = BucklingClass.B }, Tube(0.003), DesignBasisKind.Eurocode), DesignBases.Eurocode);
+
+        Assert.Equal(named.Resistance!.Moment, unknown.Resistance!.Moment);
+        Assert.EndsWith("taken as B", unknown.Resistance.Source, StringComparison.Ordinal);
     }
 
     [Fact]

@@ -190,12 +190,13 @@ public class RefusalTests
             "guides", "wallBearing", "tension", "shear", "minimumEdge", "minimumSpacing",
             "anchors", "headArea", "hookLength", "pullout", "edgeFlood", "edgeProtected", "edgeLeft", "edgeRight", "washerThickness", "tensionResistance", "shearResistance",
             "covers", "fixingLever",
+            "joint", "sealCompression", "timber", "composite",
             "footing", "measure", "lineResistance", "totalResistance",
         ];
         string[] whole = ["count", "webs", "riskCategory", "category", "rodsPerRow"];
-        string[] emptyAllowed = ["covers", "leakage", "strengths", "openings", "levels", "bays", "byOthers", "below", "wall", "actions", "coefficients"];
+        string[] emptyAllowed = ["covers", "leakage", "timber", "strengths", "openings", "levels", "bays", "byOthers", "below", "wall", "actions", "coefficients"];
         string[] libraryId = ["material", "profile"];
-        string[] words = ["format", "designBasis", "floodZone", "kind", "family", "shape", "bucklingClass", "strengthReference", "mounting", "valuesFor", "measure", "soil", "method", "support", "position", "pressing"];
+        string[] words = ["format", "designBasis", "floodZone", "kind", "family", "shape", "bucklingClass", "strengthReference", "mounting", "valuesFor", "measure", "soil", "duration", "method", "support", "position", "pressing"];
         var name = place.Name;
         return other switch
         {
