@@ -13,6 +13,7 @@ public static class VerificationTable
         .. WaveRows.Rows(),
         .. DebrisRows.Rows(),
         .. MemberRows.Rows(),
+        .. PostBaseRows.Rows(),
         .. GuideRows.Rows(),
         .. LeakageRows.Rows(),
         .. CoverRows.Rows(),
