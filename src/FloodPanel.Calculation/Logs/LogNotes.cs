@@ -32,7 +32,7 @@ internal static class LogNotes
         if (material is { Family: MaterialFamily.Timber, Reference: StrengthReference.NdsReference } && stack.Timber is null)
         {
             yield return new("timber-duration", new(
-                $"Reference values of the NDS need the duration of the load: choose it under Joints, seals and service of the logs."));
+                $"Reference values of the NDS need the duration of the load: choose it under Timber in the form of the logs."));
         }
 
         if (material.Family == MaterialFamily.Timber && strength.Across is null && strength.Log.Bending is not null)
@@ -44,7 +44,7 @@ internal static class LogNotes
         if (material.Family == MaterialFamily.Composite && strength.Walls is not null && strength.Cross is null)
         {
             yield return new("skin-composite", new(
-                $"The skin of the composite logs between webs is not checked: enter the strength across the fibres, and the factors on it under Joints, seals and service."));
+                $"The skin of the composite logs between webs is not checked: enter the strength across the fibres, and the factors on it under Composite in the form of the logs."));
         }
     }
 }
