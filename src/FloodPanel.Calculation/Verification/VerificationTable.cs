@@ -13,11 +13,8 @@ public static class VerificationTable
         .. WaveRows.Rows(),
         .. DebrisRows.Rows(),
         .. MemberRows.Rows(),
-<<<<<<< HEAD
         .. PostBaseRows.Rows(),
-=======
         .. LogRows.Rows(),
->>>>>>> 077d2be (Logs: form of joints, seals, timber duration and composite factors; verification rows)
         .. GuideRows.Rows(),
         .. LeakageRows.Rows(),
         .. CoverRows.Rows(),
