@@ -18,7 +18,7 @@ public class LogServiceTests : BenchContext
 
         Assert.Equal(new LogJoint { Travel = 0.004, SealCompression = 0.0025 }, Logs.Joint);
         Assert.Contains(
-            Editor.Result.Openings[0].Cases[0].Logs[0].Others, c => c is { Name: "log-end-seal", Capacity: 0.0025 });
+            Editor.ResultFor(Editor.Project.Openings[0].Id)!.Cases[0].Logs[0].Others, c => c is { Name: "log-end-seal", Capacity: 0.0025 });
     }
 
     [Fact]
@@ -35,21 +35,32 @@ public class LogServiceTests : BenchContext
         Assert.Equal(0.004, Logs.Joint!.Travel);
     }
 
-    /// <summary>Duration stands there for timber only, and changes the design stress by k_mod.</summary>
     [Fact]
-    public void Timber_LongerDuration_LowersTheDesignStress()
+    public void Timber_IsThere_HasADurationToChoose()
     {
         var page = Open("garage");
         Assert.Empty(page.FindAll("[data-testid='switch-logs.timber']"));
-        Editor.Do(new("timber", p => p with
-        {
-            DesignBasis = DesignBasisKind.Eurocode,
-            Openings = [p.Openings[0] with { Barrier = p.Openings[0].Barrier with { Logs = Logs with { Material = new LibraryMaterial("c24") } } }],
-        }));
+        Choose(page, "logs.material", "Own figures");
+        Choose(page, "logs.material.family", "Timber");
 
         page.Find("[data-testid='switch-logs.timber']").Change(true);
         Choose(page, "logs.timber.duration", "Up to two months");
+        Field(page, "logs.timber.sizeFactor").Input("1.2");
 
-        Assert.Equal(LoadDuration.MediumTerm, Logs.Timber!.Duration);
+        Assert.Equal(new TimberService { Duration = LoadDuration.MediumTerm, SizeFactor = 1.2 }, Logs.Timber);
+    }
+
+    [Fact]
+    public void Composite_IsThere_HasFactorsToEnter()
+    {
+        var page = Open("garage");
+        Choose(page, "logs.material", "Own figures");
+        Choose(page, "logs.material.family", "Composite");
+
+        page.Find("[data-testid='switch-logs.composite']").Change(true);
+        Field(page, "logs.composite.materialFactor").Input("2");
+        Field(page, "logs.composite.conversionFactor").Input("0.6");
+
+        Assert.Equal(new CompositeService { MaterialFactor = 2, ConversionFactor = 0.6 }, Logs.Composite);
     }
 }

@@ -10,7 +10,7 @@ public class MaterialFiguresTests : BenchContext
     [Theory]
     [InlineData("Aluminium", "ultimateStrength,weldedYield,weldedUltimate,bucklingClass")]
     [InlineData("Steel", "ultimateStrength")]
-    [InlineData("Timber", "strengthReference,crossCompression,characteristicDensity")]
+    [InlineData("Timber", "strengthReference,crossCompression,characteristicDensity,shearModulus")]
     [InlineData("Composite", "shearModulus,crossStrength")]
     public void Family_Chosen_ShowsItsFiguresOnly(string family, string figures)
     {
