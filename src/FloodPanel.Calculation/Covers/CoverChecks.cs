@@ -5,8 +5,8 @@ namespace FloodPanel.Calculation.Covers;
 /// <summary>The checks of a cover. Coefficients are those of its own plate under its own pressure, in the form of Roark's tables.</summary>
 internal static class CoverChecks
 {
-    private const string Rectangle = "Lévy's series, Timoshenko and Woinowsky-Krieger, articles 30 to 36 and 41";
-    private const string Circle = "Circular plate, Timoshenko and Woinowsky-Krieger, articles 16 and 63";
+    private const string Rectangle = "Coefficients of this plate and pressure by Lévy's series, Timoshenko and Woinowsky-Krieger, articles 30 to 36 and 41";
+    private const string Circle = "Coefficients of this plate and pressure in closed form, Timoshenko and Woinowsky-Krieger, articles 16 and 63";
 
     /// <summary>Where the coefficients come from.</summary>
     public static string Theory(CoverCase cover) => cover.Cover.Plate is ProjectTree.RectangleCover ? Rectangle : Circle;
@@ -19,6 +19,7 @@ internal static class CoverChecks
         var steps = new StepList(20);
         cover.ExplainPressure(steps, isDesign: true);
         cover.ExplainReference(steps);
+        steps.Given("ν", cover.Cover.PoissonRatio, Dimension.Ratio);
         steps.Given("β", 6 * plate.Moment / (cover.Pressure * cover.Reference * cover.Reference), Dimension.Ratio);
         steps.Given("t", thickness, Dimension.SectionLength);
         steps.Add("σ", $"β·q·{b}²/t²", stress, Dimension.Stress);
@@ -35,6 +36,7 @@ internal static class CoverChecks
         var steps = new StepList(20);
         cover.ExplainPressure(steps, isDesign: false);
         cover.ExplainReference(steps);
+        steps.Given("ν", cover.Cover.PoissonRatio, Dimension.Ratio);
         steps.Given("α", deflection * modulus * Math.Pow(thickness, 3) / (cover.Pressure * Math.Pow(cover.Reference, 4)), Dimension.Ratio);
         steps.Given("E", modulus, Dimension.ElasticModulus);
         steps.Given("t", thickness, Dimension.SectionLength);

@@ -43,6 +43,7 @@ internal static class CoverTension
     {
         cover.ExplainPressure(steps, isDesign: true);
         cover.ExplainReference(steps);
+        steps.Given("ν", cover.Cover.PoissonRatio, Dimension.Ratio);
         steps.Given("p", cover.Cover.Fasteners.Pitch, Dimension.SectionLength);
         steps.Given("n_g", cover.Cover.Fasteners.GasketLoad, Dimension.LineForce);
         var (formula, tension) = cover.Cover.Pressing == CoverPressing.Unseating ? Unseating(cover, plate, steps) : Seating(cover, plate, steps);

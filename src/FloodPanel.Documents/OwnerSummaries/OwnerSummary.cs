@@ -47,6 +47,7 @@ public static class OwnerSummary
                 ]),
                 .. Protection(result, units),
                 .. Parts(result, library, units),
+                .. CoversTable.Of(result, units),
                 .. OwnerAdvice.WhatToExpect(result, units),
                 .. result.Openings.Select(o => Opening(result.Project, o, library, units, revision, paper)),
                 .. Cautions(result, units),
@@ -57,13 +58,24 @@ public static class OwnerSummary
     private static Band? Band(ProjectResult result)
     {
         var open = result.Openings.Count(o => o.Verdict.Kind != VerdictKind.Adequate);
-        return result.Openings.Count == 0
-            ? new Band("Not for construction", "No opening has been entered yet")
-            : open == 0 ? null : new Band(
-                "Not for construction",
-                result.Openings.Count == 1
-                    ? "The barrier is not shown to be adequate"
-                    : FormattableString.Invariant($"{open} of {result.Openings.Count} barriers are not shown to be adequate"));
+        var covers = result.Covers.Count(c => c.Kind != VerdictKind.Adequate);
+        if (result.Openings.Count == 0 && covers == 0)
+        {
+            return new Band("Not for construction", "No opening has been entered yet");
+        }
+
+        string[] reasons = [.. Open("barrier", open, result.Openings.Count), .. Open("cover", covers, result.Covers.Count)];
+        return reasons.Length == 0 ? null : new Band("Not for construction", string.Join("; ", reasons));
+    }
+
+    private static IEnumerable<string> Open(string what, int open, int all)
+    {
+        if (open > 0)
+        {
+            yield return all == 1
+                ? $"The {what} is not shown to be adequate"
+                : FormattableString.Invariant($"{open} of {all} {what}s are not shown to be adequate");
+        }
     }
 
     private static IEnumerable<Block> Protection(ProjectResult result, UnitSystem units)
@@ -116,8 +128,9 @@ public static class OwnerSummary
     {
         var cautions = result.Openings
             .SelectMany(o => o.Notes.Where(n => n.Code != SafetyNote).Select(n => (o.Opening.Name, Words: n.Text.In(units))))
+            .Concat(result.Covers.SelectMany(c => c.Gaps.Concat(c.Notes).Select(n => (c.Cover.Name, Words: n.Text.In(units)))))
             .GroupBy(c => c.Words)
-            .Select(group => result.Openings.Count == 1
+            .Select(group => result.Openings.Count == 1 && result.Covers.Count == 0
                 ? group.Key
                 : $"{string.Join(", ", group.Select(c => OwnerAdvice.ShortName(c.Name)))}: {group.Key}")
             .ToArray();

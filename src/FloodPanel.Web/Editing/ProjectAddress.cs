@@ -9,6 +9,8 @@ public static class ProjectAddress
 
     public static string Openings(Guid id) => $"/projects/{id}/openings";
 
+    public static string CoverPlates(Guid id) => $"/projects/{id}/covers";
+
     public static string Bench(Guid id, string openingId) => $"/projects/{id}/openings/{Uri.EscapeDataString(openingId)}";
 
     public static string Export(Guid id) => $"/projects/{id}/export";

@@ -1,4 +1,5 @@
 using FloodPanel.Calculation;
+using FloodPanel.Calculation.Covers;
 using FloodPanel.Calculation.ProjectTree;
 using FloodPanel.Storage;
 
@@ -57,6 +58,9 @@ public sealed class ProjectEditor : IAsyncDisposable
 
     /// <summary>The result of an opening; null when it has a problem or does not exist.</summary>
     public OpeningResult? ResultFor(string openingId) => results.For(openingId);
+
+    /// <summary>The result of a cover by its place in the list; null when it has a problem.</summary>
+    public CoverResult? CoverAt(int index) => results.CoverAt(index);
 
     /// <summary>The problem of one field by its path in the project file, "openings[0].clearWidth"; null when it has none.</summary>
     public Sentence? ProblemAt(string path) => Problems.FirstOrDefault(p => p.Path == path)?.Message;

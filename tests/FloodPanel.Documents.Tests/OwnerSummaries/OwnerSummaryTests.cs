@@ -31,6 +31,27 @@ public class OwnerSummaryTests
         Assert.Equal(new Band("Not for construction", reason), report.Band);
     }
 
+    /// <summary>Covers stand in a table of their own; one that is not adequate keeps the page from being built from.</summary>
+    [Fact]
+    public void Compose_Covers_TableWithVerdictsBandAndWhatIsMissing()
+    {
+        var cover = new Cover
+        {
+            Name = "Cellar vent",
+            Plate = new RectangleCover { Width = 0.6, Height = 0.4 },
+            Level = Sample.Project.Site.DesignFloodLevel - 0.5,
+            Material = new Material { Family = MaterialFamily.Steel, Density = 7850, ElasticModulus = 210e9, AllowableBending = 140e6 },
+        };
+        var project = Sample.Project with { Openings = [], Covers = [cover] };
+
+        var report = OwnerSummary.Compose(Design.Run(project, Library.Empty), Library.Empty, UnitSystem.SI, 1, new DateOnly(2026, 3, 1));
+
+        var row = All(report).OfType<Table>().Single(t => t.Columns[0].Heading == "Cover").Rows[0];
+        Assert.Equal(["Cellar vent", "0.600 × 0.400", "6.0", "14", "0.500", "Incomplete"], row);
+        Assert.Equal(new Band("Not for construction", "The cover is not shown to be adequate"), report.Band);
+        Assert.Contains(All(report).OfType<Paragraph>(), p => p.Words.StartsWith("Cellar vent: Enter the tension", StringComparison.Ordinal));
+    }
+
     [Fact]
     public void Compose_Actions_AreNamedInTheOwnersWords()
     {
