@@ -75,7 +75,8 @@ public static class CoverDrawing
         sketch.Add(Sketch.Stroke(left, line, right, line, isOff ? LineRole.Hidden : LineRole.Water));
         sketch.Add(new Polygon([new(left + 1.2, line), new(left + 0.2, line - 1.8), new(left + 2.2, line - 1.8)], FillRole.WaterMark, null));
         var words = isOff ? $"water, {frame.Length(frame.Result.Depth - frame.Height)} above the upper edge" : "water";
-        sketch.Add(new Text(words, new(left + 2.9, line - 0.35 * u), Paper.SmallText, TextAnchor.Start, TextRole.Muted));
+        var from = shown < frame.Height ? frame.At(frame.Width, 0).X + 1.2 : left + 2.9;
+        sketch.Add(new Text(words, new(from, line - 0.35 * u), Paper.SmallText, TextAnchor.Start, TextRole.Muted));
     }
 
     private static void Rim(Sketch sketch, Frame frame)
@@ -83,10 +84,10 @@ public static class CoverDrawing
         var outline = Outline(frame);
         if (frame.Result.Cover.Plate is RectangleCover { Support: RectangleSupport.ThreeEdges })
         {
-            var free = frame.At(frame.Width / 2, frame.Height);
+            var free = frame.At(0, frame.Height);
             sketch.Add(new Polyline([outline[3], outline[0], outline[1], outline[2]], LineRole.Outline));
             sketch.Add(Sketch.Stroke(outline[3].X, outline[3].Y, outline[2].X, outline[2].Y, LineRole.Hidden));
-            sketch.Add(new Text("free edge", free with { Y = free.Y + 1.2 * Paper.TextSize }, Paper.SmallText, TextAnchor.Middle, TextRole.Muted));
+            sketch.Add(new Text("free edge", new(free.X + 1.5, free.Y + 1.2 * Paper.TextSize), Paper.SmallText, TextAnchor.Start, TextRole.Muted));
         }
         else
         {
@@ -113,7 +114,8 @@ public static class CoverDrawing
         sketch.Add(Sketch.Stroke(at.X, at.Y - 1.5, at.X, at.Y + 1.5, LineRole.Tick));
         if (frame.Width * frame.PerMetre > 26 && frame.Height * frame.PerMetre > 14)
         {
-            sketch.Add(new Text("bends most", at with { Y = at.Y + 1.2 * Paper.TextSize + 1.2 }, Paper.SmallText, TextAnchor.Middle, TextRole.Muted));
+            var isLow = frame.At(0, 0).Y - at.Y < 2.5 * Paper.TextSize;
+            sketch.Add(new Text("bends most", at with { Y = isLow ? at.Y - 2.2 : at.Y + 1.2 * Paper.TextSize + 1.2 }, Paper.SmallText, TextAnchor.Middle, TextRole.Muted));
         }
     }
 
