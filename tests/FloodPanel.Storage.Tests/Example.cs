@@ -169,6 +169,7 @@ internal static class Example
                 HeadArea = 600e-6,
                 HookLength = 0.07,
                 Pullout = 40e3,
+                CriticalEdge = 0.31,
                 Category = 2,
                 InstallationFactor = 1.2,
                 Spacing = 0.14,

@@ -17,7 +17,17 @@ public static class AciAnchors
     /// <summary>Greatest depth that the breakout formulas cover: 25 in [m].</summary>
     public const double GreatestDepth = 25 * Inch;
 
-    private const double MostUltimate = 125_000 * Psi;
+    /// <summary>Greatest f_uta that counts: 125 ksi [Pa].</summary>
+    public const double MostUltimate = 125_000 * Psi;
+
+    /// <summary>Greatest f'c that counts (17.3.1, from memory): 10 000 psi cast in, 8 000 psi post-installed [Pa].</summary>
+    /// <param name="kind">Kind of anchor.</param>
+    public static double MostConcrete(AnchorKind kind) => (kind == AnchorKind.PostInstalled ? 8_000 : 10_000) * Psi;
+
+    /// <summary>f'c that counts [Pa].</summary>
+    /// <param name="kind">Kind of anchor.</param>
+    /// <param name="strength">f'c as specified [Pa], > 0.</param>
+    public static double Concrete(AnchorKind kind, double strength) => Math.Min(strength, MostConcrete(kind));
 
     /// <summary>f_uta ≤ min(1.9·f_ya, 125 ksi) (17.6.1.2) [Pa].</summary>
     /// <param name="yield">f_ya [Pa], > 0.</param>
@@ -56,7 +66,13 @@ public static class AciAnchors
     /// <param name="cracked">True where the concrete may crack.</param>
     public static double CrackFactor(AnchorKind kind, bool cracked) => cracked ? 1 : kind == AnchorKind.PostInstalled ? 1.4 : 1.25;
 
-    /// <summary>N_cbg = (A_Nc/A_Nco)·ψ_ec·ψ_ed·ψ_c·N_b, breakout strength of a group in tension (17.6.2.1) [N].</summary>
+    /// <summary>ψ_cp: post-installed in uncracked concrete near an edge, c_min/c_ac, at least 1.5·h_ef/c_ac (17.6.2.6, from memory); else 1 [-].</summary>
+    /// <param name="body">The concrete that is torn out.</param>
+    /// <param name="critical">c_ac, critical edge distance of the approval [m], > 0; null where splitting does not count.</param>
+    public static double SplittingFactor(BreakoutBody body, double? critical) =>
+        critical is { } distance && body.NearestEdge is { } edge ? Math.Min(1, Math.Max(edge, 1.5 * body.Depth) / distance) : 1;
+
+    /// <summary>N_cbg = (A_Nc/A_Nco)·ψ_ec·ψ_ed·ψ_c·N_b, breakout strength of a group in tension (17.6.2.1), without ψ_cp [N].</summary>
     /// <param name="body">The concrete that is torn out.</param>
     /// <param name="kind">Kind of anchor.</param>
     /// <param name="concrete">f'c [Pa], > 0.</param>
@@ -110,6 +126,11 @@ public static class AciAnchors
         return 160 * (edge / Inch) * (Math.Sqrt(headArea) / Inch) * Math.Sqrt(concrete / Psi) * Pound;
     }
 
+    /// <summary>(1 + c_2/c_1)/4: side-face blowout of an anchor near a corner, c_2 less than 3·c_1 (17.6.4.1.1, from memory); else 1 [-].</summary>
+    /// <param name="edge">c_1, the nearer edge [m], > 0.</param>
+    /// <param name="other">c_2, the edge square to it [m]; null when far.</param>
+    public static double CornerFactor(double edge, double? other) => Math.Min(1, (1 + Math.Max(1, (other ?? double.PositiveInfinity) / edge)) / 4);
+
     /// <summary>V_b, basic edge strength of one anchor in shear: the smaller of 7·(l_e/d)^0.2·√d and 9, times √f'c·c^1.5 (17.7.2.2) [N].</summary>
     /// <param name="edge">c_a1 [m], > 0.</param>
     /// <param name="bearing">l_e, h_ef but at most 8·d [m], > 0.</param>
@@ -129,14 +150,18 @@ public static class AciAnchors
     internal static double EdgeConstant(double bearing, double diameter) =>
         Math.Min(7 * Math.Pow(bearing / diameter, 0.2) * Math.Sqrt(diameter / Inch), 9);
 
+    /// <summary>ψ_c,V: 1.0 cracked without reinforcement at the edge, 1.4 uncracked (17.7.2.5, from memory) [-].</summary>
+    /// <param name="cracked">True where the concrete may crack.</param>
+    public static double EdgeCrackFactor(bool cracked) => cracked ? 1 : 1.4;
+
     /// <summary>V_cbg = (A_Vc/A_Vco)·ψ_ed·ψ_c·ψ_h·V_b, edge strength of a row in shear, no eccentricity (17.7.2.1) [N].</summary>
     /// <param name="body">The concrete that breaks off.</param>
     /// <param name="bearing">l_e [m], > 0.</param>
     /// <param name="diameter">d_a [m], > 0.</param>
     /// <param name="concrete">f'c [Pa], > 0.</param>
-    /// <param name="cracked">True where the concrete may crack; uncracked counts 1.4 (from memory).</param>
+    /// <param name="cracked">True where the concrete may crack; see <see cref="EdgeCrackFactor"/>.</param>
     public static double Edge(EdgeBody body, double bearing, double diameter, double concrete, bool cracked) =>
-        body.Area / body.SingleArea * body.SideFactor * (cracked ? 1 : 1.4) * body.ThicknessFactor
+        body.Area / body.SingleArea * body.SideFactor * EdgeCrackFactor(cracked) * body.ThicknessFactor
         * BasicEdge(body.EdgeDistance, bearing, diameter, concrete);
 
     /// <summary>k_cp: 2, or 1 where less than 2.5 in deep (17.7.3.1) [-].</summary>

@@ -1,4 +1,6 @@
 using FloodPanel.Calculation.Parts;
+using FloodPanel.Calculation.PostBases;
+using FloodPanel.Calculation.Posts;
 using FloodPanel.Calculation.ProjectTree;
 
 namespace FloodPanel.Calculation.Anchors;
@@ -9,14 +11,13 @@ internal static class AnchorReport
     public static IEnumerable<PartResult> Of(OpeningModel model, CaseEvaluation numbers)
     {
         var barrier = model.Opening.Barrier;
-        if (model.Post is null || barrier is not { Anchors: { } anchors, BasePlate: not null } || NotCovered(anchors, model.Basis.Kind) is not null)
+        if (model.Post is null || barrier is not { Anchors: { } anchors, BasePlate: not null } || Lacks(anchors, model.Basis.Kind) is not null)
         {
             return [];
         }
 
-        return Enumerable.Range(0, model.PostCount).Select(post => new PartResult(
-            NeededChecks.Anchors, FormattableString.Invariant($"post {post + 1}"),
-            [.. Checks(AnchorCase.Of(model, numbers, post))], []));
+        var posts = numbers.Posts.ToArray();
+        return Enumerable.Range(0, model.PostCount).Select(post => Part(model, anchors, posts[post], post));
     }
 
     public static IEnumerable<PartGap> Gaps(OpeningModel model)
@@ -35,7 +36,7 @@ internal static class AnchorReport
         {
             yield return Gap("anchors-no-plate", $"The anchors need the base plate that they hold: enter it, or declare the anchors designed by others.");
         }
-        else if ((NotCovered(anchors, model.Basis.Kind) ?? Unfinished(anchors)) is { } text)
+        else if (Lacks(anchors, model.Basis.Kind) is { } text)
         {
             yield return new(NeededChecks.Anchors, text);
         }
@@ -52,13 +53,13 @@ internal static class AnchorReport
         if (anchors.Kind == AnchorKind.PostInstalled || anchors.Method == AnchorMethod.Approval)
         {
             yield return new("anchor-installation", new(
-                $"Drilled anchors hold only as well as they are set: hole, cleaning, torque and inspection follow the approval, and a trained installer sets them."));
+                $"Drilled anchors hold only as well as they are set: hole, cleaning, torque and inspection follow the approval, and a trained installer sets them (common practice)."));
         }
 
-        if (anchors.Method == AnchorMethod.En1992)
+        if (anchors.Method == AnchorMethod.En1992 && (anchors.Cracked || anchors.CriticalEdge is null))
         {
             yield return new("anchor-splitting", new(
-                $"Splitting of the concrete is not checked: keep the least edge distance, spacing and thickness of the approval, or reinforce against it."));
+                $"Splitting of the concrete is not checked: reinforcement must hold its cracks to 0.3 mm, and edge distance, spacing and thickness must be at least those of the approval."));
         }
 
         if (!anchors.Cracked)
@@ -68,13 +69,19 @@ internal static class AnchorReport
         }
     }
 
-    private static IEnumerable<Check> Checks(AnchorCase anchors) => anchors.Input.Method switch
+    private static PartResult Part(OpeningModel model, AnchorInput anchors, PostResponse response, int post)
     {
-        AnchorMethod.Approval => ApprovalChecks.Of(anchors),
-        AnchorMethod.Aci318 => AciChecks.Of(anchors),
-        AnchorMethod.En1992 => EurocodeChecks.Of(anchors),
-        _ => throw new ArgumentOutOfRangeException(nameof(anchors), anchors.Input.Method, "is not a method"),
-    };
+        var setting = new PlateSetting(model, response);
+        var demand = new AnchorDemand(
+            setting.Response.Tension, setting.Response.OtherTension, setting.Shear, response.BaseMoment < 0, response.BaseShear < 0);
+        return new(
+            NeededChecks.Anchors, FormattableString.Invariant($"post {post + 1}"),
+            AnchorResistance.Checks(anchors, setting.Plate, demand, model.Basis.Kind),
+            [new("Tension of the row of anchors", BasePlates.Source, setting.UntilTension().Done())]);
+    }
+
+    /// <summary>Why there is no result; null where there is one. Part of the checks alone would say too much.</summary>
+    private static Note? Lacks(AnchorInput anchors, DesignBasisKind basis) => NotCovered(anchors, basis) ?? Unfinished(anchors);
 
     /// <summary>What the method does not cover; null where it covers all.</summary>
     private static Note? NotCovered(AnchorInput anchors, DesignBasisKind basis) => (anchors.Method, basis) switch
@@ -85,6 +92,8 @@ internal static class AnchorReport
             $"EN 1992-4 goes with the Eurocode basis only: judge the anchors by ACI 318 or by approval values."),
         (AnchorMethod.En1992, _) when anchors.Kind == AnchorKind.Hooked => Covered(
             $"EN 1992-4 does not cover hooks: use headed anchors, or approval values."),
+        (AnchorMethod.En1992, _) when anchors.Ultimate > EurocodeAnchors.MostUltimate => Covered(
+            $"EN 1992-4 covers the shear of steel to an ultimate strength of {new Quantity(EurocodeAnchors.MostUltimate, Dimension.Stress)}; the anchors have {new Quantity(anchors.Ultimate, Dimension.Stress)}."),
         (AnchorMethod.Aci318, _) when anchors.Depth > AciAnchors.GreatestDepth => Covered(
             $"ACI 318 covers breakout to an effective depth of {new Quantity(AciAnchors.GreatestDepth, Dimension.SectionLength)}; the anchors are {new Quantity(anchors.Depth, Dimension.SectionLength)} deep."),
         (AnchorMethod.Aci318, _) when anchors is { Kind: AnchorKind.Hooked, HookLength: { } hook } && hook < 3 * anchors.Diameter => Covered(
@@ -110,6 +119,10 @@ internal static class AnchorReport
                 new("anchor-hook-missing", new($"The anchors are hooked: enter the length of the hook.")),
             AnchorKind.PostInstalled when anchors.Pullout is null =>
                 new("anchor-pullout-missing", new($"The anchors are drilled: enter their pull-out strength from the approval.")),
+            AnchorKind.PostInstalled when anchors.MinimumEdge is null || anchors.MinimumSpacing is null =>
+                new("anchor-distances-missing", new($"The anchors are drilled: enter the least edge distance and the least spacing of their approval.")),
+            AnchorKind.PostInstalled when !anchors.Cracked && anchors.CriticalEdge is null =>
+                new("anchor-critical-edge-missing", new($"The anchors are drilled and the concrete does not crack: enter the critical edge distance of their approval, or take the concrete as cracked.")),
             AnchorKind.PostInstalled => NeedsSource(anchors),
             _ => null,
         };

@@ -36,26 +36,6 @@ internal static class ApprovalChecks
             yield return Closed(
                 "anchor-interaction", "Tension and shear together", $"Sum of the utilisations; {source}", Dimension.Ratio, "u_NV/u_R", sum, input.InteractionLimit, steps);
         }
-
-        if (input.MinimumEdge is { } edge && anchors.Layout.Edges(2).Min() is { } nearest)
-        {
-            yield return Least("anchor-edge-distance", "Edge distance", source, "c", edge, nearest);
-        }
-
-        if (input.MinimumSpacing is { } spacing)
-        {
-            var closest = anchors.PerRow > 1 ? Math.Min(anchors.Layout.Spacing, anchors.Layout.RowSpacing) : anchors.Layout.RowSpacing;
-            yield return Least("anchor-spacing", "Spacing", source, "s", spacing, closest);
-        }
-    }
-
-    /// <summary>The least distance as the demand, what there is as the capacity.</summary>
-    private static Check Least(string name, string title, string source, string symbol, double least, double there)
-    {
-        var steps = new StepList(3);
-        steps.Given($"{symbol}_min", least, Dimension.SectionLength);
-        steps.Given(symbol, there, Dimension.SectionLength);
-        return Closed(name, title, source, Dimension.SectionLength, $"{symbol}_min/{symbol}", least, there, steps) with { IsDetailing = true };
     }
 
     private static Check Closed(

@@ -11,6 +11,9 @@ public static class EurocodeAnchors
     /// <summary>1 MPa [Pa].</summary>
     public const double Megapascal = 1e6;
 
+    /// <summary>Greatest f_uk for which k_6 holds: 1000 MPa (7.2.2.3.1) [Pa].</summary>
+    public const double MostUltimate = 1000 * Megapascal;
+
     /// <summary>γ_c [-].</summary>
     public const double ConcreteFactor = 1.5;
 
@@ -49,7 +52,7 @@ public static class EurocodeAnchors
         return constant * Math.Sqrt(concrete / Megapascal) * Math.Pow(depth / Millimetre, 1.5);
     }
 
-    /// <summary>N_Rk,c = N⁰_Rk,c·(A/A⁰)·ψ_s·ψ_ec; ψ_re and ψ_M are taken as 1, which is safe for anchors over 100 mm deep (7.2.1.4) [N].</summary>
+    /// <summary>N_Rk,c = N⁰_Rk,c·(A/A⁰)·ψ_s·ψ_ec, before ψ_re; ψ_M is taken as 1, which is safe (7.2.1.4) [N].</summary>
     /// <param name="body">The concrete that is torn out.</param>
     /// <param name="constant">k_1 [-], > 0.</param>
     /// <param name="concrete">f_ck [Pa], > 0.</param>
@@ -128,7 +131,29 @@ public static class EurocodeAnchors
         body.Area / body.SingleArea * body.SideFactor * body.ThicknessFactor
         * BasicEdge(body.EdgeDistance, bearing, diameter, concrete, cracked);
 
+    /// <summary>l_f, length that bears in shear: h_ef, at most 12·d up to 24 mm of diameter, else max(8·d, 300 mm) (7.2.2.5) [m].</summary>
+    /// <param name="depth">h_ef [m], > 0.</param>
+    /// <param name="diameter">d [m], > 0.</param>
+    public static double BearingLength(double depth, double diameter) =>
+        Math.Min(depth, IsThin(diameter) ? 12 * diameter : Math.Max(8 * diameter, 300 * Millimetre));
+
+    /// <summary>ψ_s,Nb = 0.7 + 0.3·c_2/(2·c_1) ≤ 1 near a corner (7.2.1.8) [-].</summary>
+    /// <param name="edge">c_1, the nearer edge [m], > 0.</param>
+    /// <param name="other">c_2, the edge square to it [m]; null when far.</param>
+    public static double CornerFactor(double edge, double? other) => other is { } square ? Math.Min(1, 0.7 + 0.3 * square / (2 * edge)) : 1;
+
+    /// <summary>True where shear has no lever arm: no grout, or at most half a diameter of at least 30 MPa (6.2.2.3).</summary>
+    /// <param name="grout">Thickness of the grout [m], ≥ 0.</param>
+    /// <param name="diameter">d [m], > 0.</param>
+    /// <param name="strength">Of the grout, taken as that of the concrete [Pa], > 0.</param>
+    public static bool BearsDirectly(double grout, double diameter, double strength) =>
+        grout == 0 || (grout <= diameter / 2 && strength >= 30 * Megapascal);
+
+    internal static string BearingFormula(double diameter) => IsThin(diameter) ? "min(h_ef, 12·d)" : "min(h_ef, max(8·d, 300·ℓ_0))";
+
     /// <summary>k_8: 2, or 1 where less than 60 mm deep (7.2.2.4) [-].</summary>
     /// <param name="depth">h_ef [m].</param>
     public static double PryoutFactor(double depth) => depth < 60 * Millimetre ? 1 : 2;
+
+    private static bool IsThin(double diameter) => diameter <= 24 * Millimetre;
 }

@@ -27,6 +27,9 @@ public static class AnchorFields
     /// <summary>AnchorInput.Pullout.</summary>
     public static Field Pullout { get; } = new("pullout", "Pull-out strength", Dimension.Force, 0, 2e6, "Characteristic, of one anchor, from its approval.", true);
 
+    /// <summary>AnchorInput.CriticalEdge.</summary>
+    public static Field CriticalEdge { get; } = new("criticalEdge", "Critical edge distance", Dimension.SectionLength, 0, 5, "For splitting, from the approval: c_ac or c_cr,sp; counts where the concrete does not crack.", true);
+
     /// <summary>AnchorInput.Category.</summary>
     public static Field Category { get; } = new("category", "Anchor category", Dimension.Count, 1, 3, "ACI 355.2, from the approval.");
 
@@ -64,7 +67,7 @@ public static class AnchorFields
     public static Field InteractionLimit { get; } = new("interactionLimit", "Interaction limit", Dimension.Ratio, 1, 1.2, "Greatest sum of both utilisations.");
 
     /// <summary>AnchorInput.MinimumEdge.</summary>
-    public static Field MinimumEdge { get; } = new("minimumEdge", "Least edge distance", Dimension.SectionLength, 0, 5, "From the approval.", true);
+    public static Field MinimumEdge { get; } = new("minimumEdge", "Least edge distance", Dimension.SectionLength, 0, 5, "From the approval, or from cover and code.", true);
 
     /// <summary>AnchorInput.MinimumSpacing.</summary>
     public static Field MinimumSpacing { get; } = new("minimumSpacing", "Least spacing", Dimension.SectionLength, 0, 5, "From the approval.", true);

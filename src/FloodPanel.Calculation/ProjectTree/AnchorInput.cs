@@ -39,6 +39,9 @@ public sealed record AnchorInput
     /// <summary>N_p, characteristic pull-out strength of a post-installed anchor, from its approval [N], > 0.</summary>
     public double? Pullout { get; init; }
 
+    /// <summary>c_ac or c_cr,sp, edge distance from which a drilled anchor does not split concrete that does not crack, from its approval [m], > 0, or null.</summary>
+    public double? CriticalEdge { get; init; }
+
     /// <summary>Category of a post-installed anchor in ACI 355.2, 1 to 3.</summary>
     public int Category { get; init; } = 1;
 

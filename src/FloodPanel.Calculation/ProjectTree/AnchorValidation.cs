@@ -18,6 +18,7 @@ internal static class AnchorValidation
         problems.Check(AnchorFields.HeadArea, anchors.HeadArea, path);
         problems.Check(AnchorFields.HookLength, anchors.HookLength, path);
         problems.Check(AnchorFields.Pullout, anchors.Pullout, path);
+        problems.Check(AnchorFields.CriticalEdge, anchors.CriticalEdge, path);
         problems.Check(AnchorFields.Category, anchors.Category, path);
         problems.Check(AnchorFields.InstallationFactor, anchors.InstallationFactor, path);
         problems.Check(AnchorFields.Spacing, anchors.Spacing, path);

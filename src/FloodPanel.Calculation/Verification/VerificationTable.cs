@@ -16,6 +16,7 @@ public static class VerificationTable
         .. PostBaseRows.Rows(),
         .. LogRows.Rows(),
         .. GuideRows.Rows(),
+        .. AnchorRows.Rows(),
         .. LeakageRows.Rows(),
         .. CoverRows.Rows(),
     ];

@@ -21,6 +21,7 @@ internal static class AnchorFile
             HeadArea = anchors.NumberOrNull("headArea"),
             HookLength = anchors.NumberOrNull("hookLength"),
             Pullout = anchors.NumberOrNull("pullout"),
+            CriticalEdge = anchors.NumberOrNull("criticalEdge"),
             Category = anchors.WholeNumber("category", AnchorFields.Category, blank.Category),
             InstallationFactor = anchors.Number("installationFactor", blank.InstallationFactor),
             Spacing = anchors.Number("spacing", blank.Spacing),
@@ -63,6 +64,7 @@ internal static class AnchorFile
         json.WriteNumberIfAny("headArea", anchors.HeadArea);
         json.WriteNumberIfAny("hookLength", anchors.HookLength);
         json.WriteNumberIfAny("pullout", anchors.Pullout);
+        json.WriteNumberIfAny("criticalEdge", anchors.CriticalEdge);
         json.WriteNumber("category", anchors.Category);
         json.WriteNumber("installationFactor", anchors.InstallationFactor);
         json.WriteNumber("spacing", anchors.Spacing);

@@ -38,6 +38,8 @@ public static class AnchorSets
         from cracked in Gen.Elements(false, true)
         from shared in Gen.Elements(false, true)
         from washer in Numbers.Perhaps(Numbers.From(0.005, 0.015))
+        from critical in Numbers.Perhaps(Numbers.From(0.1, 0.6))
+        from spacing in Numbers.From(0.06, 0.6)
         select new AnchorInput
         {
             Method = method,
@@ -47,6 +49,8 @@ public static class AnchorSets
             HeadArea = 400e-6,
             HookLength = 0.06,
             Pullout = 45e3,
+            CriticalEdge = critical,
+            Spacing = spacing,
             EdgeFlood = flood,
             EdgeProtected = ahead,
             EdgeLeft = left,

@@ -188,7 +188,7 @@ public class RefusalTests
             "below", "ultimateStrength", "weldedYield", "weldedUltimate", "shearModulus", "crossStrength", "crossCompression", "characteristicDensity", "bucklingClass",
             "raker", "footResistance", "basePlate", "weldLeg", "weldStrength",
             "guides", "wallBearing", "tension", "shear", "minimumEdge", "minimumSpacing",
-            "anchors", "headArea", "hookLength", "pullout", "edgeFlood", "edgeProtected", "edgeLeft", "edgeRight", "washerThickness", "tensionResistance", "shearResistance",
+            "anchors", "headArea", "hookLength", "pullout", "criticalEdge", "edgeFlood", "edgeProtected", "edgeLeft", "edgeRight", "washerThickness", "tensionResistance", "shearResistance",
             "covers", "fixingLever",
             "joint", "sealCompression", "timber", "composite",
             "footing", "measure", "lineResistance", "totalResistance",

@@ -43,6 +43,25 @@ public class AnchorsSectionTests : BenchContext
         Assert.All(hidden.Split(','), key => Assert.Empty(page.FindAll($"[data-field='{key}']")));
     }
 
+    /// <summary>Splitting counts where the concrete does not crack: for drilled anchors, and for all under EN 1992-4.</summary>
+    [Theory]
+    [InlineData("ACI 318-19", "Drilled", true)]
+    [InlineData("ACI 318-19", "Cast in, headed", false)]
+    [InlineData("EN 1992-4", "Cast in, headed", true)]
+    public void Uncracked_Chosen_AsksForTheCriticalEdge(string method, string kind, bool asks)
+    {
+        var page = Open("garage");
+        page.Find("[data-testid=switch-anchors]").Change(true);
+        Choose(page, "anchors.method", method);
+        Choose(page, "anchors.kind", kind);
+        Assert.Empty(page.FindAll("[data-field='anchors.criticalEdge']"));
+
+        page.Find("[data-testid=anchors-cracked]").Change(false);
+
+        Assert.False(Anchors!.Cracked);
+        Assert.Equal(asks, page.FindAll("[data-field='anchors.criticalEdge']").Count > 0);
+    }
+
     [Fact]
     public void Values_Typed_AreInTheProjectAndSurviveOffAndOn()
     {
