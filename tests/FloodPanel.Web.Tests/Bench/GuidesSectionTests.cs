@@ -39,7 +39,7 @@ public class GuidesSectionTests : BenchContext
         Field(page, "guides.fasteners.source").Input("Approval 12/345 (invented)");
 
         Assert.Empty(page.FindAll("[data-testid^=note-guide-fasteners], [data-testid^=note-guides]"));
-        page.Find("[data-testid=use-anchors-right-guide-fastener-interaction]").Click();
+        page.Find("[data-testid=use-anchors-left-guide-fastener-interaction]").Click();
         Assert.Contains("Approval 12/345 (invented)", page.Find("[data-testid=working]").TextContent, StringComparison.Ordinal);
     }
 

@@ -30,7 +30,8 @@ public sealed partial class PartTable
     {
         get
         {
-            var checks = Case.Parts.SelectMany(p => p.Checks).ToArray();
+            // Both guides may hold the very same checks.
+            var checks = Case.Parts.SelectMany(p => p.Checks).Distinct<Check>(ReferenceEqualityComparer.Instance).ToArray();
             var shown = Calculation.Units.FormatColumn([.. checks.Select(c => c.Utilisation)], Dimension.Ratio, Units);
             return checks.Zip(shown).ToDictionary(pair => (object)pair.First, pair => pair.Second, ReferenceEqualityComparer.Instance);
         }
