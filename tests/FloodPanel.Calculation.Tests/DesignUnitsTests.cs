@@ -11,6 +11,12 @@ public class DesignUnitsTests
     [Property(MaxTest = 100)]
     public void Evaluate_TypedInUSUnits_SameAsInSI(Scenario scenario)
     {
+        // A wave at its very limit is covered or not by the last digit typed.
+        if (scenario.Model.Wave is { Input: NonBreakingWaveInput wave, GreatestHeight: { } limit } && Math.Abs(wave.Height - limit) < 1e-5)
+        {
+            return;
+        }
+
         var si = new Retyped(UnitSystem.SI).Of(scenario);
         var us = new Retyped(UnitSystem.USCustomary).Of(scenario);
         var full = si.With((Opening o) => o with { ProtectedSideLevel = null }).WithDepth(si.Result.BarrierHeight).Result;
