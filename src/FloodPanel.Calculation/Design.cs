@@ -63,7 +63,7 @@ public static class Design
             HoldDowns = holdDowns,
             Leakage = LeakageEstimate.Of(opening.Leakage, model),
             Verdict = VerdictRules.Of(opening, model, cases, freeboard, uncovered, gaps),
-            Notes = Cautions.Of(site, opening, model, schedule, holdDowns),
+            Notes = [.. UnconfirmedValues.Notes(opening, library, project.Confirmed), .. Cautions.Of(site, opening, model, schedule, holdDowns)],
             Gaps = [.. gaps.Where(gap => !VerdictRules.IsByOthers(opening, gap.Check))],
         };
     }

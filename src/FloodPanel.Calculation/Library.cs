@@ -11,7 +11,11 @@ namespace FloodPanel.Calculation;
 /// <param name="Item">The material or profile.</param>
 /// <param name="Source">Where the figures come from.</param>
 /// <param name="Evidence">How the figures are known: "read", "derived", "memory" or "invented".</param>
-public sealed record LibraryEntry<T>(string Id, string Title, T Item, string Source, string Evidence);
+public sealed record LibraryEntry<T>(string Id, string Title, T Item, string Source, string Evidence)
+{
+    /// <summary>True when the figures are from memory: they carry a mark until the user has confirmed them.</summary>
+    public bool FromMemory => Evidence == "memory";
+}
 
 /// <summary>Materials and profiles that a project may name by id, and the design bases. Read from data files by the caller.</summary>
 /// <param name="materials">The materials.</param>

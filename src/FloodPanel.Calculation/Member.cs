@@ -43,8 +43,12 @@ public sealed record Member(
             found,
             shape,
             SectionProperties.Of(shape),
-            stack is null ? DesignStress.Bending(found, basis) : LogStress.Bending(found, shape, stack, basis),
-            stack is null ? DesignStress.Shear(found, basis) : LogStress.Shear(found, shape, stack, basis),
+            Marked(stack is null ? DesignStress.Bending(found, basis) : LogStress.Bending(found, shape, stack, basis), material),
+            Marked(stack is null ? DesignStress.Shear(found, basis) : LogStress.Shear(found, shape, stack, basis), material),
             deflectionLimit);
     }
+
+    /// <summary>A strength that the user typed is marked as theirs.</summary>
+    private static DesignStress? Marked(DesignStress? stress, MaterialChoice material) =>
+        stress is { Strength: not null } && material is Material ? stress with { Source = $"{stress.Source}; strength typed by the user" } : stress;
 }

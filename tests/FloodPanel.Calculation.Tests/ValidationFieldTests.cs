@@ -76,6 +76,8 @@ public class ValidationFieldTests
         ("openings[0].barrier.logs.profile.face", Fields.Face, v => LogProfile(new HollowRectangle { Height = 1, Depth = 2, Face = v, Web = 0.01 })),
         ("openings[0].barrier.logs.profile.web", Fields.Web, v => LogProfile(new HollowRectangle { Height = 2, Depth = 1, Face = 0.01, Web = v })),
         ("openings[0].barrier.logs.profile.wall", Fields.Wall, v => LogProfile(new RectangularTube { Height = 2, Depth = 2, Wall = v })),
+        ("openings[0].barrier.logs.profile.cornerRadius", Fields.CornerRadius, v => LogProfile(new RectangularTube { Height = 2, Depth = 2, Wall = 0.4, CornerRadius = v })),
+        ("openings[0].barrier.logs.profile.innerRadius", Fields.InnerRadius, v => LogProfile(new RectangularTube { Height = 2, Depth = 2, Wall = 0.4, InnerRadius = v })),
         ("openings[0].barrier.posts.profile.flange", Fields.Flange, v => Refused.With((PostSet p) => p with { Profile = new ISection { Height = 1, Depth = 2, Flange = v, Web = 0.01 } })),
         ("openings[0].barrier.posts.profile.web", Fields.Web, v => Refused.With((PostSet p) => p with { Profile = new ISection { Height = 1, Depth = 2, Flange = 0.01, Web = v } })),
     ];

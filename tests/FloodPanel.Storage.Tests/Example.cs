@@ -36,6 +36,7 @@ internal static class Example
         Engineer = "P. Holm",
         DesignBasis = DesignBasisKind.Eurocode,
         OwnBasis = DesignBases.Eurocode with { Title = "Eurocode with the national annex", Inland = new(1.4, 0.9, 1.2, 1.1, 1.3, 1.6) },
+        Confirmed = ["s275", "cf-100-100-5"],
         Site = new Site
         {
             Datum = "ordnance",
@@ -109,7 +110,7 @@ internal static class Example
                 Composite = new CompositeService { MaterialFactor = 2.5, ConversionFactor = 0.6 },
                 Below =
                 [
-                    new LogGroup { Material = new LibraryMaterial("en-aw-6005a-t6"), Profile = new RectangularTube { Height = 0.25, Depth = 0.08, Wall = 0.006 }, Count = 1 },
+                    new LogGroup { Material = new LibraryMaterial("en-aw-6005a-t6"), Profile = new RectangularTube { Height = 0.25, Depth = 0.08, Wall = 0.006, CornerRadius = 0.009, InnerRadius = 0.006 }, Count = 1 },
                     new LogGroup { Material = EveryFigure, Profile = new LibraryProfile("log-200-50"), Count = 2 },
                 ],
             },

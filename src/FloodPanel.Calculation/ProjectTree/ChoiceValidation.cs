@@ -50,8 +50,7 @@ internal static class ChoiceValidation
                 Hollow(hollow, path, problems);
                 break;
             case RectangularTube tube:
-                problems.Check(Fields.Wall, tube.Wall, path);
-                Fits(2 * tube.Wall, Math.Min(tube.Height, tube.Depth), $"{path}.wall", "Two walls together are", "the smaller side", problems);
+                Tube(tube, path, problems);
                 break;
             case ISection section:
                 problems.Check(Fields.Flange, section.Flange, path);
@@ -76,6 +75,28 @@ internal static class ChoiceValidation
         problems.Check(Fields.Webs, hollow.Webs, path);
         Fits(2 * hollow.Face, hollow.Depth, $"{path}.face", "Two faces together are", "the depth", problems);
         Fits(hollow.Webs * hollow.Web, hollow.Height, $"{path}.web", "The webs together are", "the height", problems);
+    }
+
+    private static void Tube(RectangularTube tube, string path, ProblemList problems)
+    {
+        var side = Math.Min(tube.Height, tube.Depth);
+        problems.Check(Fields.Wall, tube.Wall, path);
+        problems.Check(Fields.CornerRadius, tube.CornerRadius, path);
+        problems.Check(Fields.InnerRadius, tube.InnerRadius, path);
+        Fits(2 * tube.Wall, side, $"{path}.wall", "Two walls together are", "the smaller side", problems);
+        Fits(tube.OuterCorner, side / 2, $"{path}.cornerRadius", "The outer corner radius is", "half the smaller side", problems);
+        if (tube.InnerRadius is not { } inner)
+        {
+            return;
+        }
+
+        // Less would leave the wall thinner in the corner than along the sides; a tenth of a millimetre is rounding.
+        var least = tube.OuterCorner - tube.Wall;
+        Fits(inner, side / 2 - tube.Wall, $"{path}.innerRadius", "The inner corner radius is", "half the hollow", problems);
+        if (inner < least - 1e-4)
+        {
+            problems.Add($"{path}.innerRadius", $"The inner corner radius is {Section(inner)}; allowed is at least the outer radius less the wall, {Section(least)}.");
+        }
     }
 
     private static void Fits(

@@ -201,6 +201,14 @@ public static class Fields
     /// <summary>RectangularTube.Wall.</summary>
     public static Field Wall { get; } = new("wall", "Wall thickness", Dimension.SectionLength, 0, 0.5, "Of the tube.", true);
 
+    /// <summary>RectangularTube.CornerRadius.</summary>
+    public static Field CornerRadius { get; } = new("cornerRadius", "Outer corner radius", Dimension.SectionLength, 0, 1,
+        "EN 10210-2: 1.5 × wall; EN 10219-2: 2 × wall up to 6 mm, 2.5 × to 10 mm, 3 × above.");
+
+    /// <summary>RectangularTube.InnerRadius.</summary>
+    public static Field InnerRadius { get; } = new("innerRadius", "Inner corner radius", Dimension.SectionLength, 0, 1,
+        "EN 10210-2: the wall; EN 10219-2: the outer radius less the wall.");
+
     /// <summary>ISection.Flange.</summary>
     public static Field Flange { get; } = new("flange", "Flange thickness", Dimension.SectionLength, 0, 0.5, "Each flange.", true);
 

@@ -36,11 +36,23 @@ public sealed record HollowRectangle : Profile
     public int Webs { get; init; } = 2;
 }
 
-/// <summary>Rectangular tube of one wall thickness, sharp corners.</summary>
+/// <summary>Rectangular tube of one wall thickness.</summary>
 public sealed record RectangularTube : Profile
 {
-    /// <summary>Wall thickness [m], > 0.</summary>
+    /// <summary>t, wall thickness [m], > 0.</summary>
     public double Wall { get; init; }
+
+    /// <summary>r_o, radius of the outer corners [m], ≥ 0; null for sharp corners.</summary>
+    public double? CornerRadius { get; init; }
+
+    /// <summary>r_i, radius of the inner corners [m], ≥ 0; null for the outer one less the wall.</summary>
+    public double? InnerRadius { get; init; }
+
+    /// <summary>r_o, radius of the outer corners as it counts [m].</summary>
+    public double OuterCorner => CornerRadius ?? 0;
+
+    /// <summary>r_i, radius of the inner corners as it counts [m].</summary>
+    public double InnerCorner => InnerRadius ?? Math.Max(0, OuterCorner - Wall);
 }
 
 /// <summary>I-section, web along the load, sharp corners.</summary>

@@ -24,6 +24,9 @@ public sealed record Project
     /// <summary>A copy of a design basis, edited for this project; null where the standard one applies.</summary>
     public DesignBasis? OwnBasis { get; init; }
 
+    /// <summary>Ids of library entries whose figures, marked as from memory, the user has checked and confirmed.</summary>
+    public ValueList<string> Confirmed { get; init; } = [];
+
     /// <summary>Levels and water.</summary>
     public Site Site { get; init; } = new();
 

@@ -2,7 +2,7 @@ using FloodPanel.Calculation.ProjectTree;
 
 namespace FloodPanel.Calculation.Sections;
 
-/// <summary>Properties that bending in the direction of the water does not need: the other axis, torsion, warping. Sharp corners.</summary>
+/// <summary>Properties that bending in the direction of the water does not need: the other axis, torsion, warping. Sharp corners, but those of a tube with radii.</summary>
 public static class CrossAxis
 {
     /// <summary>I_z, second moment of area for bending across the direction of the water.</summary>
@@ -13,7 +13,7 @@ public static class CrossAxis
     {
         Rectangle => profile.Depth * Cube(profile.Height) / 12,
         HollowRectangle hollow => 2 * hollow.Face * Cube(hollow.Height) / 12 + Webs(hollow),
-        RectangularTube tube => (tube.Depth * Cube(tube.Height) - (tube.Depth - 2 * tube.Wall) * Cube(tube.Height - 2 * tube.Wall)) / 12,
+        RectangularTube tube => SectionProperties.Of(tube with { Height = tube.Depth, Depth = tube.Height }).Inertia,
         ISection section => 2 * section.Flange * Cube(section.Height) / 12 + (section.Depth - 2 * section.Flange) * Cube(section.Web) / 12,
         GivenProperties given => given.Inertia,
         _ => throw new ArgumentOutOfRangeException(nameof(profile), profile, "is not a known shape"),

@@ -15,7 +15,7 @@ public static class LibraryFiles
 
     private static readonly string[] ShapeColumns =
     [
-        "face_mm", "web_mm", "webs", "wall_mm", "flange_mm", "area_cm2", "inertia_cm4", "modulus_cm3", "plastic_modulus_cm3",
+        "face_mm", "web_mm", "webs", "wall_mm", "flange_mm", "corner_radius_mm", "inner_radius_mm", "area_cm2", "inertia_cm4", "modulus_cm3", "plastic_modulus_cm3",
         "shear_area_cm2",
     ];
 
@@ -84,8 +84,15 @@ public static class LibraryFiles
 
     private static RectangularTube ReadRectangularTube(LibraryRow row)
     {
-        row.Empty(ShapeColumns.Except(["wall_mm"]));
-        return new RectangularTube { Height = Height(row), Depth = Depth(row), Wall = row.Number("wall_mm", Fields.Wall) };
+        row.Empty(ShapeColumns.Except(["wall_mm", "corner_radius_mm", "inner_radius_mm"]));
+        return new RectangularTube
+        {
+            Height = Height(row),
+            Depth = Depth(row),
+            Wall = row.Number("wall_mm", Fields.Wall),
+            CornerRadius = row.NumberOrNull("corner_radius_mm", Fields.CornerRadius),
+            InnerRadius = row.NumberOrNull("inner_radius_mm", Fields.InnerRadius),
+        };
     }
 
     private static ISection ReadISection(LibraryRow row)
@@ -102,7 +109,7 @@ public static class LibraryFiles
 
     private static GivenProperties ReadProperties(LibraryRow row)
     {
-        row.Empty(ShapeColumns[..5]);
+        row.Empty(ShapeColumns[..7]);
         return new GivenProperties
         {
             Height = Height(row),

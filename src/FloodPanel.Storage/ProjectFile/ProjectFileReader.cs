@@ -94,6 +94,7 @@ public static class ProjectFileReader
             Engineer = file.Text("engineer", blank.Engineer),
             DesignBasis = kind,
             OwnBasis = file.Object("ownBasis") is { } basis ? BasisReader.Read(basis, kind) : null,
+            Confirmed = file.List("confirmed").Select(id => id.AsText()).ToValueList(),
             Site = file.NeededObject("site") is { } site ? ReadSite(site) : blank.Site,
             Openings = file.List("openings").Select(OpeningReader.Read).ToValueList(),
             Covers = file.List("covers").Select(CoverFile.Read).ToValueList(),

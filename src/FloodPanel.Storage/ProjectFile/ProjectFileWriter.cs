@@ -53,6 +53,7 @@ public static class ProjectFileWriter
             BasisWriter.Write(json, basis);
         }
 
+        WriteConfirmed(json, project.Confirmed);
         WriteSite(json, project.Site);
         json.WriteStartArray("openings");
         foreach (var opening in project.Openings)
@@ -63,6 +64,22 @@ public static class ProjectFileWriter
         json.WriteEndArray();
         CoverFile.Write(json, project.Covers);
         json.WriteEndObject();
+    }
+
+    private static void WriteConfirmed(Utf8JsonWriter json, ValueList<string> confirmed)
+    {
+        if (confirmed.Count == 0)
+        {
+            return;
+        }
+
+        json.WriteStartArray("confirmed");
+        foreach (var id in confirmed)
+        {
+            json.WriteStringValue(id);
+        }
+
+        json.WriteEndArray();
     }
 
     private static void WriteSite(Utf8JsonWriter json, Site site)

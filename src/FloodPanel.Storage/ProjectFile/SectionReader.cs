@@ -88,6 +88,8 @@ internal static class SectionReader
         Height = profile.Number("height"),
         Depth = profile.Number("depth"),
         Wall = profile.Number("wall"),
+        CornerRadius = profile.NumberOrNull("cornerRadius"),
+        InnerRadius = profile.NumberOrNull("innerRadius"),
     };
 
     private static ISection ReadISection(FileObject profile) => new()

@@ -81,6 +81,8 @@ internal static class SectionWriter
                 break;
             case RectangularTube tube:
                 json.WriteNumber("wall", tube.Wall);
+                json.WriteNumberIfAny("cornerRadius", tube.CornerRadius);
+                json.WriteNumberIfAny("innerRadius", tube.InnerRadius);
                 break;
             case ISection section:
                 json.WriteNumber("flange", section.Flange);

@@ -34,7 +34,7 @@ public sealed class LiveResults(Library library)
                 var opening = project.Openings[i];
                 results[opening.Id] = kept.TryGetValue(opening.Id, out var old) && ReferenceEquals(old.Result.Opening, opening)
                     ? old
-                    : new Calculated(project.Site, project.DesignBasis, project.OwnBasis, Design.Evaluate(project, opening, library));
+                    : new Calculated(project.Site, project.DesignBasis, project.OwnBasis, project.Confirmed, Design.Evaluate(project, opening, library));
             }
         }
     }
@@ -47,7 +47,8 @@ public sealed class LiveResults(Library library)
     }
 
     private static bool IsCurrent(Calculated calculated, Project project) =>
-        calculated.DesignBasis == project.DesignBasis && calculated.OwnBasis == project.OwnBasis && calculated.Site == project.Site;
+        calculated.DesignBasis == project.DesignBasis && calculated.OwnBasis == project.OwnBasis && calculated.Site == project.Site
+        && calculated.Confirmed == project.Confirmed;
 
     // Names and addresses are not calculated with; levels and the opening's own figures are.
     private bool MayCalculate(string path) => !Problems.Any(p =>
@@ -62,5 +63,5 @@ public sealed class LiveResults(Library library)
     /// <summary>Path of a cover in the project file, "covers[0]".</summary>
     public static string PathOfCover(int cover) => FormattableString.Invariant($"covers[{cover}]");
 
-    private sealed record Calculated(Site Site, DesignBasisKind DesignBasis, DesignBasis? OwnBasis, OpeningResult Result);
+    private sealed record Calculated(Site Site, DesignBasisKind DesignBasis, DesignBasis? OwnBasis, ValueList<string> Confirmed, OpeningResult Result);
 }

@@ -11,6 +11,8 @@ public static class ProjectAddress
 
     public static string CoverPlates(Guid id) => $"/projects/{id}/covers";
 
+    public static string Library(Guid id) => $"/projects/{id}/library";
+
     public static string Bench(Guid id, string openingId) => $"/projects/{id}/openings/{Uri.EscapeDataString(openingId)}";
 
     public static string Export(Guid id) => $"/projects/{id}/export";

@@ -57,7 +57,9 @@ internal static class Members
 
     private static Gen<Profile> Tube =>
         from wall in Numbers.From(0.002, 0.012)
-        select (Profile)new RectangularTube { Wall = wall };
+        from corner in Numbers.Perhaps(Numbers.From(0, 0.014))
+        from inner in Numbers.Perhaps(Numbers.From(0.0002, 0.001))
+        select (Profile)new RectangularTube { Wall = wall, CornerRadius = corner, InnerRadius = inner is { } more ? Math.Max(0, (corner ?? 0) - wall) + more : null };
 
     private static Gen<Profile> ISection =>
         from flange in Numbers.From(0.003, 0.014)

@@ -107,7 +107,12 @@ internal sealed class Retyped(UnitSystem system)
     {
         Rectangle solid => solid,
         HollowRectangle hollow => hollow with { Face = Read(hollow.Face, Fields.Face), Web = Read(hollow.Web, Fields.Web) },
-        RectangularTube tube => tube with { Wall = Read(tube.Wall, Fields.Wall) },
+        RectangularTube tube => tube with
+        {
+            Wall = Read(tube.Wall, Fields.Wall),
+            CornerRadius = Read(tube.CornerRadius, Fields.CornerRadius),
+            InnerRadius = Read(tube.InnerRadius, Fields.InnerRadius),
+        },
         ISection section => section with { Flange = Read(section.Flange, Fields.Flange), Web = Read(section.Web, Fields.Web) },
         GivenProperties given => given with
         {

@@ -67,6 +67,31 @@ public class ChoiceValidationTests
     }
 
     [Fact]
+    public void Profile_TubeCornersWithinItsSides_Accepted()
+    {
+        Refused.Not(WithLog(new RectangularTube { Height = 0.2, Depth = 0.09, Wall = 0.006, CornerRadius = 0.044 }));
+        Refused.Not(WithLog(new RectangularTube { Height = 0.2, Depth = 0.09, Wall = 0.006, CornerRadius = 0.009, InnerRadius = 0.006 }));
+    }
+
+    [Fact]
+    public void Profile_TubeCornerOfHalfItsSmallerSide_Refused() => Refused.Once(
+        WithLog(new RectangularTube { Height = 0.2, Depth = 0.09, Wall = 0.006, CornerRadius = 0.045 }),
+        $"{Path}.cornerRadius",
+        "The outer corner radius is 45.0 mm; allowed is less than half the smaller side, 45.0 mm.",
+        "The outer corner radius is 1.772 in; allowed is less than half the smaller side, 1.772 in.");
+
+    [Theory]
+    [InlineData(0.02, 0.01, "The inner corner radius is 10.0 mm; allowed is at least the outer radius less the wall, 14.0 mm.")]
+    [InlineData(0.02, 0.04, "The inner corner radius is 40.0 mm; allowed is less than half the hollow, 39.0 mm.")]
+    public void Profile_TubeInnerCornerThatLeavesNoEvenWall_Refused(double outer, double inner, string sentence)
+    {
+        var problem = Assert.Single(WithLog(new RectangularTube { Height = 0.2, Depth = 0.09, Wall = 0.006, CornerRadius = outer, InnerRadius = inner })
+            .Validate(Library.Empty));
+
+        Assert.Equal(($"{Path}.innerRadius", sentence), (problem.Path, problem.Message.ToString()));
+    }
+
+    [Fact]
     public void Profile_FlangesAndWebThatDoNotFit_BothRefused()
     {
         var problems = WithLog(new ISection { Height = 0.1, Depth = 0.1, Flange = 0.05, Web = 0.1 }).Validate(Library.Empty);

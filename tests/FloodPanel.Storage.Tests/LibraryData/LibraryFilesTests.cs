@@ -51,6 +51,37 @@ public sealed class LibraryFilesTests : IDisposable
     });
 
     [Fact]
+    public void Load_Delivered_EveryProfileCouldHaveBeenTyped() => Assert.All(LibraryFiles.Load(folder).Profiles.Values, entry =>
+    {
+        var logs = new LogStack { Material = Example.EveryFigure, Profile = entry.Item };
+        var opening = new Opening { Id = "door", ClearWidth = 1, ClearHeight = 1, Barrier = new Barrier { Logs = logs, Bays = [1] } };
+        var problems = new Project { Name = "one", Openings = [opening] }.Validate(Library.Empty);
+        Assert.DoesNotContain(problems, problem => problem.Path.Contains("profile", StringComparison.Ordinal));
+    });
+
+    /// <summary>EN 10219-2 and EN 10210-2, corner radii for section properties (from memory); AISC, twice the design wall.</summary>
+    [Fact]
+    public void Load_Delivered_StandardTubesHaveTheRadiiOfTheirStandard()
+    {
+        var profiles = LibraryFiles.Load(folder).Profiles.Values.Where(p => p.Evidence != "invented").ToList();
+
+        Assert.True(profiles.Count > 100);
+        Assert.All(profiles, entry =>
+        {
+            var tube = Assert.IsType<RectangularTube>(entry.Item);
+            var (outer, inner) = entry.Id[..2] switch
+            {
+                "hf" => (1.5, 1.0),
+                "hs" => (2.0, 1.0),
+                _ => tube.Wall <= 0.006 ? (2.0, 1.0) : tube.Wall <= 0.010 ? (2.5, 1.5) : (3.0, 2.0),
+            };
+            Assert.Equal(outer * tube.Wall, tube.CornerRadius!.Value, tolerance: 1e-6);
+            Assert.Equal(inner * tube.Wall, tube.InnerCorner, tolerance: 1e-6);
+            Assert.True(entry.FromMemory);
+        });
+    }
+
+    [Fact]
     public void Load_ProfileInMillimetres_IsInMetres()
     {
         var log = Assert.IsType<HollowRectangle>(LibraryFiles.Load(folder).Profiles["log-200-80"].Item);

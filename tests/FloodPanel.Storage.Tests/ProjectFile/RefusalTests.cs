@@ -183,7 +183,7 @@ public class RefusalTests
     {
         string[] nullable =
         [
-            "ownBasis", "leakage", "strengths", "openings", "levels", "wall", "actions", "flow", "wave", "debris", "coefficients", "wind", "line", "posts", "byOthers", "groundLevel",
+            "ownBasis", "confirmed", "cornerRadius", "innerRadius", "leakage", "strengths", "openings", "levels", "wall", "actions", "flow", "wave", "debris", "coefficients", "wind", "line", "posts", "byOthers", "groundLevel",
             "protectedSideLevel", "response", "bendingStrength", "shearStrength", "allowableBending", "allowableShear",
             "below", "ultimateStrength", "weldedYield", "weldedUltimate", "shearModulus", "crossStrength", "crossCompression", "characteristicDensity", "bucklingClass",
             "raker", "footResistance", "basePlate", "weldLeg", "weldStrength",
@@ -194,7 +194,7 @@ public class RefusalTests
             "footing", "measure", "lineResistance", "totalResistance",
         ];
         string[] whole = ["count", "webs", "riskCategory", "category", "rodsPerRow"];
-        string[] emptyAllowed = ["covers", "leakage", "timber", "strengths", "openings", "levels", "bays", "byOthers", "below", "wall", "actions", "coefficients"];
+        string[] emptyAllowed = ["confirmed", "covers", "leakage", "timber", "strengths", "openings", "levels", "bays", "byOthers", "below", "wall", "actions", "coefficients"];
         string[] libraryId = ["material", "profile"];
         string[] words = ["format", "designBasis", "floodZone", "kind", "family", "shape", "bucklingClass", "strengthReference", "mounting", "valuesFor", "measure", "soil", "duration", "method", "support", "position", "pressing"];
         var name = place.Name;

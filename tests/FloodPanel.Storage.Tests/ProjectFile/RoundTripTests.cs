@@ -12,6 +12,8 @@ public class RoundTripTests
         new Rectangle { Height = 0.15, Depth = 0.06 },
         new HollowRectangle { Height = 0.2, Depth = 0.08, Face = 0.003, Web = 0.0035, Webs = 4 },
         new RectangularTube { Height = 0.1, Depth = 0.15, Wall = 0.008 },
+        new RectangularTube { Height = 0.1, Depth = 0.15, Wall = 0.008, CornerRadius = 0.02 },
+        new RectangularTube { Height = 0.1, Depth = 0.15, Wall = 0.008, CornerRadius = 0.012, InnerRadius = 0.008 },
         new ISection { Height = 0.1, Depth = 0.12, Flange = 0.01, Web = 0.006 },
         new GivenProperties
         {
@@ -81,7 +83,7 @@ public class RoundTripTests
     {
         var file = Example.FullJson();
 
-        Assert.Equal("format version name reference client address engineer designBasis ownBasis site openings covers", Names(file));
+        Assert.Equal("format version name reference client address engineer designBasis ownBasis confirmed site openings covers", Names(file));
         Assert.Equal(
             "id name sillLevel groundLevel clearWidth clearHeight rake protectedSideLevel wall actions barrier leakage",
             Names(file["openings"]![0]!));

@@ -67,7 +67,10 @@ internal static class Examples
     };
 
     public static Library Library { get; } = new(
-        [new("alloy", "Test alloy", Aluminium, "Invented for tests", "invented")],
+        [
+            new("alloy", "Test alloy", Aluminium, "Invented for tests", "invented"),
+            new("remembered", "Remembered alloy", Aluminium, "Invented for tests", "memory"),
+        ],
         [new("log", "Test log", (Profile)Garage.Barrier.Logs.Profile, "Invented for tests", "invented")],
         DesignBases.Standard);
 

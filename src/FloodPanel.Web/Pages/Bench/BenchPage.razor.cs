@@ -15,6 +15,8 @@ public sealed partial class BenchPage
     [Parameter]
     public required string OpeningId { get; set; }
 
+    private Confirmations Confirmations => field ??= new(Editor);
+
     private int Index => Enumerable.Range(0, Project.Openings.Count).FirstOrDefault(i => Project.Openings[i].Id == OpeningId, -1);
 
     private Opening? Opening => Index < 0 ? null : Project.Openings[Index];

@@ -27,6 +27,10 @@ public sealed partial class ProfilePicker
     [Parameter, EditorRequired]
     public Library Library { get; set; } = null!;
 
+    /// <summary>What the member is made of, for its mass; null where the library does not hold it.</summary>
+    [Parameter, EditorRequired]
+    public Material? Material { get; set; }
+
     /// <summary>True for posts, which lists their usual shapes first.</summary>
     [Parameter, EditorRequired]
     public bool ForPosts { get; set; }
@@ -53,11 +57,14 @@ public sealed partial class ProfilePicker
 
     private LibraryEntry<Profile>? Entry => Choice is LibraryProfile named ? Library.Profiles.GetValueOrDefault(named.Id) : null;
 
+    /// <summary>The profile, once it can be drawn.</summary>
+    private Profile? Drawn => HasProblem ? null : Library.Find(Choice);
+
     private string? Summary
     {
         get
         {
-            if (Library.Find(Choice) is not { } profile || profile is GivenProperties || HasProblem)
+            if (Drawn is not { } profile)
             {
                 return null;
             }

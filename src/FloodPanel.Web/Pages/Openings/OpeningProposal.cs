@@ -16,7 +16,7 @@ public static class OpeningProposal
     public const double WidestBay = 2.5;
 
     private const string PreferredLogMaterial = "en-aw-6005a-t6";
-    private const string PreferredPostMaterial = "s275";
+    private const string PreferredPostMaterial = "s235";
 
     public static Opening For(Project project, Library library, OpeningBasics basics)
     {
@@ -130,9 +130,10 @@ public static class OpeningProposal
     private static PostSet PostsOf(LibraryMaterial material, LibraryEntry<Profile> profile) =>
         new() { Material = material, Profile = new LibraryProfile(profile.Id), Width = profile.Item.Height };
 
+    // A proposal does not rest on figures that somebody has yet to confirm.
     private static IEnumerable<LibraryEntry<Profile>> ByMass<T>(Library library)
         where T : Profile =>
-        library.Profiles.Values.Where(p => p.Item is T).OrderBy(p => SectionProperties.Of(p.Item).Area).ThenBy(p => p.Id, StringComparer.Ordinal);
+        library.Profiles.Values.Where(p => p.Item is T && !p.FromMemory).OrderBy(p => SectionProperties.Of(p.Item).Area).ThenBy(p => p.Id, StringComparer.Ordinal);
 
     private static LibraryMaterial? MaterialOf(Library library, MaterialFamily family, string preferred) =>
         library.Materials.ContainsKey(preferred)
