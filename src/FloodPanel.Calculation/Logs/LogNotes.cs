@@ -26,7 +26,7 @@ internal static class LogNotes
         var (material, stack) = (strength.Log.Material, model.Opening.Barrier.Logs);
         if (strength.Buckling.Gap is { } gap)
         {
-            yield return gap;
+            yield return gap with { Text = new($"Logs: {gap.Text}") };
         }
 
         if (material is { Family: MaterialFamily.Timber, Reference: StrengthReference.NdsReference } && stack.Timber is null)
