@@ -46,7 +46,7 @@ public static class LocalBuckling
         if (BendingStress.Of(member, basis, isWeldAffected) is not { } stress)
         {
             return member.Bending is null ? new(null, null) : Gap("buckling-strength", new(
-                $"Walls not checked for buckling: enter the yield strength{(isWeldAffected ? " beside a weld" : "")} of the {member.Material.Family.ToString().ToLowerInvariant()} too."));
+                $"Walls not checked for buckling: enter the yield{(isWeldAffected ? " beside a weld" : "")} of the {member.Material.Family.ToString().ToLowerInvariant()} too."));
         }
 
         return (member.Material.Family, basis.Kind) switch
