@@ -12,6 +12,9 @@ internal static class StepAudit
     /// <summary>Depths between levels are rounded to this [m], see FloodLevels.Depth.</summary>
     private const double LevelRounding = 1e-10;
 
+    /// <summary>Less of a ratio has no meaning: the share of a wave at the bed, many wavelengths down, hangs on the last digit of the depth.</summary>
+    private const double RatioRounding = 1e-12;
+
     /// <summary>What is wrong with the steps; empty when nothing is.</summary>
     public static IEnumerable<string> Complaints(string title, IReadOnlyList<CalculationStep> steps)
     {
@@ -75,7 +78,7 @@ internal static class StepAudit
             }
 
             var allowed = Tolerance * Math.Abs(step.Value) + Rounding * worked.Terms
-                + (step.Dimension == Dimension.Length ? LevelRounding : 0);
+                + (step.Dimension == Dimension.Length ? LevelRounding : step.Dimension == Dimension.Ratio ? RatioRounding : 0);
             return Math.Abs(worked.Value - step.Value) <= allowed ? null : $"the formula gives {worked.Value:R}";
         }
         catch (FormatException refused)
