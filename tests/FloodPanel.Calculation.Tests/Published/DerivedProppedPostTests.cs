@@ -59,6 +59,21 @@ public class DerivedProppedPostTests
         Assert.Equal(0.002385, solved.PeakDeflection() * Stiffness / (w0 * Math.Pow(1.2, 4)), tolerance: 0.0000005);
     }
 
+    /// <summary>
+    /// A base that turns and a prop at the top make a strip on two supports under a triangle of water. Deflection 0.00652·w·L⁴/EI (read in a stored
+    /// formula page, which has it at 0.5192·L); greatest moment 0.06415·w·L² at 0.5774·L from the end without load (integration).
+    /// </summary>
+    [Fact]
+    public void PropAtTheTop_TurningBase_StripUnderATriangle()
+    {
+        var solved = Solve(Water(1.2), 1.2, true);
+        const double w0 = 2 * 9810 * 1.2;
+
+        Assert.Equal(0.00652, solved.PeakDeflection() * Stiffness / (w0 * Math.Pow(1.2, 4)), tolerance: 0.000005);
+        Assert.Equal(0.06415, solved.PeakMoment().Moment / (w0 * 1.44), tolerance: 0.000005);
+        Assert.Equal(1 - 0.5774, solved.PeakMoment().At / 1.2, tolerance: 0.0005);
+    }
+
     /// <summary>Prop above the water: R = w0·h³·(5c − h)/(40·c³); below it: R = w0·(10h³ − 10h²c + 5hc² − c³)/(40·h·c).</summary>
     [Theory]
     [InlineData(0.8, 1.1)]
