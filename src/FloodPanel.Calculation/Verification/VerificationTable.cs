@@ -17,6 +17,7 @@ public static class VerificationTable
         .. LogRows.Rows(),
         .. GuideRows.Rows(),
         .. AnchorRows.Rows(),
+        .. FootingRows.Rows(),
         .. LeakageRows.Rows(),
         .. CoverRows.Rows(),
     ];
