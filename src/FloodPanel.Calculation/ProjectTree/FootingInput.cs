@@ -118,7 +118,7 @@ public static class FootingFields
     public static Field CutOff { get; } = new("cutOff", "Cut-off depth", Dimension.Length, 0, 30, "Of a sheet or trench below the base; counts twice in the creep path.");
 
     /// <summary>FootingInput.SlidingFactor.</summary>
-    public static Field SlidingFactor { get; } = new("slidingFactor", "Factor on sliding", Dimension.Ratio, 1, 5, "1.5 for the design flood (USACE EM 1110-2-2502).");
+    public static Field SlidingFactor { get; } = new("slidingFactor", "Factor on sliding", Dimension.Ratio, 1, 5, "1.5 for the design flood (USACE EM 1110-2-2502, secondary source).");
 
     /// <summary>FootingInput.OverturningFactor.</summary>
     public static Field OverturningFactor { get; } = new("overturningFactor", "Factor on overturning", Dimension.Ratio, 1, 5, "1.5 (FEMA P-259, from memory).");
