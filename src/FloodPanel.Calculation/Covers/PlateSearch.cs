@@ -12,9 +12,12 @@ internal static class PlateSearch
     public static PlateResponse Of(RectangularPlate plate)
     {
         var (height, half) = (plate.Height, plate.Width / 2);
-        var (moment, down, across) = Greatest(x => MomentsOn(plate.Row(x)), height, half);
+        var whole = Greatest(x => MomentsOn(plate.Row(x)), height, half);
+        var wet = Greatest(x => MomentsOn(plate.Row(x)), height, half, plate.WaterLine);
+        var (moment, down, across) = wet.Value > whole.Value ? wet : whole;
         var (bulge, _, _) = Greatest(x => plate.Row(x).Bulge, height, half);
-        var reaction = Greatest(x => ReactionOn(plate.Row(x)), height, 0).Value;
+        var reaction = Math.Max(
+            Greatest(x => ReactionOn(plate.Row(x)), height, 0).Value, Greatest(x => ReactionOn(plate.Row(x)), height, 0, plate.WaterLine).Value);
         if (plate.Top == PlateEdge.Supported)
         {
             var edge = plate.Row(0);
@@ -45,11 +48,12 @@ internal static class PlateSearch
         return new(moment, radius * (1 + @out * cosine), radius * (1 + @out * sine), bulge, plate.Reaction(0), 0, 0, fixing);
     }
 
-    private static (double Value, double X, double Y) Greatest(Func<double, Func<double, double>> row, double toX, double toY)
+    /// <summary>The greatest value between two lines; a strip of water at the foot of a plate has its peak between the lines of the whole plate.</summary>
+    private static (double Value, double X, double Y) Greatest(Func<double, Func<double, double>> row, double toX, double toY, double fromX = 0)
     {
         var best = (Value: double.NegativeInfinity, X: 0.0, Y: 0.0);
-        var (stepX, stepY) = (toX / Parts, toY / Parts);
-        Look(0, toX, 0, toY);
+        var (stepX, stepY) = ((toX - fromX) / Parts, toY / Parts);
+        Look(fromX, toX, 0, toY);
         for (var i = 0; i < Halvings; i++)
         {
             (stepX, stepY) = (stepX / 2, stepY / 2);

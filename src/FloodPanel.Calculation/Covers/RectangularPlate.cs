@@ -66,6 +66,9 @@ public sealed class RectangularPlate
     /// <summary>The lower edge.</summary>
     public PlateEdge Bottom { get; }
 
+    /// <summary>Where the pressure begins, down from the upper edge [m].</summary>
+    public double WaterLine => pressure.Start;
+
     /// <summary>What the plate feels most.</summary>
     public PlateResponse Worst() => PlateSearch.Of(this);
 

@@ -39,6 +39,21 @@ public class RectangularPlateTests
         }
     }
 
+    /// <summary>A little water at the foot bends the plate in a strip that a coarse search would step over.</summary>
+    [Theory]
+    [InlineData(-1.37)]
+    [InlineData(-1.30)]
+    [InlineData(-1.00)]
+    public void Worst_StripOfWaterAtTheFoot_NotMissed(double depth)
+    {
+        var plate = new RectangularPlate(1.42, 0.69, 0.4, PlateEdge.Supported, PlateEdge.Supported, PlatePressure.Water(1000, depth));
+
+        var worst = plate.Worst().Moment;
+
+        var most = Enumerable.Range(0, 1421).Max(x => plate.Moments(x / 1000.0, 0.345).Greatest);
+        Assert.InRange(worst, most, 1.01 * most);
+    }
+
     [Theory]
     [InlineData(1.0, 1.0, 0)]
     [InlineData(0.6, 1.5, 0.4)]

@@ -143,7 +143,7 @@ public class LogFurtherChecksTests
     {
         NeverWorse(scenario, l => l with { Joint = l.Joint is { } j ? j with { Travel = 2 * j.Travel, SealCompression = 2 * j.SealCompression } : null });
         NeverWorse(scenario, l => l with { FittingClearance = l.FittingClearance / 2 });
-        NeverWorse(scenario, l => l with { Composite = l.Composite is { } c ? c with { MaterialFactor = c.MaterialFactor / 1.2 + 0.2 } : null });
+        NeverWorse(scenario, l => l with { Composite = l.Composite is { } c ? c with { MaterialFactor = (1 + c.MaterialFactor) / 2 } : null });
     }
 
     [Fact]
