@@ -24,10 +24,10 @@ public sealed record Member(
     public double ShearResistance => Shear is null ? double.PositiveInfinity : Section.ShearArea * Shear.Value;
 
     /// <summary>Source of the bending check, as printed.</summary>
-    public string BendingSource => $"Elastic bending M/W; {Bending?.Source}";
+    public string BendingSource { get; } = $"Elastic bending M/W; {Bending?.Source}";
 
     /// <summary>Source of the shear check, as printed.</summary>
-    public string ShearSource => $"Shear over the shear area; {Shear?.Source}";
+    public string ShearSource { get; } = $"Shear over the shear area; {Shear?.Source}";
 
     /// <summary>True when both stresses are known, so that every check of the member has a result.</summary>
     public bool IsComplete => Bending is not null && Shear is not null;

@@ -59,32 +59,38 @@ internal static class VerdictRules
 
     private static Governing? Governing(IReadOnlyList<CaseResult> cases, Check freeboard)
     {
+        var hasPosts = cases[0].Posts.Count > 0;
         Governing? worst = freeboard.Passes ? null : new(freeboard.Name, null, freeboard.Utilisation, "");
-        foreach (var (check, caseName, member) in Checks(cases))
+        foreach (var (check, result, member) in Checks(cases))
         {
             if (check.MayGovern && (worst is null || check.Utilisation > worst.Utilisation))
             {
-                worst = new(check.Name, caseName, check.Utilisation, member);
+                worst = new(check.Name, result.Name, check.Utilisation, Name(member, hasPosts));
             }
         }
 
         return worst;
     }
 
-    private static string Name(LogResult log, bool hasPosts) => hasPosts
-        ? FormattableString.Invariant($"log {log.Index} in bay {log.Bay}")
-        : FormattableString.Invariant($"log {log.Index}");
-
-    private static IEnumerable<(Check Check, string Case, string Member)> Checks(IReadOnlyList<CaseResult> cases)
+    private static string Name(object member, bool hasPosts) => member switch
     {
-        var hasPosts = cases[0].Posts.Count > 0;
+        LogResult log when hasPosts => FormattableString.Invariant($"log {log.Index} in bay {log.Bay}"),
+        LogResult log => FormattableString.Invariant($"log {log.Index}"),
+        PostResult post => FormattableString.Invariant($"post {post.Index}"),
+        PartResult part => part.Member,
+        _ => throw new ArgumentOutOfRangeException(nameof(member), member, "is not a member"),
+    };
+
+    /// <summary>Each check with its case and the log, post or part that it is of.</summary>
+    private static IEnumerable<(Check Check, CaseResult Case, object Member)> Checks(IReadOnlyList<CaseResult> cases)
+    {
         foreach (var result in cases)
         {
             foreach (var log in result.Logs)
             {
                 foreach (var check in log.Checks)
                 {
-                    yield return (check, result.Name, Name(log, hasPosts));
+                    yield return (check, result, log);
                 }
             }
 
@@ -92,7 +98,7 @@ internal static class VerdictRules
             {
                 foreach (var check in post.Checks)
                 {
-                    yield return (check, result.Name, FormattableString.Invariant($"post {post.Index}"));
+                    yield return (check, result, post);
                 }
             }
 
@@ -100,7 +106,7 @@ internal static class VerdictRules
             {
                 foreach (var check in part.Checks)
                 {
-                    yield return (check, result.Name, part.Member);
+                    yield return (check, result, part);
                 }
             }
         }

@@ -66,8 +66,9 @@ internal static class CaseReport
     private static LogResult Log(
         OpeningModel model, CaseKind kind, CaseEvaluation numbers, int index, int bay, Working lineLoad)
     {
-        var response = numbers.Logs[bay * model.LogCount + index];
-        var (clear, bearing, log) = (model.Bays[bay], model.EndBearing, model.LogMember(index));
+        var setting = LogFurtherChecks.SettingOf(model, numbers, index, bay);
+        var above = index + 1 < model.LogCount ? LogFurtherChecks.SettingOf(model, numbers, index + 1, bay) : null;
+        var (log, response) = (setting.Log, setting.Response);
         var judged = CaseForces.JudgesDeflection(kind);
         return new()
         {
@@ -81,13 +82,13 @@ internal static class CaseReport
             Shear = response.Shear,
             Deflection = response.Deflection,
             LineLoadWorking = lineLoad,
-            BendingCheck = LogChecks.Bending(response, clear, bearing, log),
-            ShearCheck = LogChecks.Shear(response, clear, bearing, log),
-            DeflectionCheck = judged ? LogChecks.Deflection(response, clear, bearing, log) : null,
-            MomentWorking = log.Bending is null ? LogChecks.Moment(response, clear, bearing) : null,
-            ShearWorking = log.Shear is null ? LogChecks.ShearForce(response, clear, bearing) : null,
-            DeflectionWorking = judged ? null : LogChecks.DeflectionOnly(response, clear, bearing, log),
-            Others = LogFurtherChecks.Of(model, kind, numbers, index, bay),
+            BendingCheck = LogChecks.Bending(setting),
+            ShearCheck = LogChecks.Shear(setting),
+            DeflectionCheck = judged ? LogChecks.Deflection(setting) : null,
+            MomentWorking = log.Bending is null ? LogChecks.Moment(setting) : null,
+            ShearWorking = log.Shear is null ? LogChecks.ShearForce(setting) : null,
+            DeflectionWorking = judged ? null : LogChecks.DeflectionOnly(setting),
+            Others = LogFurtherChecks.Of(setting, above, judged),
         };
     }
 

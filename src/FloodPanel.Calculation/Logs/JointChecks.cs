@@ -4,25 +4,25 @@ namespace FloodPanel.Calculation.Logs;
 internal static class JointChecks
 {
     /// <summary>Difference of the deflections of a log and the one above it against the travel of the joint; null where none is entered.</summary>
-    public static Check? Travel(LogFurtherChecks.Setting setting, Member above, LogResponse next)
+    public static Check? Travel(LogFurtherChecks.Setting setting, LogSetting above)
     {
         if (setting.Strength.Joint is not { } joint)
         {
             return null;
         }
 
-        var (lower, upper) = (setting.Response.Deflection, next.Deflection);
+        var (lower, upper) = (setting.Response.Deflection, above.Response.Deflection);
         var apart = Math.Max(lower, upper) - Math.Min(lower, upper);
         return new(
             "log-joint-travel", "Joint to the log above", "Beam statics: the logs bend apart at mid-span", Dimension.Deflection,
-            apart, joint.Travel, new DeferredSteps(Steps));
+            apart, joint.Travel, new DeferredSteps<LogFurtherChecks.Setting>(setting, _ => Steps()));
 
         IReadOnlyList<CalculationStep> Steps()
         {
             var steps = new StepList(18);
             steps.Span(setting.ClearBay, setting.EndBearing);
-            Log(steps, "1", setting.Strength.Log, setting.Response);
-            Log(steps, "2", above, next);
+            Log(steps, "1", setting);
+            Log(steps, "2", above);
             steps.Add("Δ", "max(δ_1, δ_2) − min(δ_1, δ_2)", apart, Dimension.Deflection);
             steps.Given("Δ_lim", joint.Travel, Dimension.Deflection);
             steps.Add("u", "Δ/Δ_lim", apart / joint.Travel, Dimension.Ratio);
@@ -43,11 +43,11 @@ internal static class JointChecks
         var opening = rotation * setting.EndBearing;
         return new(
             "log-end-seal", "Seal at the log end", "Beam statics: the end turns over its bearing", Dimension.Deflection, opening,
-            compression, new DeferredSteps(Steps));
+            compression, new DeferredSteps<LogFurtherChecks.Setting>(setting, _ => Steps()));
 
         IReadOnlyList<CalculationStep> Steps()
         {
-            var steps = LogChecks.Loads(setting.ClearBay, setting.EndBearing, "w_k", load, "P_k", point);
+            var steps = LogChecks.Loads(setting, "w_k", load, "P_k", point);
             steps.Given("E", setting.Strength.Log.Material.ElasticModulus, Dimension.ElasticModulus);
             steps.Given("I", setting.Strength.Log.Section.Inertia, Dimension.SecondMoment);
             steps.Add("θ", point == 0 ? "w_k·L³/(24·E·I)" : "w_k·L³/(24·E·I) + P_k·L²/(16·E·I)", rotation, Dimension.Angle);
@@ -58,8 +58,9 @@ internal static class JointChecks
         }
     }
 
-    private static void Log(StepList steps, string index, Member log, in LogResponse response)
+    private static void Log(StepList steps, string index, LogSetting setting)
     {
+        var (log, response) = (setting.Log, setting.Response);
         var point = response.Point.Characteristic;
         steps.Given($"w_{index}", response.Load.Characteristic, Dimension.LineForce);
         steps.Given($"E_{index}", log.Material.ElasticModulus, Dimension.ElasticModulus);

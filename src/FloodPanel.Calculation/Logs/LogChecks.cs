@@ -10,98 +10,103 @@ public static class LogChecks
     private const string Statics = "Beam statics, simply supported";
 
     /// <summary>Bending: M = w·L²/8 + P·L/4 against M_R = f_b·W, the elastic resistance.</summary>
-    /// <param name="response">What the log feels.</param>
-    /// <param name="clearBay">b, clear width of the bay [m].</param>
-    /// <param name="endBearing">e, length of log that bears at each end [m].</param>
-    /// <param name="log">The log.</param>
+    /// <param name="setting">Where the log stands and what it feels.</param>
     /// <returns>The check; null when there is no design bending stress.</returns>
-    public static Check? Bending(in LogResponse response, double clearBay, double endBearing, Member log)
+    public static Check? Bending(LogSetting setting)
     {
-        if (log.Bending is not { } stress)
-        {
-            return null;
-        }
-
-        var steps = MomentSteps(response, clearBay, endBearing);
-        steps.Stress("f_b", stress);
-        steps.Given("W", log.Section.Modulus, Dimension.SectionModulus);
-        steps.Add("M_R", "f_b·W", log.MomentResistance, Dimension.Moment);
-        steps.Add("u", "M/M_R", response.Bending, Dimension.Ratio);
-        return new(
+        var (log, response) = (setting.Log, setting.Response);
+        return log.Bending is null ? null : new(
             "log-bending", "Log bending", log.BendingSource, Dimension.Moment, response.Moment, log.MomentResistance,
-            steps.Done());
+            new DeferredSteps<LogSetting>(setting, Steps));
+
+        static IReadOnlyList<CalculationStep> Steps(LogSetting setting)
+        {
+            var log = setting.Log;
+            var steps = MomentSteps(setting);
+            steps.Stress("f_b", log.Bending!);
+            steps.Given("W", log.Section.Modulus, Dimension.SectionModulus);
+            steps.Add("M_R", "f_b·W", log.MomentResistance, Dimension.Moment);
+            steps.Add("u", "M/M_R", setting.Response.Bending, Dimension.Ratio);
+            return steps.Done();
+        }
     }
 
     /// <summary>Shear: V = w·L/2 + P against V_R = f_v·A_v.</summary>
-    /// <param name="response">What the log feels.</param>
-    /// <param name="clearBay">b, clear width of the bay [m].</param>
-    /// <param name="endBearing">e, length of log that bears at each end [m].</param>
-    /// <param name="log">The log.</param>
+    /// <param name="setting">Where the log stands and what it feels.</param>
     /// <returns>The check; null when there is no design shear stress.</returns>
-    public static Check? Shear(in LogResponse response, double clearBay, double endBearing, Member log)
+    public static Check? Shear(LogSetting setting)
     {
-        if (log.Shear is not { } stress)
-        {
-            return null;
-        }
+        var (log, response) = (setting.Log, setting.Response);
+        return log.Shear is null ? null : new(
+            "log-shear", "Log shear", log.ShearSource, Dimension.Force, response.Shear, log.ShearResistance,
+            new DeferredSteps<LogSetting>(setting, Steps));
 
-        var steps = ShearSteps(response, clearBay, endBearing);
-        steps.Stress("f_v", stress);
-        steps.Given("A_v", log.Section.ShearArea, Dimension.SectionArea);
-        steps.Add("V_R", "f_v·A_v", log.ShearResistance, Dimension.Force);
-        steps.Add("u", "V/V_R", response.ShearUse, Dimension.Ratio);
-        return new(
-            "log-shear", "Log shear", log.ShearSource, Dimension.Force, response.Shear, log.ShearResistance, steps.Done());
+        static IReadOnlyList<CalculationStep> Steps(LogSetting setting)
+        {
+            var log = setting.Log;
+            var steps = ShearSteps(setting);
+            steps.Stress("f_v", log.Shear!);
+            steps.Given("A_v", log.Section.ShearArea, Dimension.SectionArea);
+            steps.Add("V_R", "f_v·A_v", log.ShearResistance, Dimension.Force);
+            steps.Add("u", "V/V_R", setting.Response.ShearUse, Dimension.Ratio);
+            return steps.Done();
+        }
     }
 
     /// <summary>Deflection: δ = 5·w_k·L⁴/(384·E·I) + P_k·L³/(48·E·I), unfactored, against L/n, the user's choice.</summary>
-    /// <param name="response">What the log feels.</param>
-    /// <param name="clearBay">b, clear width of the bay [m].</param>
-    /// <param name="endBearing">e, length of log that bears at each end [m].</param>
-    /// <param name="log">The log.</param>
-    public static Check Deflection(in LogResponse response, double clearBay, double endBearing, Member log)
+    /// <param name="setting">Where the log stands and what it feels.</param>
+    public static Check Deflection(LogSetting setting)
     {
-        var limit = (clearBay + endBearing) / log.DeflectionLimit;
-        var steps = DeflectionSteps(response, clearBay, endBearing, log);
-        steps.Given("n", log.DeflectionLimit, Dimension.Count);
-        steps.Add("δ_lim", "L/n", limit, Dimension.Deflection);
-        steps.Add("u", "δ/δ_lim", response.DeflectionUse, Dimension.Ratio);
         return new(
             "log-deflection", "Log deflection", "Beam statics; limit chosen by the user", Dimension.Deflection,
-            response.Deflection, limit, steps.Done());
+            setting.Response.Deflection, Limit(setting), new DeferredSteps<LogSetting>(setting, Steps));
+
+        static double Limit(LogSetting setting) => setting.Span / setting.Log.DeflectionLimit;
+
+        static IReadOnlyList<CalculationStep> Steps(LogSetting setting)
+        {
+            var steps = DeflectionSteps(setting);
+            steps.Given("n", setting.Log.DeflectionLimit, Dimension.Count);
+            steps.Add("δ_lim", "L/n", Limit(setting), Dimension.Deflection);
+            steps.Add("u", "δ/δ_lim", setting.Response.DeflectionUse, Dimension.Ratio);
+            return steps.Done();
+        }
     }
 
     /// <summary>How the moment came about, where no bending check tells it.</summary>
-    internal static Working Moment(in LogResponse response, double clearBay, double endBearing) =>
-        new("Moment in the log", Statics, MomentSteps(response, clearBay, endBearing).Done());
+    internal static Working Moment(LogSetting setting) =>
+        new("Moment in the log", Statics, new DeferredSteps<LogSetting>(setting, static s => MomentSteps(s).Done()));
 
     /// <summary>How the shear force came about, where no shear check tells it.</summary>
-    internal static Working ShearForce(in LogResponse response, double clearBay, double endBearing) =>
-        new("Shear force in the log", Statics, ShearSteps(response, clearBay, endBearing).Done());
+    internal static Working ShearForce(LogSetting setting) =>
+        new("Shear force in the log", Statics, new DeferredSteps<LogSetting>(setting, static s => ShearSteps(s).Done()));
 
     /// <summary>How the deflection came about, where it is not judged.</summary>
-    internal static Working DeflectionOnly(in LogResponse response, double clearBay, double endBearing, Member log) =>
-        new("Deflection of the log", Statics, DeflectionSteps(response, clearBay, endBearing, log).Done());
+    internal static Working DeflectionOnly(LogSetting setting) =>
+        new("Deflection of the log", Statics, new DeferredSteps<LogSetting>(setting, static s => DeflectionSteps(s).Done()));
 
-    internal static StepList MomentSteps(in LogResponse response, double clearBay, double endBearing)
+    internal static StepList MomentSteps(LogSetting setting)
     {
-        var steps = Loads(clearBay, endBearing, "w", response.Load.Design, "P", response.Point.Design);
+        var response = setting.Response;
+        var steps = Loads(setting, "w", response.Load.Design, "P", response.Point.Design);
         var formula = response.Point.Design == 0 ? "w·L²/8" : "w·L²/8 + P·L/4";
         steps.Add("M", formula, response.Moment, Dimension.Moment);
         return steps;
     }
 
-    internal static StepList ShearSteps(in LogResponse response, double clearBay, double endBearing)
+    internal static StepList ShearSteps(LogSetting setting)
     {
-        var steps = Loads(clearBay, endBearing, "w", response.Load.Design, "P", response.Point.Design);
+        var response = setting.Response;
+        var steps = Loads(setting, "w", response.Load.Design, "P", response.Point.Design);
         steps.Add("V", response.Point.Design == 0 ? "w·L/2" : "w·L/2 + P", response.Shear, Dimension.Force);
         return steps;
     }
 
-    internal static StepList DeflectionSteps(in LogResponse response, double clearBay, double endBearing, Member log)
+    internal static StepList DeflectionSteps(LogSetting setting)
     {
+        var (log, response) = (setting.Log, setting.Response);
         var point = response.Point.Characteristic;
-        var steps = Loads(clearBay, endBearing, "w_k", response.Load.Characteristic, "P_k", point);
+        var steps = Loads(setting, "w_k", response.Load.Characteristic, "P_k", point);
         steps.Given("E", log.Material.ElasticModulus, Dimension.ElasticModulus);
         steps.Given("I", log.Section.Inertia, Dimension.SecondMoment);
         var formula = point == 0 ? "5·w_k·L⁴/(384·E·I)" : "5·w_k·L⁴/(384·E·I) + P_k·L³/(48·E·I)";
@@ -109,11 +114,10 @@ public static class LogChecks
         return steps;
     }
 
-    internal static StepList Loads(
-        double clearBay, double endBearing, string lineSymbol, double line, string pointSymbol, double point)
+    internal static StepList Loads(LogSetting setting, string lineSymbol, double line, string pointSymbol, double point)
     {
-        var steps = new StepList(12);
-        steps.Span(clearBay, endBearing);
+        var steps = new StepList(16);
+        steps.Span(setting.ClearBay, setting.EndBearing);
         steps.Given(lineSymbol, line, Dimension.LineForce);
         if (point != 0)
         {

@@ -1,32 +1,32 @@
-using FloodPanel.Calculation.Cases;
-
 namespace FloodPanel.Calculation.Logs;
 
 /// <summary>What a log must stand besides bending, shear and deflection as a beam.</summary>
 internal static class LogFurtherChecks
 {
-    /// <summary>Where a log stands and what it feels.</summary>
-    internal sealed record Setting(LogStrength Strength, LogResponse Response, double ClearBay, bool IsJudged)
-    {
-        public double EndBearing => Strength.EndBearing;
+    /// <summary>Where a log stands, what it feels and what it resists besides bending and shear as a beam.</summary>
+    internal sealed record Setting(LogStrength Strength, LogResponse Response, double ClearBay, double Pressure)
+        : LogSetting(Response, ClearBay, Strength.EndBearing, Strength.Log);
 
-        public double Span => ClearBay + EndBearing;
-    }
+    /// <summary>The setting of one log in one bay.</summary>
+    public static Setting SettingOf(OpeningModel model, CaseEvaluation numbers, int index, int bay) =>
+        new(model.LogStrength(index), numbers.Logs[bay * model.LogCount + index], model.Bays[bay], Pressure(model, numbers, index));
 
-    public static IReadOnlyList<Check> Of(OpeningModel model, CaseKind kind, CaseEvaluation numbers, int index, int bay)
+    /// <summary>The checks of one log that have their inputs.</summary>
+    /// <param name="setting">The log.</param>
+    /// <param name="above">The log above it; null at the top.</param>
+    /// <param name="isJudged">False where deflections are reported and not judged.</param>
+    public static IReadOnlyList<Check> Of(Setting setting, Setting? above, bool isJudged)
     {
-        var at = bay * model.LogCount + index;
-        var setting = new Setting(model.LogStrength(index), numbers.Logs[at], model.Bays[bay], CaseForces.JudgesDeflection(kind));
         var checks = new List<Check>(6);
         Add(checks, WallChecks.Buckling(setting));
-        Add(checks, SkinCheck.Of(setting, Pressure(model, numbers, index)));
+        Add(checks, SkinCheck.Of(setting));
         Add(checks, SeatChecks.Webs(setting));
         Add(checks, SeatChecks.Timber(setting));
-        if (setting.IsJudged)
+        if (isJudged)
         {
             Add(checks, ShearDeflection.Of(setting));
             Add(checks, JointChecks.Seal(setting));
-            Add(checks, index + 1 < model.LogCount ? JointChecks.Travel(setting, model.LogMember(index + 1), numbers.Logs[at + 1]) : null);
+            Add(checks, above is null ? null : JointChecks.Travel(setting, above));
         }
 
         return checks;

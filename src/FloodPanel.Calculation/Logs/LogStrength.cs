@@ -16,6 +16,7 @@ internal sealed class LogStrength
         Buckling = LocalBuckling.Of(log, basis);
         Seat = SeatResistance.Of(log, basis, Bearing);
         Across = LogStress.Across(log.Material, stack, basis);
+        AcrossSource = $"Contact area alone, no spread; {Across?.Source}";
         Cross = LogStress.Cross(log.Material, stack);
         Combined = basis.Kind == DesignBasisKind.Eurocode && log.Material.Family == MaterialFamily.Aluminium ? 1.2 : 1;
     }
@@ -34,6 +35,9 @@ internal sealed class LogStrength
 
     /// <summary>Timber across the grain, or null.</summary>
     public DesignStress? Across { get; }
+
+    /// <summary>Source of <see cref="Across"/>, as printed.</summary>
+    public string AcrossSource { get; }
 
     /// <summary>Composite across its fibres, or null.</summary>
     public DesignStress? Cross { get; }

@@ -12,10 +12,12 @@ internal static class SeatChecks
         }
 
         return new(
-            "log-crippling", "Log webs at the seat", seat.Source, Dimension.Force, setting.Response.Shear, seat.Force, new DeferredSteps(Steps));
+            "log-crippling", "Log webs at the seat", seat.Source, Dimension.Force, setting.Response.Shear, seat.Force,
+            new DeferredSteps<LogFurtherChecks.Setting>(setting, Steps));
 
-        IReadOnlyList<CalculationStep> Steps()
+        static IReadOnlyList<CalculationStep> Steps(LogFurtherChecks.Setting setting)
         {
+            var seat = setting.Strength.Seat!;
             var steps = Begin(setting);
             steps.Steps.AddRange(seat.Steps);
             steps.Add("u", "V/R_w", setting.Response.Shear / seat.Force, Dimension.Ratio);
@@ -31,16 +33,18 @@ internal static class SeatChecks
             return null;
         }
 
-        var height = setting.Strength.Log.Section.Height;
-        var bearing = setting.Response.Shear / (height * setting.Strength.Bearing);
         return new(
-            "log-seat-bearing", "Log bearing at the seat", $"Contact area alone, no spread; {stress.Source}", Dimension.Stress,
-            bearing, stress.Value, new DeferredSteps(Steps));
+            "log-seat-bearing", "Log bearing at the seat", setting.Strength.AcrossSource, Dimension.Stress,
+            Bearing(setting), stress.Value, new DeferredSteps<LogFurtherChecks.Setting>(setting, Steps));
 
-        IReadOnlyList<CalculationStep> Steps()
+        static double Bearing(LogFurtherChecks.Setting setting) =>
+            setting.Response.Shear / (setting.Log.Section.Height * setting.Strength.Bearing);
+
+        static IReadOnlyList<CalculationStep> Steps(LogFurtherChecks.Setting setting)
         {
+            var (stress, bearing) = (setting.Strength.Across!, Bearing(setting));
             var steps = Begin(setting);
-            steps.Given("h", height, Dimension.SectionLength);
+            steps.Given("h", setting.Log.Section.Height, Dimension.SectionLength);
             steps.Add("σ", "V/(h·N)", bearing, Dimension.Stress);
             steps.Stress("f_90", stress);
             steps.Add("u", "σ/f_90", bearing / stress.Value, Dimension.Ratio);
@@ -51,7 +55,7 @@ internal static class SeatChecks
     /// <summary>V and N = e − c.</summary>
     private static StepList Begin(LogFurtherChecks.Setting setting)
     {
-        var steps = LogChecks.ShearSteps(setting.Response, setting.ClearBay, setting.EndBearing);
+        var steps = LogChecks.ShearSteps(setting);
         steps.Given("c", setting.Strength.Clearance, Dimension.SectionLength);
         steps.Add("N", "e − c", setting.Strength.Bearing, Dimension.SectionLength);
         return steps;

@@ -49,11 +49,11 @@ public static class ShearDeflection
         var (whole, limit) = (response.Deflection + shear, setting.Span / log.DeflectionLimit);
         return new(
             "log-deflection-with-shear", "Log deflection with shear", "USDA FPL-GTR-190 (2010), Table 9-1; limit chosen by the user",
-            Dimension.Deflection, whole, limit, new DeferredSteps(Steps));
+            Dimension.Deflection, whole, limit, new DeferredSteps<LogFurtherChecks.Setting>(setting, _ => Steps()));
 
         IReadOnlyList<CalculationStep> Steps()
         {
-            var steps = LogChecks.DeflectionSteps(response, setting.ClearBay, setting.EndBearing, log);
+            var steps = LogChecks.DeflectionSteps(setting);
             steps.Given("G", modulus, Dimension.ElasticModulus);
             steps.Given("A_s", area, Dimension.SectionArea);
             steps.Add("δ_v", point == 0 ? "w_k·L²/(8·G·A_s)" : "w_k·L²/(8·G·A_s) + P_k·L/(4·G·A_s)", shear, Dimension.Deflection);

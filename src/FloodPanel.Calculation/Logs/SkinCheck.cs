@@ -1,6 +1,5 @@
 using FloodPanel.Calculation.Materials;
 using FloodPanel.Calculation.ProjectTree;
-using FloodPanel.Calculation.Sections;
 
 namespace FloodPanel.Calculation.Logs;
 
@@ -26,68 +25,80 @@ public static class SkinCheck
     }
 
     /// <summary>The check; null for a solid log, a dry one, and where the yield of a metal is not known: an allowable for bending alone says nothing of stresses together.</summary>
-    internal static Check? Of(LogFurtherChecks.Setting setting, double pressure)
+    internal static Check? Of(LogFurtherChecks.Setting setting)
     {
-        var log = setting.Strength.Log;
-        if (setting.Strength.Walls is not { } walls || pressure <= 0)
+        if (setting.Strength.Walls is null || setting.Pressure <= 0)
         {
             return null;
         }
 
-        return log.Material.Family == MaterialFamily.Composite
-            ? setting.Strength.Cross is { } cross ? Across(pressure, walls, cross) : null
-            : log is { Bending: { } stress, Material.BendingStrength: not null } ? Combined(setting, pressure, walls, stress) : null;
+        return setting.Log.Material.Family == MaterialFamily.Composite
+            ? setting.Strength.Cross is { } cross ? Across(setting, cross) : null
+            : setting.Log is { Bending: { } stress, Material.BendingStrength: not null } ? Combined(setting, stress) : null;
     }
 
-    private static Check Across(double pressure, ThinWalls walls, DesignStress stress)
+    private static Check Across(LogFurtherChecks.Setting setting, DesignStress stress)
     {
-        var skin = Stress(pressure, walls.FacePart, walls.FaceThickness, walls.IsOutstand);
-        return Check("Statics of a strip of skin; strength across the fibres", skin, stress.Value, Steps);
+        return Check("Statics of a strip of skin; strength across the fibres", Stress(setting), stress.Value, setting, Steps);
 
-        IReadOnlyList<CalculationStep> Steps()
+        static IReadOnlyList<CalculationStep> Steps(LogFurtherChecks.Setting setting)
         {
-            var steps = Strip(pressure, walls, skin);
+            var stress = setting.Strength.Cross!;
+            var steps = Strip(setting);
             steps.Stress("f_90", stress);
-            steps.Add("u", "σ_z/f_90", skin / stress.Value, Dimension.Ratio);
+            steps.Add("u", "σ_z/f_90", Stress(setting) / stress.Value, Dimension.Ratio);
             return steps.Done();
         }
     }
 
-    private static Check Combined(LogFurtherChecks.Setting setting, double pressure, ThinWalls walls, DesignStress stress)
+    private static Check Combined(LogFurtherChecks.Setting setting, DesignStress stress)
     {
-        var (moment, modulus, limit) = (setting.Response.Moment, setting.Strength.Log.Section.Modulus, setting.Strength.Combined);
-        var (along, skin) = (moment / modulus, Stress(pressure, walls.FacePart, walls.FaceThickness, walls.IsOutstand));
-        var together = Math.Sqrt(along * along + along * skin + skin * skin);
-        var allowed = Math.Sqrt(limit) * stress.Value;
+        var limit = setting.Strength.Combined;
         return Check(
             limit > 1 ? "Statics of a strip of skin; EN 1999-1-1, 6.2.1, C = 1.2 (from memory)" : "Statics of a strip of skin; von Mises",
-            together, allowed, Steps);
+            Together(setting), Math.Sqrt(limit) * stress.Value, setting, Steps);
 
-        IReadOnlyList<CalculationStep> Steps()
+        static double Together(LogFurtherChecks.Setting setting)
         {
-            var steps = Strip(pressure, walls, skin);
+            var (along, skin) = (setting.Response.Moment / setting.Log.Section.Modulus, Stress(setting));
+            return Math.Sqrt(along * along + along * skin + skin * skin);
+        }
+
+        static IReadOnlyList<CalculationStep> Steps(LogFurtherChecks.Setting setting)
+        {
+            var (moment, modulus, stress) = (setting.Response.Moment, setting.Log.Section.Modulus, setting.Log.Bending!);
+            var (together, allowed) = (Together(setting), Math.Sqrt(setting.Strength.Combined) * stress.Value);
+            var steps = Strip(setting);
             steps.Given("M", moment, Dimension.Moment);
             steps.Given("W", modulus, Dimension.SectionModulus);
-            steps.Add("σ_x", "M/W", along, Dimension.Stress);
+            steps.Add("σ_x", "M/W", moment / modulus, Dimension.Stress);
             steps.Add("σ_v", "√(σ_x² + σ_x·σ_z + σ_z²)", together, Dimension.Stress);
             steps.Stress("f_b", stress);
-            steps.Given("C", limit, Dimension.Ratio);
+            steps.Given("C", setting.Strength.Combined, Dimension.Ratio);
             steps.Add("σ_R", "√(C)·f_b", allowed, Dimension.Stress);
             steps.Add("u", "σ_v/σ_R", together / allowed, Dimension.Ratio);
             return steps.Done();
         }
     }
 
-    private static StepList Strip(double pressure, ThinWalls walls, double stress)
+    private static double Stress(LogFurtherChecks.Setting setting)
     {
+        var walls = setting.Strength.Walls!;
+        return Stress(setting.Pressure, walls.FacePart, walls.FaceThickness, walls.IsOutstand);
+    }
+
+    private static StepList Strip(LogFurtherChecks.Setting setting)
+    {
+        var walls = setting.Strength.Walls!;
         var steps = new StepList(16);
-        steps.Given("p", pressure, Dimension.Pressure);
+        steps.Given("p", setting.Pressure, Dimension.Pressure);
         steps.Given("b_f", walls.FacePart, Dimension.SectionLength);
         steps.Given("t_f", walls.FaceThickness, Dimension.SectionLength);
-        steps.Add("σ_z", walls.IsOutstand ? "6·(p·b_f²/2)/t_f²" : "6·(p·b_f²/8)/t_f²", stress, Dimension.Stress);
+        steps.Add("σ_z", walls.IsOutstand ? "6·(p·b_f²/2)/t_f²" : "6·(p·b_f²/8)/t_f²", Stress(setting), Dimension.Stress);
         return steps;
     }
 
-    private static Check Check(string source, double demand, double capacity, Func<IReadOnlyList<CalculationStep>> steps) =>
-        new("log-skin", "Log skin between webs", source, Dimension.Stress, demand, capacity, new DeferredSteps(steps));
+    private static Check Check(
+        string source, double demand, double capacity, LogFurtherChecks.Setting setting, Func<LogFurtherChecks.Setting, IReadOnlyList<CalculationStep>> steps) =>
+        new("log-skin", "Log skin between webs", source, Dimension.Stress, demand, capacity, new DeferredSteps<LogFurtherChecks.Setting>(setting, steps));
 }

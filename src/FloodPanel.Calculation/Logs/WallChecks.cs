@@ -13,11 +13,12 @@ internal static class WallChecks
 
         return new(
             "log-local-buckling", "Log bending with local buckling", resistance.Source, Dimension.Moment,
-            setting.Response.Moment, resistance.Moment, new DeferredSteps(Steps));
+            setting.Response.Moment, resistance.Moment, new DeferredSteps<LogFurtherChecks.Setting>(setting, Steps));
 
-        IReadOnlyList<CalculationStep> Steps()
+        static IReadOnlyList<CalculationStep> Steps(LogFurtherChecks.Setting setting)
         {
-            var steps = LogChecks.MomentSteps(setting.Response, setting.ClearBay, setting.EndBearing);
+            var resistance = setting.Strength.Buckling.Resistance!;
+            var steps = LogChecks.MomentSteps(setting);
             steps.Steps.AddRange(resistance.Steps);
             steps.Add("u", "M/M_R", setting.Response.Moment / resistance.Moment, Dimension.Ratio);
             return steps.Done();

@@ -23,10 +23,12 @@ public class LogChecksTests
 
     private static readonly LogResponse Response = LogResponse.Of(new(1_600, 2_000), 1.8, Plank);
 
+    private static readonly LogSetting Setting = new(Response, 1.75, 0.05, Plank);
+
     [Fact]
     public void Bending_Plank_ByHand()
     {
-        var check = LogChecks.Bending(Response, 1.75, 0.05, Plank)!;
+        var check = LogChecks.Bending(Setting)!;
 
         Hand.Equal(810, check.Demand);
         Hand.Equal(1_080, check.Capacity);
@@ -37,7 +39,7 @@ public class LogChecksTests
     [Fact]
     public void Shear_Plank_ByHand()
     {
-        var check = LogChecks.Shear(Response, 1.75, 0.05, Plank)!;
+        var check = LogChecks.Shear(Setting)!;
 
         Hand.Equal(1_800, check.Demand);
         Hand.Equal(8_000, check.Capacity);
@@ -48,7 +50,7 @@ public class LogChecksTests
     [Fact]
     public void Deflection_Plank_ByHand()
     {
-        var check = LogChecks.Deflection(Response, 1.75, 0.05, Plank);
+        var check = LogChecks.Deflection(Setting);
 
         Hand.Equal(0.006075, check.Demand);
         Hand.Equal(0.009, check.Capacity);
@@ -60,9 +62,10 @@ public class LogChecksTests
     {
         var unknown = new Member(Plank.Material, Plank.Profile, Plank.Section, null, null, 200);
         var response = LogResponse.Of(new(1_600, 2_000), 1.8, unknown);
+        var setting = new LogSetting(response, 1.75, 0.05, unknown);
 
-        Assert.Null(LogChecks.Bending(response, 1.75, 0.05, unknown));
-        Assert.Null(LogChecks.Shear(response, 1.75, 0.05, unknown));
+        Assert.Null(LogChecks.Bending(setting));
+        Assert.Null(LogChecks.Shear(setting));
         Assert.Equal((0, 0), (response.Bending, response.ShearUse));
         Assert.False(unknown.IsComplete);
     }
